@@ -1,0 +1,5 @@
+export * from "./teams";
+export * from "./athletes";
+export * from "./camps";
+export * from "./feeds";
+export * from "./mails";
