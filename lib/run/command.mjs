@@ -1,0 +1,80 @@
+// Plain Node, no dependency: runs before anything is installed.
+import { spawn } from "node:child_process";
+
+/** A failure whose message is the one line a person needs; anything else is a defect and keeps its stack. */
+export class SetupError extends Error {
+  name = "SetupError";
+}
+
+/**
+ * Runs a command to its end and gives what it printed. Never throws on a non-zero exit: the caller knows what it means.
+ * @param {string} command
+ * @param {readonly string[]} args
+ * @param {import("node:child_process").SpawnOptions & { input?: string; onLine?: (line: string) => void }} [options]
+ * @returns {Promise<{ code: number; stdout: string; stderr: string; output: string }>}
+ */
+export function run(command, args, { input, onLine, ...options } = {}) {
+  return new Promise((resolve) => {
+    const child = spawn(command, args, { stdio: ["pipe", "pipe", "pipe"], ...options });
+    let stdout = "";
+    let stderr = "";
+    let output = "";
+    const collect = (stream, add) => {
+      if (!stream) return;
+      let rest = "";
+      stream.setEncoding("utf8");
+      stream.on("data", (chunk) => {
+        add(chunk);
+        output += chunk;
+        if (!onLine) return;
+        const lines = (rest + chunk).split("\n");
+        rest = lines.pop() ?? "";
+        for (const line of lines) onLine(line);
+      });
+    };
+    collect(child.stdout, (chunk) => (stdout += chunk));
+    collect(child.stderr, (chunk) => (stderr += chunk));
+    child.on("error", (error) => {
+      stderr += error.message;
+      output += error.message;
+      resolve({ code: 127, stdout, stderr, output });
+    });
+    child.on("close", (code, signal) =>
+      resolve({ code: code ?? (signal ? 128 : 1), stdout, stderr, output }),
+    );
+    // A child that ends before it reads its input closes the pipe: its exit code tells, not EPIPE.
+    child.stdin?.on("error", () => undefined);
+    child.stdin?.end(input ?? "");
+  });
+}
+
+/** Turns what the system said into one line a person can act on. */
+export function explain(text) {
+  if (/No space left on device|ENOSPC|Disk quota exceeded|EDQUOT/i.test(text))
+    return "the disk is full; free some space and start again";
+  if (/Read-only file system|EROFS/i.test(text)) return "the disk is read-only here";
+  if (/Permission denied|EACCES|EPERM|Operation not permitted/i.test(text)) {
+    const path = /(?:"|')(\/[^"']+)(?:"|')/.exec(text)?.[1];
+    return `no permission${path ? ` for ${path}` : ""}`;
+  }
+  const lines = text
+    .split("\n")
+    .map((line) => line.trim())
+    .filter(Boolean);
+  const telling =
+    lines.findLast((line) => /FATAL|PANIC|ERROR|error/.test(line)) ?? lines.at(-1) ?? "no reason given";
+  return telling.replace(/^[\d-]+ [\d:.]+ \S+ (\[\d+\] )?/, "");
+}
+
+/** Runs `main`, prints a `SetupError` or a full disk as one line, and sets the exit code. */
+export async function runMain(main) {
+  try {
+    process.exitCode = (await main()) ?? 0;
+  } catch (error) {
+    process.exitCode = 1;
+    if (error instanceof SetupError) console.error(`bellward: ${error.message}`);
+    else if (error instanceof Error && "code" in error && "syscall" in error)
+      console.error(`bellward: ${explain(error.message)}`);
+    else console.error(error);
+  }
+}
