@@ -1,3 +1,4 @@
 export * from "./roles";
 export * from "./table";
 export * from "./changes";
+export * from "./concerned";

@@ -19,7 +19,7 @@ export const POLICY = {
   "camps.bout": { description: "Change the bout or mark it off", roles: ["head"] },
   "sport.write": { description: "Add, move, edit and drop sport sessions", roles: ["head", "strength", "skills"] },
   "lifts.write": { description: "Pin and release lifting, set the coach's factor", roles: ["head", "strength"] },
-  "lifts.detail": { description: "See sets, factors and reasons of lifting", roles: ["head", "strength"], own: ["athlete"] },
+  "lifts.detail": { description: "See sets, factors and reasons of lifting", roles: ["head", "strength", "skills", "medic"], own: ["athlete"] },
   "camps.put-back": { description: "Put back a saved change", roles: ["head", "strength"] },
   "weight.read": { description: "See weights and the weight limit path", roles: ["head", "strength"], own: ["athlete"] },
   "checkins.read": { description: "See check-ins", roles: ["head", "strength", "medic"], own: ["athlete"] },

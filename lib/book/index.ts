@@ -1,0 +1,7 @@
+/** The camp book: from people's decisions to the engine's input, the same in browser and server. Pure. */
+export * from "./edit";
+export * from "./edit-for";
+export * from "./plan-book";
+export * from "./preview";
+export * from "./put-back";
+export * from "./words";

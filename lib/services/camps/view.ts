@@ -1,0 +1,66 @@
+import { listMembersToTell } from "@/db/queries/members-to-tell";
+import type { Tx } from "@/db/client";
+import { planInputOf } from "@/lib/book";
+import { instantOf } from "@/lib/calendar/zones";
+import { instantAt } from "@/lib/engine";
+import type { Au, Plan } from "@/lib/engine/types";
+import { POLICY, can, type Action, type Role } from "@/lib/policy";
+import type { CampBook } from "@/lib/schemas/camp-book";
+import type { CampView } from "@/lib/schemas/camp";
+import type { TeamContext } from "@/lib/services/context";
+import type { LoadedCamp } from "./load";
+
+const ACTIONS = Object.keys(POLICY) as Action[];
+
+/** Others whom a save of this camp may concern: athletes and guests only where the camp is theirs. */
+export async function othersOf(tx: Tx, ctx: TeamContext, athleteId: string): Promise<{ userId: string; role: Role }[]> {
+  const members = await listMembersToTell(tx, ctx.teamId, ctx.userId);
+  return members.filter(({ role, athleteId: tied }) => (role !== "athlete" && role !== "guest") || tied === athleteId);
+}
+
+/** Dates without numbers: what a guest gets. */
+function withoutLiftingDetail(plan: Plan): Plan {
+  const none = 0 as Au;
+  return {
+    ...plan,
+    lifts: plan.lifts.map((lift) => ({ ...lift, sets: 0, baseSets: 0, floorSets: 0, effort: 0, factors: [], reasons: [] })),
+    weeks: plan.weeks.map((week) => ({ ...week, sets: 0, sportLoad: none, liftingLoad: none, monotony: null, strain: null, loadCap: null })),
+    days: plan.days.map((day) => ({ ...day, sets: 0, sport: none, lifting: none })),
+    unplaced: [],
+    violations: [],
+    form: { ...plan.form, values: [] },
+  };
+}
+
+const withoutDecisions = (book: CampBook): CampBook => ({
+  ...book,
+  bout: { ...book.bout, limitKg: null },
+  pins: [],
+  coachFactors: {},
+  holds: [],
+  rules: {},
+  athlete: { ...book.athlete, freeHours: [] },
+  sport: book.sport.map((entry) => ({ ...entry, effort: 0 })),
+});
+
+export async function viewOf(tx: Tx, ctx: TeamContext, camp: LoadedCamp): Promise<CampView> {
+  const { athlete, row } = camp;
+  const detail = can(ctx.member, "lifts.detail", athlete.id);
+  const others = await othersOf(tx, ctx, athlete.id);
+  const now = instantOf(ctx.now);
+  const input = planInputOf(camp.book, now);
+  const sport = input.sport.filter(
+    (session) => camp.book.status === "on" || instantAt(input.zone, session.day, session.start) <= now,
+  );
+  return {
+    id: row.id,
+    revision: row.revision,
+    changedAt: row.changedAt.toISOString(),
+    athlete,
+    book: detail ? camp.book : withoutDecisions(camp.book),
+    plan: detail ? camp.plan : withoutLiftingDetail(camp.plan),
+    sport: detail ? sport : sport.map((session) => ({ ...session, effort: 0 })),
+    may: ACTIONS.filter((action) => can(ctx.member, action, athlete.id)),
+    others: others.map(({ role }) => role),
+  };
+}
