@@ -40,7 +40,7 @@ export async function binFolder(log, version) {
 /** Runs a server program: PostgreSQL refuses root, so root becomes Debian's `postgres` user. */
 export function asServerUser(command, args) {
   // cwd: the postgres user may not be able to enter ours, which some programs complain about.
-  const options = { cwd: "/", env: { PATH: process.env.PATH, LC_ALL: "C.UTF-8" } };
+  const options = { cwd: "/", env: { PATH: process.env.PATH, LC_ALL: "C.UTF-8" }, unbroken: true };
   if (!isRoot()) return run(command, args, options);
   return run(
     "setpriv",

@@ -136,7 +136,7 @@ async function startPostmaster({ dir, state, log }) {
 }
 
 /** Runs SQL through psql as the cluster's owner; gives rows as unaligned lines. */
-export async function psql(dir, sql, database = DATABASE) {
+export async function psql(dir = DEFAULT_DIR, sql, database = DATABASE) {
   const state = readState(dir);
   if (!state) throw new SetupError("there is no local cluster yet");
   const bin = await binFolder(quiet, readFileSync(path.join(state.data, "PG_VERSION"), "utf8").trim());

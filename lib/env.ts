@@ -19,7 +19,11 @@ const envSchema = z
     /** Same address, for links in mails and feeds, where it differs from the one next-auth serves. */
     APP_URL: z.url().optional(),
     /** Folder of the development mail catcher. Set: /outbox shows its mails. Unset: there is no /outbox. */
-    OUTBOX_DIR: z.string().min(1).optional(),
+    BELLWARD_OUTBOX_DIR: z.string().min(1).optional(),
+    /** Signs mails (DKIM) when all three are set; the key is PEM, its line breaks may be written as \\n. */
+    DKIM_DOMAIN: z.string().optional(),
+    DKIM_SELECTOR: z.string().optional(),
+    DKIM_KEY: z.string().optional(),
     /** Makes a production build obey BELLWARD_NOW; for browser tests. */
     BELLWARD_TEST: flag,
     BELLWARD_NOW: z.iso.datetime({ offset: true }).optional(),

@@ -6,16 +6,31 @@ export class SetupError extends Error {
   name = "SetupError";
 }
 
+/** Commands that are running, with whether they may be broken off. */
+const running = new Map();
+
 /**
  * Runs a command to its end and gives what it printed. Never throws on a non-zero exit: the caller knows what it means.
+ * Each has a process group of its own, so that Ctrl-C in a terminal reaches only us and we end things in order.
  * @param {string} command
  * @param {readonly string[]} args
- * @param {import("node:child_process").SpawnOptions & { input?: string; onLine?: (line: string) => void }} [options]
- * @returns {Promise<{ code: number; stdout: string; stderr: string; output: string }>}
+ * @param {import("node:child_process").SpawnOptions & {
+ *   input?: string; onLine?: (line: string) => void; unbroken?: boolean; timeoutMs?: number }} [options]
+ *   `unbroken`: a stop waits for it (dpkg half-way is worse than late)
+ * @returns {Promise<{ code: number; stdout: string; stderr: string; output: string; timedOut: boolean }>}
  */
-export function run(command, args, { input, onLine, ...options } = {}) {
+export function run(command, args, { input, onLine, unbroken = false, timeoutMs, ...options } = {}) {
   return new Promise((resolve) => {
-    const child = spawn(command, args, { stdio: ["pipe", "pipe", "pipe"], ...options });
+    const child = spawn(command, args, { stdio: ["pipe", "pipe", "pipe"], detached: true, ...options });
+    let timedOut = false;
+    const timer =
+      timeoutMs && setTimeout(() => ((timedOut = true), killGroup(child.pid, "SIGKILL")), timeoutMs);
+    const finish = (code) => {
+      clearTimeout(timer);
+      running.delete(child);
+      resolve({ code, stdout, stderr, output, timedOut });
+    };
+    running.set(child, { unbroken, ended: new Promise((done) => child.once("close", done)) });
     let stdout = "";
     let stderr = "";
     let output = "";
@@ -37,7 +52,7 @@ export function run(command, args, { input, onLine, ...options } = {}) {
     child.on("error", (error) => {
       stderr += error.message;
       output += error.message;
-      resolve({ code: 127, stdout, stderr, output });
+      finish(127);
     });
     child.on("close", (code, signal) =>
       resolve({ code: code ?? (signal ? 128 : 1), stdout, stderr, output }),
@@ -46,6 +61,23 @@ export function run(command, args, { input, onLine, ...options } = {}) {
     child.stdin?.on("error", () => undefined);
     child.stdin?.end(input ?? "");
   });
+}
+
+/** Signals a process and everything it started. */
+export function killGroup(pid, signal) {
+  if (!pid) return;
+  try {
+    process.kill(-pid, signal);
+  } catch (error) {
+    if (error.code !== "ESRCH") throw error;
+  }
+}
+
+/** Ends the commands that `run` still has going; waits for those that must not be broken off. */
+export async function endRunning() {
+  const all = [...running];
+  for (const [child, { unbroken }] of all) if (!unbroken) killGroup(child.pid, "SIGTERM");
+  await Promise.all(all.map(([, { ended }]) => ended));
 }
 
 /** Turns what the system said into one line a person can act on. */

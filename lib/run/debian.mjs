@@ -28,10 +28,11 @@ export async function installPackages(packages, what, log) {
   }
   try {
     log(`${what}: reading Debian's package lists`);
-    const update = await run("apt-get", [...APT, "update"], { env: APT_ENV });
+    const update = await run("apt-get", [...APT, "update"], { env: APT_ENV, unbroken: true });
     log(`${what}: ${line}`);
     const install = await run("apt-get", [...APT, "install", "--no-install-recommends", ...packages], {
       env: APT_ENV,
+      unbroken: true,
       onLine: (text) => {
         if (/^(Need to get|Unpacking|Setting up)/.test(text)) log(`  ${text.slice(0, 90)}`);
       },

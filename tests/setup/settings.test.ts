@@ -19,7 +19,7 @@ describe("settings", () => {
   });
 
   it("an empty value counts as not set", () => {
-    expect(parseEnv({ ...GOOD, OUTBOX_DIR: "", PLAN_RATE_PER_MINUTE: "" })).toMatchObject({
+    expect(parseEnv({ ...GOOD, BELLWARD_OUTBOX_DIR: "", PLAN_RATE_PER_MINUTE: "" })).toMatchObject({
       PLAN_RATE_PER_MINUTE: 60,
     });
     expect(() => parseEnv({ ...GOOD, MAIL_FROM: "" })).toThrow(/MAIL_FROM/);

@@ -1,0 +1,90 @@
+// `npm run build`: a production build, unless the one that is there was made from these very sources. `--force` builds anyway.
+import { createHash } from "node:crypto";
+import { existsSync, readdirSync, readFileSync, rmSync } from "node:fs";
+import { fileURLToPath } from "node:url";
+import { withLock } from "../../db/server-ports.mjs";
+import { explain, run, runMain, SetupError } from "./command.mjs";
+import { ensurePackages } from "./packages.mjs";
+import { say, step } from "./progress.mjs";
+import { checkNode, inData, inRoot, makeDataFolder, ROOT, writeWhole } from "./project.mjs";
+
+export const NEXT = "node_modules/next/dist/bin/next";
+const STAMP = inData("build-stamp");
+const FOLDERS = ["app", "components", "lib", "db", "drizzle", "public"];
+// Not tsconfig.json: Next itself rewrites it while it builds.
+const FILES = [
+  "package.json",
+  "package-lock.json",
+  "next.config.mjs",
+  "tailwind.config.ts",
+  "postcss.config.mjs",
+  "instrumentation.ts",
+  "proxy.ts",
+];
+// These run beside the server and are no part of it.
+const OUTSIDE = ["lib/run", "db/seed"];
+
+function* filesIn(folder) {
+  if (OUTSIDE.includes(folder) || !existsSync(inRoot(folder))) return;
+  for (const entry of readdirSync(inRoot(folder), { withFileTypes: true }).sort((a, b) =>
+    a.name < b.name ? -1 : 1,
+  )) {
+    const name = `${folder}/${entry.name}`;
+    if (entry.isDirectory()) yield* filesIn(name);
+    else yield name;
+  }
+}
+
+/** Names this build: sources, lock file, Node, the settings that are baked in, and the place (a build knows its folder). */
+export function sourceHash() {
+  const hash = createHash("sha256").update(`${ROOT}\0${process.versions.node}\0`);
+  for (const [key, value] of Object.entries(process.env).sort())
+    if (key.startsWith("NEXT_PUBLIC_")) hash.update(`${key}=${value}\0`);
+  const files = [
+    ...FOLDERS.flatMap((folder) => [...filesIn(folder)]),
+    ...FILES.filter((file) => existsSync(inRoot(file))),
+  ];
+  for (const file of files)
+    hash
+      .update(`${file}\0`)
+      .update(readFileSync(inRoot(file)))
+      .update("\0");
+  return hash.digest("hex");
+}
+
+const isBuilt = (hash) =>
+  existsSync(inRoot(".next", "BUILD_ID")) && existsSync(STAMP) && readFileSync(STAMP, "utf8").trim() === hash;
+
+/**
+ * Builds when the sources changed since the last build.
+ * @returns {Promise<boolean>} whether it built
+ */
+export async function ensureBuild({ force = false } = {}) {
+  return withLock(inData("build.lock"), async () => {
+    const hash = sourceHash();
+    if (!force && isBuilt(hash)) return false;
+    rmSync(STAMP, { force: true });
+    await step("Building", async () => {
+      const built = await run(process.execPath, [NEXT, "build"], {
+        cwd: ROOT,
+        env: { ...process.env, NODE_ENV: "production", NEXT_TELEMETRY_DISABLED: "1" },
+      });
+      if (built.code === 0) return;
+      if (/ENOSPC|No space left|EACCES|EROFS/.test(built.output))
+        throw new SetupError(`the build failed: ${explain(built.output)}`);
+      say(built.output);
+      throw new SetupError("the build failed; the reason stands above");
+    });
+    writeWhole(STAMP, `${hash}\n`);
+    return true;
+  });
+}
+
+if (process.argv[1] === fileURLToPath(import.meta.url)) {
+  await runMain(async () => {
+    checkNode();
+    makeDataFolder();
+    await ensurePackages();
+    if (!(await ensureBuild({ force: process.argv.includes("--force") }))) say("The build is up to date.");
+  });
+}
