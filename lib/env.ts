@@ -12,10 +12,6 @@ const envSchema = z
     SMTP_URL: z.url({ protocol: /^smtps?$/, error: "must be an smtp:// or smtps:// address" }),
     /** Sender of every mail, as `Name <address>` or a bare address. */
     MAIL_FROM: z.string().includes("@"),
-    /** DKIM signature of outgoing mail (RFC 6376): all three or none. The key is PEM, its line breaks may be written as \n. */
-    DKIM_DOMAIN: z.string().min(1).optional(),
-    DKIM_SELECTOR: z.string().min(1).optional(),
-    DKIM_KEY: z.string().min(1).optional(),
     /** Signs session tokens and single-use links. */
     NEXTAUTH_SECRET: z.string().min(32, "must have at least 32 characters"),
     /** Where people reach this server; next-auth reads it by this name. */
