@@ -39,7 +39,8 @@ export function SessionChip({ look, title = look.label, time, ...state }: Sessio
       className={classNames(
         "flex w-full items-center gap-1.5 rounded border px-1.5 py-[3px] text-left text-2xs leading-tight",
         state.ghost ? "border-dashed border-ink bg-transparent text-ink opacity-60" : look.chip,
-        state.past && !state.ghost && "opacity-75",
+        // No opacity: what is past must stay readable; its day is hatched besides.
+        state.past && "saturate-50",
         (state.moved || state.marked) && "outline-2 outline-offset-1 outline-ink",
         state.held && "shadow-drag",
       )}
