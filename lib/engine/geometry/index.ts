@@ -1,0 +1,3 @@
+export * from "./civil";
+export * from "./camp";
+export * from "./instants";
