@@ -1,51 +1,68 @@
 import type { Day, Minute, Weekday } from "../types";
 
-/** Minutes of a civil day. */
-export const DAY_MINUTES = 1440;
+export const MINUTES_A_DAY = 1440;
+
+/** Days from 0000-03-01 to 1970-01-01 in the proleptic Gregorian calendar. */
+const EPOCH_SHIFT = 719_468;
+const DAYS_PER_ERA = 146_097;
+const ISO = /^(\d{4})-(\d{2})-(\d{2})$/;
+const HHMM = /^(\d{2}):(\d{2})$/;
+
+const pad = (value: number, length: number): string => String(value).padStart(length, "0");
 
 /**
- * Civil day of a proleptic Gregorian date, days since 1970-01-01. Months 1 to 12. No range check.
- * Source: Howard Hinnant, chrono-compatible low-level date algorithms, `days_from_civil`.
+ * Days since 1970-01-01 of a civil year, month (1 to 12) and day of the month.
+ * Source: H. Hinnant, "chrono-Compatible Low-Level Date Algorithms", days_from_civil.
  */
-export function dayFromYmd(year: number, month: number, dayOfMonth: number): Day {
+function daysFromCivil(year: number, month: number, dayOfMonth: number): number {
   const y = month <= 2 ? year - 1 : year;
   const era = Math.floor(y / 400);
   const yearOfEra = y - era * 400;
   const dayOfYear = Math.floor((153 * (month + (month > 2 ? -3 : 9)) + 2) / 5) + dayOfMonth - 1;
   const dayOfEra = yearOfEra * 365 + Math.floor(yearOfEra / 4) - Math.floor(yearOfEra / 100) + dayOfYear;
-  return (era * 146_097 + dayOfEra - 719_468) as Day;
+  return era * DAYS_PER_ERA + dayOfEra - EPOCH_SHIFT;
 }
 
-/** Civil day of `YYYY-MM-DD`. The text must be a date; a check belongs to the caller. */
-export const dayFromIso = (iso: string): Day =>
-  dayFromYmd(Number(iso.slice(0, 4)), Number(iso.slice(5, 7)), Number(iso.slice(8, 10)));
-
-const pad = (value: number, width = 2): string => String(value).padStart(width, "0");
-
-/** `YYYY-MM-DD` of a civil day. Source: as above, `civil_from_days`. */
+/** ISO date (YYYY-MM-DD) of a civil day. Source: Hinnant, civil_from_days. */
 export function isoFromDay(day: Day): string {
-  const z = day + 719_468;
-  const era = Math.floor(z / 146_097);
-  const dayOfEra = z - era * 146_097;
+  const shifted = day + EPOCH_SHIFT;
+  const era = Math.floor(shifted / DAYS_PER_ERA);
+  const dayOfEra = shifted - era * DAYS_PER_ERA;
   const yearOfEra = Math.floor(
     (dayOfEra - Math.floor(dayOfEra / 1460) + Math.floor(dayOfEra / 36_524) - Math.floor(dayOfEra / 146_096)) / 365,
   );
   const dayOfYear = dayOfEra - (365 * yearOfEra + Math.floor(yearOfEra / 4) - Math.floor(yearOfEra / 100));
-  const monthFromMarch = Math.floor((5 * dayOfYear + 2) / 153);
-  const dayOfMonth = dayOfYear - Math.floor((153 * monthFromMarch + 2) / 5) + 1;
-  const month = monthFromMarch < 10 ? monthFromMarch + 3 : monthFromMarch - 9;
+  const shiftedMonth = Math.floor((5 * dayOfYear + 2) / 153);
+  const dayOfMonth = dayOfYear - Math.floor((153 * shiftedMonth + 2) / 5) + 1;
+  const month = shiftedMonth + (shiftedMonth < 10 ? 3 : -9);
   const year = yearOfEra + era * 400 + (month <= 2 ? 1 : 0);
-  return `${pad(year, 4)}-${pad(month)}-${pad(dayOfMonth)}`;
+  return `${pad(year, 4)}-${pad(month, 2)}-${pad(dayOfMonth, 2)}`;
 }
 
-/** ISO weekday, 1 is Monday; 1970-01-01 was a Thursday. */
-export const weekdayOf = (day: Day): Weekday => (((((day + 3) % 7) + 7) % 7) + 1) as Weekday;
+/** Civil day of an ISO date (YYYY-MM-DD). Throws `RangeError` for anything that is not a date of the calendar. */
+export function dayFromIso(iso: string): Day {
+  const parts = ISO.exec(iso);
+  const day = parts ? (daysFromCivil(Number(parts[1]), Number(parts[2]), Number(parts[3])) as Day) : null;
+  // Reading it back catches 2026-02-29 and month 13 without a table of month lengths.
+  if (day === null || isoFromDay(day) !== iso) throw new RangeError(`Not a date: ${iso}`);
+  return day;
+}
 
-/** Minutes since midnight of `HH:MM`, 24:00 included. */
-export const minuteFromHhmm = (text: string): Minute => (Number(text.slice(0, 2)) * 60 + Number(text.slice(3, 5))) as Minute;
+/** ISO weekday of a civil day; 1970-01-01 was a Thursday. */
+export function weekdayOf(day: Day): Weekday {
+  return (((((day + 3) % 7) + 7) % 7) + 1) as Weekday;
+}
 
-/** `HH:MM` of minutes since midnight; past midnight it wraps to the next day's clock, but 1440 is "24:00". */
+/** Minutes since midnight of "HH:MM", 00:00 to 24:00. Throws `RangeError` for anything else. */
+export function minuteFromHhmm(text: string): Minute {
+  const parts = HHMM.exec(text);
+  const minute = parts && Number(parts[2]) < 60 ? Number(parts[1]) * 60 + Number(parts[2]) : -1;
+  if (minute < 0 || minute > MINUTES_A_DAY) throw new RangeError(`Not a time of day: ${text}`);
+  return minute as Minute;
+}
+
+/** "HH:MM" of minutes since midnight; an end past midnight reads as the time of the next day, 1440 as "24:00". */
 export function hhmm(minute: Minute): string {
-  const shown = minute > DAY_MINUTES ? minute % DAY_MINUTES : minute;
-  return `${pad(Math.floor(shown / 60))}:${pad(shown % 60)}`;
+  const ofDay = minute === MINUTES_A_DAY ? minute : minute % MINUTES_A_DAY;
+  return `${pad(Math.floor(ofDay / 60), 2)}:${pad(ofDay % 60, 2)}`;
 }
