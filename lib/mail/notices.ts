@@ -32,10 +32,9 @@ export async function queueChangeMail(tx: Tx, notice: ChangeNotice): Promise<voi
     tx,
     readers
       .filter((reader) => fresh.has(reader.userId))
-      .map(({ userId, mailChoice, timeZone }) => ({
-        userId,
-        since: now,
-        runAt: mailChoice === "daily" ? nextDigest(now, timeZone) : soon,
-      })),
+      .map(({ userId, mailChoice, timeZone }) => {
+        const digest = mailChoice === "daily";
+        return { userId, since: now, digest, now, runAt: digest ? nextDigest(now, timeZone) : soon };
+      }),
   );
 }

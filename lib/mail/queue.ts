@@ -19,6 +19,9 @@ export interface OutgoingMail {
   readonly headers?: Readonly<Record<string, string>>;
 }
 
+/** A fresh Message-ID in the sender's domain. */
+export const messageId = (): string => `<${randomUUID()}@${mailSettings().domain}>`;
+
 /**
  * Writes a mail and the job that sends it in the caller's transaction: both are there when it commits, neither when it does
  * not. Message-ID is fixed here, so that a retry is the same message (RFC 5322 3.6.4). Returns the mail's id, or null where
@@ -31,7 +34,7 @@ export async function queueMail(tx: Tx, mail: OutgoingMail): Promise<string | nu
     recipient: oneLine(mail.to),
     userId: mail.userId ?? null,
     teamId: mail.teamId ?? null,
-    messageId: `<${randomUUID()}@${mailSettings().domain}>`,
+    messageId: messageId(),
     subject: oneLine(mail.subject),
     text: mail.text,
     html: mail.html,

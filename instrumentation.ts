@@ -1,0 +1,8 @@
+/** Called by Next once per server process, before the first request. */
+export async function register(): Promise<void> {
+  // The condition stands alone and inline: it keeps Node's modules out of the edge bundle.
+  if (process.env.NEXT_RUNTIME === "nodejs") {
+    const { runMailWorkerInServer } = await import("./lib/mail/in-server");
+    runMailWorkerInServer();
+  }
+}
