@@ -1,6 +1,7 @@
 import type { Day, Minute, Weekday } from "../types";
 
-export const MINUTES_A_DAY = 1440;
+/** Minutes of a civil day. */
+export const DAY_MINUTES = 1440;
 
 /** Days from 0000-03-01 to 1970-01-01 in the proleptic Gregorian calendar. */
 const EPOCH_SHIFT = 719_468;
@@ -57,12 +58,12 @@ export function weekdayOf(day: Day): Weekday {
 export function minuteFromHhmm(text: string): Minute {
   const parts = HHMM.exec(text);
   const minute = parts && Number(parts[2]) < 60 ? Number(parts[1]) * 60 + Number(parts[2]) : -1;
-  if (minute < 0 || minute > MINUTES_A_DAY) throw new RangeError(`Not a time of day: ${text}`);
+  if (minute < 0 || minute > DAY_MINUTES) throw new RangeError(`Not a time of day: ${text}`);
   return minute as Minute;
 }
 
 /** "HH:MM" of minutes since midnight; an end past midnight reads as the time of the next day, 1440 as "24:00". */
 export function hhmm(minute: Minute): string {
-  const ofDay = minute === MINUTES_A_DAY ? minute : minute % MINUTES_A_DAY;
+  const ofDay = minute === DAY_MINUTES ? minute : minute % DAY_MINUTES;
   return `${pad(Math.floor(ofDay / 60), 2)}:${pad(ofDay % 60, 2)}`;
 }

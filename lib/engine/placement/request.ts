@@ -1,26 +1,26 @@
-import type { Day, Item, Minute, PlanInput } from "../types";
+import type { Day, Item, Minute, PlanInput, Reason, Violation } from "../types";
 
-/** A lifting session that wants a place. */
+/** One item of one camp week that wants a place. */
 export interface Slot {
-  /** `Lift.id` that the session will have. */
+  /** Identity of the lift that it becomes. */
   readonly id: string;
   readonly item: Item;
-  /** Weeks out of its camp week; it may only stand on that week's days. */
+  /** Weeks out. */
   readonly week: number;
-  /** Minutes reserved: an upper bound of what the dose will ask for, so that placing does not depend on dosing. */
+  /** Reserved minutes: the longest the session can take before sparring and cap lower its sets. */
   readonly minutes: number;
   readonly heavyLower: boolean;
   readonly explosive: boolean;
   /** Wants the freshest day: strength A and power A. */
   readonly fresh: boolean;
   readonly primer: boolean;
-  /** Importance within its week, 0 first. */
+  /** Importance in its week, 0 first. */
   readonly order: number;
-  /** Where the plan that stood before had it. */
+  /** Where the published plan had it; null when it is new. */
   readonly base: { readonly day: Day; readonly start: Minute } | null;
 }
 
-/** A lifting session that does not move: pinned by a coach, or already past. */
+/** A lift that the solver may not move: pinned, or already past. */
 export interface FixedLift {
   readonly id: string;
   readonly item: Item;
@@ -38,4 +38,24 @@ export interface PlacementRequest {
   readonly input: PlanInput;
   readonly slots: readonly Slot[];
   readonly fixed: readonly FixedLift[];
+}
+
+export interface PlacedSlot {
+  readonly slot: Slot;
+  readonly day: Day;
+  readonly start: Minute;
+  readonly reasons: readonly Reason[];
+}
+
+export interface UnplacedSlot {
+  readonly slot: Slot;
+  /** Rules that shut its candidates, most frequent first. */
+  readonly rules: readonly Reason[];
+}
+
+export interface Placement {
+  readonly placed: readonly PlacedSlot[];
+  readonly unplaced: readonly UnplacedSlot[];
+  readonly violations: readonly Violation[];
+  readonly cost: number;
 }
