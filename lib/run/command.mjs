@@ -54,9 +54,7 @@ export function run(command, args, { input, onLine, unbroken = false, timeoutMs,
       output += error.message;
       finish(127);
     });
-    child.on("close", (code, signal) =>
-      resolve({ code: code ?? (signal ? 128 : 1), stdout, stderr, output }),
-    );
+    child.on("close", (code, signal) => finish(code ?? (signal ? 128 : 1)));
     // A child that ends before it reads its input closes the pipe: its exit code tells, not EPIPE.
     child.stdin?.on("error", () => undefined);
     child.stdin?.end(input ?? "");
