@@ -43,7 +43,11 @@ export async function isEmpty(url) {
   }
 }
 
-/** Puts the demo into a migrated database; harmless where there is a team already. */
+/**
+ * Puts the demo into a migrated database; harmless where there is a team already.
+ * @param {string} url
+ * @param {Record<string, string>} [env]
+ */
 export async function seedDemo(url, env = {}) {
   const seeded = await run(process.execPath, ["--import", "tsx", "db/seed/run.ts"], {
     cwd: ROOT,

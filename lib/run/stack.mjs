@@ -11,6 +11,8 @@ import { ROOT } from "./project.mjs";
 const PATIENCE_MS = 15_000;
 const READY_MS = 90_000;
 
+/** @typedef {{ what: string; pid?: number; ended: Promise<number> }} Child */
+
 /** A child of ours with its own process group. `ended` resolves with its exit code. */
 function startChild(what, args, env, stdout) {
   const child = spawn(process.execPath, args, {
@@ -26,7 +28,10 @@ function startChild(what, args, env, stdout) {
   return { what, child, pid: child.pid, ended };
 }
 
-/** Ends a child: asks first, then insists. */
+/**
+ * Ends a child: asks first, then insists.
+ * @param {Child} child
+ */
 export async function endChild({ pid, ended }) {
   killGroup(pid, "SIGTERM");
   const late = pause(PATIENCE_MS, "late", { ref: false });
@@ -39,7 +44,7 @@ export async function endChild({ pid, ended }) {
 /**
  * Starts the mail catcher on a free port of loopback.
  * @param {string} dir where each mail becomes a file
- * @param {(child: { what: string; pid?: number; ended: Promise<number> }) => void} [onStart]
+ * @param {(child: Child) => void} [onStart]
  */
 export async function startCatcher(dir, onStart) {
   mkdirSync(dir, { recursive: true });
@@ -80,7 +85,7 @@ function statusOf(url) {
 /**
  * Starts the server and waits until it answers.
  * @param {{ port: number; env: Record<string, string>; dev?: boolean; log?: "inherit" | "ignore" | number;
- *   onStart?: (child: { what: string; pid?: number; ended: Promise<number> }) => void }} options
+ *   onStart?: (child: Child) => void }} options
  *   `onStart` gets the process before it answers, so that a stop in between ends it
  */
 export async function startServer({ port, env, dev = false, log = "inherit", onStart }) {

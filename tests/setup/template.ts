@@ -1,9 +1,9 @@
 import { createHash } from "node:crypto";
-import { readdirSync, readFileSync } from "node:fs";
+import { mkdirSync, readdirSync, readFileSync, rmSync, writeFileSync } from "node:fs";
 import path from "node:path";
 import postgres from "postgres";
 import { migrateDatabase } from "@/db/migrate.mjs";
-import { startCluster } from "@/db/server.mjs";
+import { clusterRuns, clusterUrl, startCluster, stopCluster } from "@/db/server.mjs";
 import { isAlive, withLock } from "@/db/server-ports.mjs";
 
 const ROOT = path.resolve(import.meta.dirname, "../..");
@@ -91,7 +91,7 @@ export async function emptyDatabase(): Promise<{ url: string; drop: () => Promis
 }
 
 /** Drops what killed runs left behind: clones of dead processes and templates of older schemas. */
-export async function dropLeftovers(url: string): Promise<void> {
+async function dropLeftovers(url: string): Promise<void> {
   const keep = templateName();
   await asOwner(url, async (sql) => {
     const rows = await sql<
@@ -103,4 +103,25 @@ export async function dropLeftovers(url: string): Promise<void> {
       if (dead) await sql`drop database if exists ${sql(datname)} with (force)`;
     }
   });
+}
+
+const USERS = path.join(TEST_CLUSTER, "users");
+
+/**
+ * Says that this process may use the tests' cluster, which starts when the first database is asked for. Several runs
+ * share it; giving it back stops it when nobody else is left.
+ */
+export function holdTestCluster(): () => Promise<void> {
+  const mine = path.join(USERS, String(process.pid));
+  mkdirSync(USERS, { recursive: true });
+  writeFileSync(mine, "");
+  return async () => {
+    rmSync(mine, { force: true });
+    for (const pid of readdirSync(USERS))
+      if (!isAlive(Number(pid))) rmSync(path.join(USERS, pid), { force: true });
+    if (readdirSync(USERS).length > 0 || !clusterRuns({ dir: TEST_CLUSTER })) return;
+    const url = clusterUrl({ dir: TEST_CLUSTER });
+    if (url) await dropLeftovers(url);
+    await stopCluster({ dir: TEST_CLUSTER });
+  };
 }

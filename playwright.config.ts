@@ -1,0 +1,49 @@
+import { defineConfig } from "@playwright/test";
+import { freePort } from "./db/server-ports.mjs";
+
+// Read by every worker too: the first to come chooses, the others inherit.
+const port = (process.env.BELLWARD_E2E_PORT ??= String(await freePort()));
+const url = `http://127.0.0.1:${port}`;
+
+export default defineConfig({
+  testDir: "tests/e2e",
+  outputDir: "test-results",
+  timeout: 60_000,
+  expect: { timeout: 10_000 },
+  forbidOnly: true,
+  retries: 0,
+  workers: 2,
+  reporter: [["list"]],
+  use: {
+    baseURL: url,
+    browserName: "chromium",
+    viewport: { width: 1440, height: 900 },
+    locale: "en-GB",
+    timezoneId: "Europe/London",
+    trace: "retain-on-failure",
+    screenshot: "only-on-failure",
+    launchOptions: {
+      executablePath: "/usr/bin/chromium",
+      args: [
+        // Chromium's sandbox refuses root, as in a container.
+        ...(process.getuid?.() === 0 ? ["--no-sandbox"] : []),
+        "--disable-gpu",
+        "--disable-quic",
+        "--no-first-run",
+        "--disable-background-networking",
+        "--disable-component-update",
+        "--disable-sync",
+        // Containers have little /dev/shm.
+        "--disable-dev-shm-usage",
+      ],
+    },
+  },
+  webServer: {
+    command: "exec node --import tsx tests/setup/e2e-server.ts",
+    url: `${url}/api/health`,
+    // Builds first when the sources changed.
+    timeout: 300_000,
+    gracefulShutdown: { signal: "SIGTERM", timeout: 20_000 },
+    stderr: "pipe",
+  },
+});
