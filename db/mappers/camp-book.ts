@@ -14,11 +14,39 @@ const oneOf = <T extends string>(values: readonly T[], text: string): T => {
   return value;
 };
 
-export const sportEntryOf = ({ id, series, idShift, kind, title, start, minutes, effort, place, rrule, exdate }: SportRow): SportEntry => ({
-  id, series, idShift, kind, title, start, minutes, effort, place, rrule, exdate,
+export const sportEntryOf = ({
+  id,
+  series,
+  idShift,
+  kind,
+  title,
+  start,
+  minutes,
+  effort,
+  place,
+  rrule,
+  exdate,
+}: SportRow): SportEntry => ({
+  id,
+  series,
+  idShift,
+  kind,
+  title,
+  start,
+  minutes,
+  effort,
+  place,
+  rrule,
+  exdate,
 });
 
-const pinOf = ({ liftId, item, week, day, start }: PinRow): BookPin => ({ liftId, item, week, date: day, start });
+const pinOf = ({ liftId, item, week, day, start }: PinRow): BookPin => ({
+  liftId,
+  item,
+  week,
+  date: day,
+  start,
+});
 
 /** Rows to the camp book. Lists are in the order given; the engine does not depend on it. */
 export function bookOf(rows: {
@@ -44,7 +72,10 @@ export function bookOf(rows: {
       limitKg: camp.limitKg,
     },
     weeks: camp.weeks,
-    weighIn: camp.weighInDate !== null && camp.weighInTime !== null ? { date: camp.weighInDate, time: camp.weighInTime } : null,
+    weighIn:
+      camp.weighInDate !== null && camp.weighInTime !== null
+        ? { date: camp.weighInDate, time: camp.weighInTime }
+        : null,
     athlete: {
       trainingAge: oneOf<TrainingAge>(TRAINING_AGES, camp.trainingAge),
       strikingBase: oneOf<StrikingBase>(STRIKING_BASES, camp.strikingBase),

@@ -5,7 +5,10 @@ import type { sessions } from "../schema";
 
 type SessionRow = typeof sessions.$inferSelect;
 /** A session as planned, without what the database adds (uid, sequence, time of change). */
-export type PlannedSession = Omit<SessionRow, "teamId" | "campId" | "uid" | "sequence" | "changedAt" | "status">;
+export type PlannedSession = Omit<
+  SessionRow,
+  "teamId" | "campId" | "uid" | "sequence" | "changedAt" | "status"
+>;
 
 const dateOf = (instant: Instant): Date => new Date(instant * 60_000);
 
@@ -13,7 +16,13 @@ const dateOf = (instant: Instant): Date => new Date(instant * 60_000);
 export function sessionsOf(book: CampBook, input: PlanInput, plan: Plan): PlannedSession[] {
   const place = (day: PlanInput["bout"]["day"], start: PlanInput["bout"]["start"], minutes: number) => {
     const startsAt = instantAt(input.zone, day, start);
-    return { day: isoFromDay(day), start: hhmm(start), minutes, startsAt: dateOf(startsAt), endsAt: dateOf((startsAt + minutes) as Instant) };
+    return {
+      day: isoFromDay(day),
+      start: hhmm(start),
+      minutes,
+      startsAt: dateOf(startsAt),
+      endsAt: dateOf((startsAt + minutes) as Instant),
+    };
   };
   const lifts = plan.lifts.map((lift): PlannedSession => ({
     id: lift.id,
@@ -72,5 +81,10 @@ export function sessionsOf(book: CampBook, input: PlanInput, plan: Plan): Planne
 }
 
 /** Lifts that stand, from their rows; `past` is as of `now`, whatever it was when the plan was saved. */
-export const liftsOf = (rows: readonly Pick<SessionRow, "lift" | "startsAt" | "status">[], now: Date): Lift[] =>
-  rows.flatMap((row) => (row.lift && row.status === "confirmed" ? [{ ...row.lift, past: row.startsAt <= now }] : []));
+export const liftsOf = (
+  rows: readonly Pick<SessionRow, "lift" | "startsAt" | "status">[],
+  now: Date,
+): Lift[] =>
+  rows.flatMap((row) =>
+    row.lift && row.status === "confirmed" ? [{ ...row.lift, past: row.startsAt <= now }] : [],
+  );

@@ -18,12 +18,20 @@ export async function lockCamp(tx: Tx, teamId: string, campId: string): Promise<
 }
 
 export async function findCamp(tx: Tx, teamId: string, campId: string): Promise<CampRow | null> {
-  const [row] = await tx.select().from(camps).where(and(eq(camps.teamId, teamId), eq(camps.id, campId)));
+  const [row] = await tx
+    .select()
+    .from(camps)
+    .where(and(eq(camps.teamId, teamId), eq(camps.id, campId)));
   return row ?? null;
 }
 
 /** Camps of an athlete whose bout is not over, for re-planning. */
-export async function listOpenCampIds(tx: Tx, teamId: string, fromDate: string, athleteId?: string): Promise<string[]> {
+export async function listOpenCampIds(
+  tx: Tx,
+  teamId: string,
+  fromDate: string,
+  athleteId?: string,
+): Promise<string[]> {
   const rows = await tx
     .select({ id: camps.id })
     .from(camps)
@@ -91,7 +99,12 @@ export async function updateCamp(
 ): Promise<void> {
   await tx
     .update(camps)
-    .set({ ...campColumnsOf(values.book), summary: values.summary, revision: values.revision, changedAt: values.now })
+    .set({
+      ...campColumnsOf(values.book),
+      summary: values.summary,
+      revision: values.revision,
+      changedAt: values.now,
+    })
     .where(and(eq(camps.teamId, camp.teamId), eq(camps.id, camp.id)));
 }
 
@@ -101,7 +114,13 @@ export async function writeEdit(tx: Tx, teamId: string, campId: string, edit: Bo
   if (edit.dropSport?.length) {
     await tx
       .delete(sportEntries)
-      .where(and(eq(sportEntries.teamId, teamId), eq(sportEntries.campId, campId), inArray(sportEntries.id, [...edit.dropSport])));
+      .where(
+        and(
+          eq(sportEntries.teamId, teamId),
+          eq(sportEntries.campId, campId),
+          inArray(sportEntries.id, [...edit.dropSport]),
+        ),
+      );
   }
   if (edit.dropPins?.length) {
     await tx
@@ -115,36 +134,71 @@ export async function writeEdit(tx: Tx, teamId: string, campId: string, edit: Bo
       .onConflictDoUpdate({
         target: [sportEntries.campId, sportEntries.id],
         set: {
-          series: sql`excluded.series`, idShift: sql`excluded.id_shift`, kind: sql`excluded.kind`, title: sql`excluded.title`,
-          start: sql`excluded.start`, minutes: sql`excluded.minutes`, effort: sql`excluded.effort`, place: sql`excluded.place`,
-          rrule: sql`excluded.rrule`, exdate: sql`excluded.exdate`,
+          series: sql`excluded.series`,
+          idShift: sql`excluded.id_shift`,
+          kind: sql`excluded.kind`,
+          title: sql`excluded.title`,
+          start: sql`excluded.start`,
+          minutes: sql`excluded.minutes`,
+          effort: sql`excluded.effort`,
+          place: sql`excluded.place`,
+          rrule: sql`excluded.rrule`,
+          exdate: sql`excluded.exdate`,
         },
       });
   }
   if (edit.putPins?.length) {
     await tx
       .insert(pins)
-      .values(edit.putPins.map(({ liftId, item, week, date, start }) => ({ liftId, item, week, day: date, start, ...scope })))
+      .values(
+        edit.putPins.map(({ liftId, item, week, date, start }) => ({
+          liftId,
+          item,
+          week,
+          day: date,
+          start,
+          ...scope,
+        })),
+      )
       .onConflictDoUpdate({
         target: [pins.campId, pins.liftId],
-        set: { item: sql`excluded.item`, week: sql`excluded.week`, day: sql`excluded.day`, start: sql`excluded.start` },
+        set: {
+          item: sql`excluded.item`,
+          week: sql`excluded.week`,
+          day: sql`excluded.day`,
+          start: sql`excluded.start`,
+        },
       });
   }
 }
 
 /** Camps of a team (or of one athlete) with what the board shows, nearest bout first. */
-export async function listCamps(tx: Tx, teamId: string, window: { from: Date; to: Date; athleteId?: string }) {
+export async function listCamps(
+  tx: Tx,
+  teamId: string,
+  window: { from: Date; to: Date; athleteId?: string },
+) {
   const rows = await tx
     .select({ camp: camps, athleteName: athletes.name })
     .from(camps)
     .innerJoin(athletes, and(eq(athletes.id, camps.athleteId), eq(athletes.teamId, camps.teamId)))
-    .where(and(eq(camps.teamId, teamId), window.athleteId === undefined ? undefined : eq(camps.athleteId, window.athleteId)))
+    .where(
+      and(
+        eq(camps.teamId, teamId),
+        window.athleteId === undefined ? undefined : eq(camps.athleteId, window.athleteId),
+      ),
+    )
     .orderBy(asc(camps.boutDate), asc(athletes.name));
   const [next, held] = await Promise.all([
     tx
       .select({
-        campId: sessions.campId, id: sessions.id, day: sessions.day, start: sessions.start, source: sessions.source,
-        kind: sessions.kind, title: sessions.title,
+        campId: sessions.campId,
+        id: sessions.id,
+        day: sessions.day,
+        start: sessions.start,
+        source: sessions.source,
+        kind: sessions.kind,
+        title: sessions.title,
       })
       .from(sessions)
       .where(
@@ -172,7 +226,9 @@ export async function findRevisionByKey(tx: Tx, teamId: string, campId: string, 
   const [row] = await tx
     .select()
     .from(revisions)
-    .where(and(eq(revisions.teamId, teamId), eq(revisions.campId, campId), eq(revisions.idempotencyKey, key)));
+    .where(
+      and(eq(revisions.teamId, teamId), eq(revisions.campId, campId), eq(revisions.idempotencyKey, key)),
+    );
   return row ?? null;
 }
 
@@ -188,8 +244,14 @@ export async function findRevision(tx: Tx, teamId: string, campId: string, numbe
 export async function listRevisions(tx: Tx, teamId: string, campId: string, after = 0) {
   return tx
     .select({
-      number: revisions.number, change: revisions.change, inverse: revisions.inverse, knockOn: revisions.knockOn,
-      summary: revisions.summary, putBackOf: revisions.putBackOf, at: revisions.createdAt, by: users.name,
+      number: revisions.number,
+      change: revisions.change,
+      inverse: revisions.inverse,
+      knockOn: revisions.knockOn,
+      summary: revisions.summary,
+      putBackOf: revisions.putBackOf,
+      at: revisions.createdAt,
+      by: users.name,
     })
     .from(revisions)
     .leftJoin(users, eq(users.id, revisions.userId))

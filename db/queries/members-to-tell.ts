@@ -8,6 +8,8 @@ export async function listMembersToTell(tx: Tx, teamId: string, butUserId: strin
     .select({ userId: memberships.userId, role: memberships.role, athleteId: memberships.athleteId })
     .from(memberships)
     .innerJoin(users, eq(users.id, memberships.userId))
-    .where(and(eq(memberships.teamId, teamId), ne(memberships.userId, butUserId), ne(users.mailChoice, "none")))
+    .where(
+      and(eq(memberships.teamId, teamId), ne(memberships.userId, butUserId), ne(users.mailChoice, "none")),
+    )
     .orderBy(asc(memberships.userId));
 }

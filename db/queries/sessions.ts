@@ -9,8 +9,24 @@ type SessionRow = typeof sessions.$inferSelect;
 const movedInTime = (row: SessionRow, planned: PlannedSession): boolean =>
   row.startsAt.getTime() !== planned.startsAt.getTime() || row.endsAt.getTime() !== planned.endsAt.getTime();
 
-const contentOf = ({ title, place, kind, day, start, effort, pinned, lift }: PlannedSession | SessionRow) => ({
-  title, place, kind, day, start, effort, pinned, lift: lift && { ...lift, past: false },
+const contentOf = ({
+  title,
+  place,
+  kind,
+  day,
+  start,
+  effort,
+  pinned,
+  lift,
+}: PlannedSession | SessionRow) => ({
+  title,
+  place,
+  kind,
+  day,
+  start,
+  effort,
+  pinned,
+  lift: lift && { ...lift, past: false },
 });
 
 /**
@@ -34,7 +50,14 @@ export function sessionWrites(
       const revived = row.status === "cancelled";
       const moved = revived || movedInTime(row, session);
       if (moved || !isDeepStrictEqual(contentOf(row), contentOf(session))) {
-        writes.push({ ...scope, ...session, uid: row.uid, status: "confirmed", sequence: row.sequence + (moved ? 1 : 0), changedAt: now });
+        writes.push({
+          ...scope,
+          ...session,
+          uid: row.uid,
+          status: "confirmed",
+          sequence: row.sequence + (moved ? 1 : 0),
+          changedAt: now,
+        });
       }
     }
   }
@@ -45,7 +68,10 @@ export function sessionWrites(
   return writes;
 }
 
-export async function writeSessions(tx: Tx, writes: readonly (typeof sessions.$inferInsert)[]): Promise<void> {
+export async function writeSessions(
+  tx: Tx,
+  writes: readonly (typeof sessions.$inferInsert)[],
+): Promise<void> {
   if (writes.length === 0) return;
   await tx
     .insert(sessions)
@@ -53,10 +79,21 @@ export async function writeSessions(tx: Tx, writes: readonly (typeof sessions.$i
     .onConflictDoUpdate({
       target: [sessions.campId, sessions.id],
       set: {
-        source: sql`excluded.source`, kind: sql`excluded.kind`, title: sql`excluded.title`, place: sql`excluded.place`,
-        day: sql`excluded.day`, start: sql`excluded.start`, minutes: sql`excluded.minutes`, startsAt: sql`excluded.starts_at`,
-        endsAt: sql`excluded.ends_at`, effort: sql`excluded.effort`, pinned: sql`excluded.pinned`, lift: sql`excluded.lift`,
-        status: sql`excluded.status`, sequence: sql`excluded.sequence`, changedAt: sql`excluded.changed_at`,
+        source: sql`excluded.source`,
+        kind: sql`excluded.kind`,
+        title: sql`excluded.title`,
+        place: sql`excluded.place`,
+        day: sql`excluded.day`,
+        start: sql`excluded.start`,
+        minutes: sql`excluded.minutes`,
+        startsAt: sql`excluded.starts_at`,
+        endsAt: sql`excluded.ends_at`,
+        effort: sql`excluded.effort`,
+        pinned: sql`excluded.pinned`,
+        lift: sql`excluded.lift`,
+        status: sql`excluded.status`,
+        sequence: sql`excluded.sequence`,
+        changedAt: sql`excluded.changed_at`,
       },
     });
 }

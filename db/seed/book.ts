@@ -10,22 +10,43 @@ const compact = (day: Day): string => isoFromDay(day).replaceAll("-", "");
 export function weeklyEntry(session: WeekSession, key: string, from: Day, until: Day | null): SportEntry {
   const id = `${key}-${session.weekday}`;
   return {
-    id, series: id, idShift: 0, kind: session.kind, title: session.title, start: `${isoFromDay(firstOn(from, session.weekday))}T${session.start}`,
-    minutes: session.minutes, effort: session.effort, place: "", exdate: [],
+    id,
+    series: id,
+    idShift: 0,
+    kind: session.kind,
+    title: session.title,
+    start: `${isoFromDay(firstOn(from, session.weekday))}T${session.start}`,
+    minutes: session.minutes,
+    effort: session.effort,
+    place: "",
+    exdate: [],
     rrule: until === null ? "FREQ=WEEKLY" : `FREQ=WEEKLY;UNTIL=${compact(until)}T235900Z`,
   };
 }
 
 const travelEntry = (key: string, day: Day): SportEntry => ({
-  id: `${key}-travel`, series: `${key}-travel`, idShift: 0, kind: "travel", title: "Travel to the venue", start: `${isoFromDay(day)}T09:00`,
-  minutes: 600, effort: 0, place: "", rrule: null, exdate: [],
+  id: `${key}-travel`,
+  series: `${key}-travel`,
+  idShift: 0,
+  kind: "travel",
+  title: "Travel to the venue",
+  start: `${isoFromDay(day)}T09:00`,
+  minutes: 600,
+  effort: 0,
+  place: "",
+  rrule: null,
+  exdate: [],
 });
 
 export const factsOf = (athlete: DemoAthlete): CampBook["athlete"] => ({
   trainingAge: athlete.trainingAge,
   strikingBase: athlete.strikingBase,
   liftsPerWeek: athlete.liftsPerWeek,
-  freeHours: [1, 2, 3, 4, 5, 6, 7].map((weekday) => ({ weekday, from: athlete.freeFrom, to: athlete.freeTo })),
+  freeHours: [1, 2, 3, 4, 5, 6, 7].map((weekday) => ({
+    weekday,
+    from: athlete.freeFrom,
+    to: athlete.freeTo,
+  })),
 });
 
 /** The camp book of a demo athlete, with the bout so many days from `today`. */
@@ -41,8 +62,15 @@ export function demoBook(athlete: DemoAthlete, camp: DemoCamp, today: string, ke
     status: "on",
     homeZone: TEAM.timeZone,
     bout: {
-      date: isoFromDay(bout), time: camp.time, timeZone: camp.timeZone, place: camp.place, opponent: camp.opponent, ruleset: camp.ruleset,
-      rounds: camp.rounds, roundMinutes: camp.roundMinutes, limitKg: camp.limitKg,
+      date: isoFromDay(bout),
+      time: camp.time,
+      timeZone: camp.timeZone,
+      place: camp.place,
+      opponent: camp.opponent,
+      ruleset: camp.ruleset,
+      rounds: camp.rounds,
+      roundMinutes: camp.roundMinutes,
+      limitKg: camp.limitKg,
     },
     weeks: camp.weeks,
     weighIn: { date: isoFromDay((bout - camp.weighIn.daysBefore) as Day), time: camp.weighIn.time },

@@ -26,11 +26,17 @@ async function insertPeople(tx: Transaction, teamId: string): Promise<Map<Role, 
     .insert(users)
     .values(
       demo.accounts.map(({ name, email, role }) => ({
-        name, email, passwordHash, timeZone: role === "guest" ? "America/New_York" : TEAM.timeZone, currentTeamId: teamId,
+        name,
+        email,
+        passwordHash,
+        timeZone: role === "guest" ? "America/New_York" : TEAM.timeZone,
+        currentTeamId: teamId,
       })),
     )
     .returning({ id: users.id, email: users.email });
-  return new Map(demo.accounts.map(({ email, role }) => [role as Role, rows.find((row) => row.email === email)?.id ?? ""]));
+  return new Map(
+    demo.accounts.map(({ email, role }) => [role as Role, rows.find((row) => row.email === email)?.id ?? ""]),
+  );
 }
 
 async function insertAthletes(tx: Transaction, teamId: string): Promise<Map<string, string>> {
@@ -38,7 +44,12 @@ async function insertAthletes(tx: Transaction, teamId: string): Promise<Map<stri
     .insert(athletes)
     .values(
       ATHLETES.map((athlete) => ({
-        teamId, name: athlete.name, sport: athlete.sport, dateOfBirth: athlete.dateOfBirth, limitations: athlete.limitations, ...factsOf(athlete),
+        teamId,
+        name: athlete.name,
+        sport: athlete.sport,
+        dateOfBirth: athlete.dateOfBirth,
+        limitations: athlete.limitations,
+        ...factsOf(athlete),
       })),
     )
     .returning({ id: athletes.id, name: athletes.name });
@@ -46,11 +57,20 @@ async function insertAthletes(tx: Transaction, teamId: string): Promise<Map<stri
 }
 
 /** Lays a camp out as of the day the bout was signed, so that what lies behind it was really planned. */
-async function layOutCamp(db: Database, ctx: TeamContext, athlete: DemoAthlete, athleteId: string, today: string, key: string) {
+async function layOutCamp(
+  db: Database,
+  ctx: TeamContext,
+  athlete: DemoAthlete,
+  athleteId: string,
+  today: string,
+  key: string,
+) {
   const camp = athlete.camp;
   if (!camp) return null;
   const signed = new Date(ctx.now.getTime() - camp.signedDaysAgo * DAY_MS);
-  return db.transaction((tx) => keepCamp(tx, { ...ctx, now: signed }, athleteId, demoBook(athlete, camp, today, key)));
+  return db.transaction((tx) =>
+    keepCamp(tx, { ...ctx, now: signed }, athleteId, demoBook(athlete, camp, today, key)),
+  );
 }
 
 /** A change of last week: the head coach moved a hard sparring day, which knocked on to the lifting. */
@@ -64,7 +84,10 @@ async function moveSparring(ctx: TeamContext, campId: string, today: Day): Promi
         baseRevision: 1,
         idempotencyKey: "5d1f0a52-6f0e-4b57-9a55-0c7f3a1f7b01",
         change: {
-          kind: "sport.edit", sportId: `tamsin-6@${isoFromDay(saturday)}`, scope: "this", values: { date: isoFromDay((saturday - 2) as Day), start: "18:00" },
+          kind: "sport.edit",
+          sportId: `tamsin-6@${isoFromDay(saturday)}`,
+          scope: "this",
+          values: { date: isoFromDay((saturday - 2) as Day), start: "18:00" },
         },
       },
     },
@@ -83,16 +106,28 @@ async function seed(db: Database, now: Date): Promise<boolean> {
     const tamsin = roster.get("Tamsin Velloso") ?? null;
     await tx.insert(memberships).values(
       [...people].map(([role, userId]) => ({
-        teamId: team.id, userId, role, athleteId: role === "athlete" || role === "guest" ? tamsin : null,
+        teamId: team.id,
+        userId,
+        role,
+        athleteId: role === "athlete" || role === "guest" ? tamsin : null,
       })),
     );
-    await tx.insert(timetableEntries).values(
-      GYM_WEEK.map((session) => ({ teamId: team.id, ...weeklyEntry(session, "gym", (today - 28) as Day, null) })),
-    );
+    await tx
+      .insert(timetableEntries)
+      .values(
+        GYM_WEEK.map((session) => ({
+          teamId: team.id,
+          ...weeklyEntry(session, "gym", (today - 28) as Day, null),
+        })),
+      );
     return { teamId: team.id, people, roster };
   });
   const actor = (role: Role): TeamContext => ({
-    db, teamId: base.teamId, userId: base.people.get(role) ?? "", member: { role, athleteId: null }, now,
+    db,
+    teamId: base.teamId,
+    userId: base.people.get(role) ?? "",
+    member: { role, athleteId: null },
+    now,
   });
   for (const athlete of ATHLETES) {
     const athleteId = base.roster.get(athlete.name) ?? "";
@@ -103,7 +138,11 @@ async function seed(db: Database, now: Date): Promise<boolean> {
     const fromDay = isoFromDay((today - athlete.holdDaysAgo) as Day);
     await db.transaction(async (tx) => {
       await tx.insert(holds).values({
-        teamId: base.teamId, athleteId, fromDay, toDay: null, setBy: base.people.get("medic") ?? null,
+        teamId: base.teamId,
+        athleteId,
+        fromDay,
+        toDay: null,
+        setBy: base.people.get("medic") ?? null,
         reason: "Headache after sparring on the evening before; rest, then graded return after examination.",
       });
       await replanAthlete(tx, actor("medic"), athleteId, "A hold was set");

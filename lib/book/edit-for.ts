@@ -68,7 +68,8 @@ function editDatedSport(state: CampState, change: Extract<Change, { sportId: str
   if (sessionIsPast(state, occurrence.session)) return refuse("/change/sportId", PAST);
   const open = seriesFrom(state, occurrence.entry, from, to);
   const firstOpen = open ?? occurrence.session;
-  if (change.kind === "sport.drop") return { edit: dropSport(state.book, occurrence, change.scope, firstOpen) };
+  if (change.kind === "sport.drop")
+    return { edit: dropSport(state.book, occurrence, change.scope, firstOpen) };
   const date = change.values.date ?? isoFromDay(occurrence.session.day);
   const start = change.values.start ?? hhmm(occurrence.session.start);
   return (

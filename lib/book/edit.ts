@@ -49,7 +49,12 @@ export function applyEdit(book: CampBook, edit: BookEdit): CampBook {
   };
 }
 
-const inverseOfList = <T>(list: readonly T[], key: (value: T) => string, puts: readonly T[], drops: readonly string[]) => {
+const inverseOfList = <T>(
+  list: readonly T[],
+  key: (value: T) => string,
+  puts: readonly T[],
+  drops: readonly string[],
+) => {
   const before = new Map(list.map((value) => [key(value), value]));
   const touched = [...puts.map(key), ...drops];
   const back: T[] = [];
@@ -75,6 +80,8 @@ export function inverseOf(book: CampBook, edit: BookEdit): BookEdit {
     dropSport: sport.gone,
     putPins: pins.back,
     dropPins: pins.gone,
-    factors: Object.fromEntries(Object.keys(edit.factors ?? {}).map((id) => [id, book.coachFactors[id] ?? null])),
+    factors: Object.fromEntries(
+      Object.keys(edit.factors ?? {}).map((id) => [id, book.coachFactors[id] ?? null]),
+    ),
   };
 }

@@ -1,7 +1,25 @@
 import { expandEntries } from "@/lib/calendar/recurrence";
 import { offsetSteps } from "@/lib/calendar/zones";
-import { dayFromIso, instantAt, isoFromDay, minuteFromHhmm, plan, weekSpan, withOverrides } from "@/lib/engine";
-import type { Base, Day, Instant, Pin, Plan, PlanInput, SportKind, SportSession, Weekday } from "@/lib/engine/types";
+import {
+  dayFromIso,
+  instantAt,
+  isoFromDay,
+  minuteFromHhmm,
+  plan,
+  weekSpan,
+  withOverrides,
+} from "@/lib/engine";
+import type {
+  Base,
+  Day,
+  Instant,
+  Pin,
+  Plan,
+  PlanInput,
+  SportKind,
+  SportSession,
+  Weekday,
+} from "@/lib/engine/types";
 import type { BookPin, CampBook } from "@/lib/schemas/camp-book";
 
 /** A camp book with what the engine made of it. */
@@ -24,7 +42,8 @@ const CONTACT: ReadonlySet<SportKind> = new Set(["hard-sparring", "technical-spa
  */
 export function sportOf(book: CampBook): SportSession[] {
   const { from, to } = campSpan(book);
-  const held = (date: string): boolean => book.holds.some((hold) => hold.from <= date && (hold.to === null || date <= hold.to));
+  const held = (date: string): boolean =>
+    book.holds.some((hold) => hold.from <= date && (hold.to === null || date <= hold.to));
   return expandEntries(book.sport, from, to).filter(
     (session) => !CONTACT.has(session.kind) || !held(isoFromDay(session.day)),
   );
@@ -76,7 +95,10 @@ export function planInputOf(book: CampBook, now: Instant): PlanInput {
     },
     sport,
     pins: book.pins.map(pinOf),
-    holds: book.holds.map((hold) => ({ from: dayFromIso(hold.from), to: hold.to === null ? null : dayFromIso(hold.to) })),
+    holds: book.holds.map((hold) => ({
+      from: dayFromIso(hold.from),
+      to: hold.to === null ? null : dayFromIso(hold.to),
+    })),
     rules: withOverrides(book.rules),
     coachFactors: book.coachFactors,
     response: 1,

@@ -35,7 +35,10 @@ function rewritesPast(before: PlanInput, after: PlanInput, spanFrom: number): bo
   const past = (input: PlanInput): Set<string> =>
     new Set(
       input.sport
-        .filter((session) => session.day >= spanFrom && instantAt(input.zone, session.day, session.start) <= input.now)
+        .filter(
+          (session) =>
+            session.day >= spanFrom && instantAt(input.zone, session.day, session.start) <= input.now,
+        )
         .map(signature),
     );
   const [old, fresh] = [past(before), past(after)];
@@ -43,16 +46,31 @@ function rewritesPast(before: PlanInput, after: PlanInput, spanFrom: number): bo
 }
 
 /** Applies an edit and plans again, measured against the standing plan (or `base`, where a put-back gives its own). */
-export function previewEdit(standing: StandingCamp, edit: BookEdit, now: Instant, base?: Base): PreviewResult {
+export function previewEdit(
+  standing: StandingCamp,
+  edit: BookEdit,
+  now: Instant,
+  base?: Base,
+): PreviewResult {
   const book = applyEdit(standing.book, edit);
   try {
     const before = planInputOf(standing.book, now);
     const { input, plan } = planBook(book, now, base ?? baseOf(standing.plan));
     const spanFrom = Math.max(campSpan(standing.book).from, campSpan(book).from);
     if (rewritesPast(before, input, spanFrom)) {
-      return { problems: [{ pointer: "/change", message: "That would change sessions that are already past; what is past stays." }] };
+      return {
+        problems: [
+          {
+            pointer: "/change",
+            message: "That would change sessions that are already past; what is past stays.",
+          },
+        ],
+      };
     }
-    const sportBefore = standing.book.status === "off" ? before.sport.filter((s) => instantAt(before.zone, s.day, s.start) <= now) : before.sport;
+    const sportBefore =
+      standing.book.status === "off"
+        ? before.sport.filter((s) => instantAt(before.zone, s.day, s.start) <= now)
+        : before.sport;
     return {
       edit,
       book,
@@ -62,15 +80,22 @@ export function previewEdit(standing: StandingCamp, edit: BookEdit, now: Instant
     };
   } catch (error) {
     if (error instanceof PlanInputError) {
-      return { problems: error.problems.map(({ pointer, message }) => ({ pointer: `/change${pointer}`, message })) };
+      return {
+        problems: error.problems.map(({ pointer, message }) => ({ pointer: `/change${pointer}`, message })),
+      };
     }
-    if (error instanceof RecurrenceError) return { problems: [{ pointer: "/change/values/rrule", message: error.message }] };
+    if (error instanceof RecurrenceError)
+      return { problems: [{ pointer: "/change/values/rrule", message: error.message }] };
     throw error;
   }
 }
 
 /** The knock-on of a change, in the browser before it is saved and on the server when it is. */
-export function previewChange(standing: StandingCamp, change: Exclude<Change, { kind: "put-back" }>, now: Instant): PreviewResult {
+export function previewChange(
+  standing: StandingCamp,
+  change: Exclude<Change, { kind: "put-back" }>,
+  now: Instant,
+): PreviewResult {
   const { zone } = planInputOf(standing.book, now);
   const result = editFor({ book: standing.book, lifts: standing.plan.lifts, zone, now }, change);
   if ("problems" in result) return result;

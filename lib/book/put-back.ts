@@ -28,7 +28,12 @@ export function putBackProblem(book: CampBook, { edit }: SavedChange): FieldErro
     (edit.weighIn === undefined || same(edit.weighIn, book.weighIn)) &&
     (edit.status === undefined || edit.status === book.status) &&
     Object.entries(edit.factors ?? {}).every(([id, factor]) => (book.coachFactors[id] ?? null) === factor);
-  return stands ? null : { pointer: "/change/revision", message: "A later change touched the same sessions: put that one back first." };
+  return stands
+    ? null
+    : {
+        pointer: "/change/revision",
+        message: "A later change touched the same sessions: put that one back first.",
+      };
 }
 
 /**

@@ -22,10 +22,19 @@ export function findOccurrence(book: CampBook, sportId: string, from: Day, to: D
 }
 
 const startText = (day: Day, start: string): string => `${isoFromDay(day)}T${start}`;
-const WEEKDAY_NAMES: Record<Weekday, string> = { 1: "MO", 2: "TU", 3: "WE", 4: "TH", 5: "FR", 6: "SA", 7: "SU" };
+const WEEKDAY_NAMES: Record<Weekday, string> = {
+  1: "MO",
+  2: "TU",
+  3: "WE",
+  4: "TH",
+  5: "FR",
+  6: "SA",
+  7: "SU",
+};
 
 const byDay = (rrule: string): string[] | null => /(?:^|;)BYDAY=([^;]*)/.exec(rrule)?.[1]?.split(",") ?? null;
-const withByDay = (rrule: string, days: readonly string[]): string => rrule.replace(/(^|;)BYDAY=[^;]*/, `$1BYDAY=${days.join(",")}`);
+const withByDay = (rrule: string, days: readonly string[]): string =>
+  rrule.replace(/(^|;)BYDAY=[^;]*/, `$1BYDAY=${days.join(",")}`);
 
 /** What an edit gives an entry besides its place in time. */
 function withFacts(entry: SportEntry, values: Partial<SportValues>): SportEntry {
@@ -51,7 +60,10 @@ function freshId(book: CampBook, wanted: string): string {
 /** Exceptions of a series from a day on: edited by themselves earlier, they leave with the series. */
 const exceptionsFrom = (book: CampBook, series: string, from: Day): SportEntry[] =>
   book.sport.filter(
-    (entry) => entry.rrule === null && entry.id.startsWith(`${series}@`) && dayFromIso(entry.start.slice(0, 10)) >= from,
+    (entry) =>
+      entry.rrule === null &&
+      entry.id.startsWith(`${series}@`) &&
+      dayFromIso(entry.start.slice(0, 10)) >= from,
   );
 
 /** First day of the series that an edit of the given scope touches. `firstOpen`: the first occurrence that is not past. */
@@ -67,14 +79,20 @@ function detach({ entry, session }: Occurrence, values: Partial<SportValues>): B
     idShift: 0,
     rrule: null,
     exdate: [],
-    start: startText(values.date ? dayFromIso(values.date) : session.day, values.start ?? hhmm(session.start)),
+    start: startText(
+      values.date ? dayFromIso(values.date) : session.day,
+      values.start ?? hhmm(session.start),
+    ),
   };
   return { putSport: [{ ...entry, exdate: [...entry.exdate, start] }, alone] };
 }
 
 /** Moves a single entry or gives it a recurrence. */
 function editSingle({ entry, session }: Occurrence, values: Partial<SportValues>): BookEdit {
-  const start = startText(values.date ? dayFromIso(values.date) : session.day, values.start ?? hhmm(session.start));
+  const start = startText(
+    values.date ? dayFromIso(values.date) : session.day,
+    values.start ?? hhmm(session.start),
+  );
   return { putSport: [{ ...withFacts(entry, values), start, rrule: values.rrule ?? null }] };
 }
 
@@ -82,12 +100,19 @@ function editSingle({ entry, session }: Occurrence, values: Partial<SportValues>
  * Edits a recurring session from a day on. The series is cut there; where only one of several weekdays moves to another
  * day, that weekday becomes a series of its own, so that the others stay where they are.
  */
-function editFollowing(book: CampBook, { entry, session }: Occurrence, from: Day, values: Partial<SportValues>): BookEdit {
+function editFollowing(
+  book: CampBook,
+  { entry, session }: Occurrence,
+  from: Day,
+  values: Partial<SportValues>,
+): BookEdit {
   const put: SportEntry[] = [];
   const drop: string[] = [];
   const whole = from <= firstDay(entry);
   if (!whole) put.push(endBefore(entry, isoFromDay(from)));
-  const rest = whole ? entry : startFrom(entry, isoFromDay(from), freshId(book, `${entry.series}~${isoFromDay(from)}`));
+  const rest = whole
+    ? entry
+    : startFrom(entry, isoFromDay(from), freshId(book, `${entry.series}~${isoFromDay(from)}`));
 
   const shift = values.date ? dayFromIso(values.date) - session.day : 0;
   const time = values.start ?? hhmm(session.start);
@@ -99,7 +124,10 @@ function editFollowing(book: CampBook, { entry, session }: Occurrence, from: Day
     const start = startText((session.day + shift) as Day, time);
     put.push({ ...withFacts(rest, values), start, rrule: values.rrule, exdate: [] });
   } else if (shift !== 0 && rest.rrule !== null && days !== null && days.length > 1) {
-    const others = withByDay(rest.rrule, days.filter((day) => day !== oldDay));
+    const others = withByDay(
+      rest.rrule,
+      days.filter((day) => day !== oldDay),
+    );
     put.push({ ...rest, rrule: others });
     put.push({
       ...withFacts(rest, values),
@@ -107,10 +135,15 @@ function editFollowing(book: CampBook, { entry, session }: Occurrence, from: Day
       idShift: rest.idShift + shift,
       start: startText((firstOnWeekday(from, session.day) + shift) as Day, time),
       rrule: withByDay(rest.rrule, [newDay]),
-      exdate: shiftExdates(rest.exdate.filter((date) => onWeekday(date, session.day)), shift, time),
+      exdate: shiftExdates(
+        rest.exdate.filter((date) => onWeekday(date, session.day)),
+        shift,
+        time,
+      ),
     });
   } else {
-    const rrule = rest.rrule !== null && days !== null && shift !== 0 ? withByDay(rest.rrule, [newDay]) : rest.rrule;
+    const rrule =
+      rest.rrule !== null && days !== null && shift !== 0 ? withByDay(rest.rrule, [newDay]) : rest.rrule;
     put.push({
       ...withFacts(rest, values),
       idShift: rest.idShift + shift,
@@ -123,7 +156,8 @@ function editFollowing(book: CampBook, { entry, session }: Occurrence, from: Day
 }
 
 const firstDay = (entry: SportEntry): Day => dayFromIso(entry.start.slice(0, 10));
-const onWeekday = (date: string, like: Day): boolean => weekdayOf(dayFromIso(date.slice(0, 10))) === weekdayOf(like);
+const onWeekday = (date: string, like: Day): boolean =>
+  weekdayOf(dayFromIso(date.slice(0, 10))) === weekdayOf(like);
 const firstOnWeekday = (from: Day, like: Day): Day => (from + ((((like - from) % 7) + 7) % 7)) as Day;
 const shiftExdates = (dates: readonly string[], shift: number, time: string): string[] =>
   dates.map((date) => startText((dayFromIso(date.slice(0, 10)) + shift) as Day, time));
@@ -142,10 +176,17 @@ export function editSport(
 }
 
 /** The edit that takes a dated sport session out. */
-export function dropSport(book: CampBook, { entry, session }: Occurrence, scope: ChangeScope, firstOpen: SportSession): BookEdit {
+export function dropSport(
+  book: CampBook,
+  { entry, session }: Occurrence,
+  scope: ChangeScope,
+  firstOpen: SportSession,
+): BookEdit {
   if (entry.rrule === null) return { dropSport: [entry.id] };
   if (scope === "this") {
-    return { putSport: [{ ...entry, exdate: [...entry.exdate, startText(session.day, hhmm(session.start))] }] };
+    return {
+      putSport: [{ ...entry, exdate: [...entry.exdate, startText(session.day, hhmm(session.start))] }],
+    };
   }
   const from = scopeStart(scope, session, firstOpen);
   const exceptions = exceptionsFrom(book, entry.series, from).map((exception) => exception.id);

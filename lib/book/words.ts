@@ -25,8 +25,11 @@ export function changeWords(change: Change, standing: StandingCamp, knockOn: Kno
   switch (change.kind) {
     case "lift.move": {
       const effect = knockOn.lifts.find((candidate) => candidate.id === change.liftId);
-      const where = effect?.from && effect.to ? ` from ${momentText(effect.from)} to ${momentText(effect.to)}` : "";
-      return effect?.kind === "moved" ? `Moved ${ITEM_TITLES[change.item]}${where}` : `Pinned ${ITEM_TITLES[change.item]} where it stands`;
+      const where =
+        effect?.from && effect.to ? ` from ${momentText(effect.from)} to ${momentText(effect.to)}` : "";
+      return effect?.kind === "moved"
+        ? `Moved ${ITEM_TITLES[change.item]}${where}`
+        : `Pinned ${ITEM_TITLES[change.item]} where it stands`;
     }
     case "lift.release":
       return `Lifted the pin of ${liftTitle(change.liftId)}`;
@@ -39,7 +42,9 @@ export function changeWords(change: Change, standing: StandingCamp, knockOn: Kno
     case "sport.drop":
       return sportWords(knockOn, change.scope, "Took out");
     case "bout.change":
-      return knockOn.bout ? `Moved the bout to ${momentText({ day: knockOn.bout.to.day, start: knockOn.bout.to.start })}` : "Changed the bout";
+      return knockOn.bout
+        ? `Moved the bout to ${momentText({ day: knockOn.bout.to.day, start: knockOn.bout.to.start })}`
+        : "Changed the bout";
     case "bout.off":
       return "Marked the bout off";
     case "put-back":

@@ -11,28 +11,68 @@ interface PolicyRow {
 export const POLICY = {
   "team.manage": { description: "Invite, change and remove people; name the team", roles: ["head"] },
   "team.people": { description: "See who is in the team", roles: ["head", "strength", "skills", "medic"] },
-  "athletes.read": { description: "See an athlete's profile", roles: ["head", "strength", "skills", "medic"], own: ["athlete"] },
+  "athletes.read": {
+    description: "See an athlete's profile",
+    roles: ["head", "strength", "skills", "medic"],
+    own: ["athlete"],
+  },
   "athletes.write": { description: "Add and edit athletes", roles: ["head", "strength"] },
   "camps.create": { description: "Set a bout and lay out a camp", roles: ["head", "strength"] },
-  "camps.read": { description: "See a camp's calendar", roles: ["head", "strength", "skills", "medic"], own: ["athlete", "guest"] },
+  "camps.read": {
+    description: "See a camp's calendar",
+    roles: ["head", "strength", "skills", "medic"],
+    own: ["athlete", "guest"],
+  },
   "camps.history": { description: "See a camp's changes", roles: ["head", "strength", "skills", "medic"] },
   "camps.bout": { description: "Change the bout or mark it off", roles: ["head"] },
-  "sport.write": { description: "Add, move, edit and drop sport sessions", roles: ["head", "strength", "skills"] },
-  "lifts.write": { description: "Pin and release lifting, set the coach's factor", roles: ["head", "strength"] },
-  "lifts.detail": { description: "See sets, factors and reasons of lifting", roles: ["head", "strength", "skills", "medic"], own: ["athlete"] },
+  "sport.write": {
+    description: "Add, move, edit and drop sport sessions",
+    roles: ["head", "strength", "skills"],
+  },
+  "lifts.write": {
+    description: "Pin and release lifting, set the coach's factor",
+    roles: ["head", "strength"],
+  },
+  "lifts.detail": {
+    description: "See sets, factors and reasons of lifting",
+    roles: ["head", "strength", "skills", "medic"],
+    own: ["athlete"],
+  },
   "camps.put-back": { description: "Put back a saved change", roles: ["head", "strength"] },
-  "weight.read": { description: "See weights and the weight limit path", roles: ["head", "strength"], own: ["athlete"] },
+  "weight.read": {
+    description: "See weights and the weight limit path",
+    roles: ["head", "strength"],
+    own: ["athlete"],
+  },
   "checkins.read": { description: "See check-ins", roles: ["head", "strength", "medic"], own: ["athlete"] },
-  "holds.read": { description: "See that an athlete is on a hold", roles: ["head", "strength", "skills", "medic"], own: ["athlete"] },
-  "holds.reason": { description: "See the reason of a hold (medical note)", roles: ["medic"], own: ["athlete"] },
+  "holds.read": {
+    description: "See that an athlete is on a hold",
+    roles: ["head", "strength", "skills", "medic"],
+    own: ["athlete"],
+  },
+  "holds.reason": {
+    description: "See the reason of a hold (medical note)",
+    roles: ["medic"],
+    own: ["athlete"],
+  },
   "holds.write": { description: "Set and lift holds", roles: ["medic"] },
   "timetable.read": { description: "See the gym's week", roles: ["head", "strength", "skills", "medic"] },
   "timetable.write": { description: "Edit the gym's week", roles: ["head", "skills"] },
   "rules.read": { description: "See the house rules", roles: ["head", "strength"] },
   "rules.write": { description: "Change the house rules", roles: ["head", "strength"] },
-  "feeds.own": { description: "Subscribe to the calendar of one's own athlete", roles: [], own: ["athlete", "guest"] },
-  "feeds.team": { description: "Subscribe to one athlete's or the whole team's calendar", roles: ["head", "strength", "skills", "medic"] },
-  "account.own": { description: "Change one's own account, units and mail choices", roles: ["head", "strength", "skills", "medic", "athlete", "guest"] },
+  "feeds.own": {
+    description: "Subscribe to the calendar of one's own athlete",
+    roles: [],
+    own: ["athlete", "guest"],
+  },
+  "feeds.team": {
+    description: "Subscribe to one athlete's or the whole team's calendar",
+    roles: ["head", "strength", "skills", "medic"],
+  },
+  "account.own": {
+    description: "Change one's own account, units and mail choices",
+    roles: ["head", "strength", "skills", "medic", "athlete", "guest"],
+  },
 } as const satisfies Record<string, PolicyRow>;
 
 export type Action = keyof typeof POLICY;

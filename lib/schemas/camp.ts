@@ -62,7 +62,14 @@ export interface CampSummary {
   readonly unplaced: number;
   readonly violations: number;
   /** Sessions of the next 14 days, in order. */
-  readonly next: readonly { readonly id: string; readonly date: string; readonly start: string; readonly source: string; readonly kind: string; readonly title: string }[];
+  readonly next: readonly {
+    readonly id: string;
+    readonly date: string;
+    readonly start: string;
+    readonly source: string;
+    readonly kind: string;
+    readonly title: string;
+  }[];
 }
 
 export interface ChangeView {

@@ -7,7 +7,9 @@ export const civilDate = z.iso.date("Give a date as YYYY-MM-DD.");
 export const civilTime = z.string().regex(/^([01]\d|2[0-3]):[0-5]\d$/, "Give a time as HH:MM.");
 
 /** End of a window: `HH:MM` up to 24:00. */
-export const civilEndTime = z.string().regex(/^(([01]\d|2[0-3]):[0-5]\d|24:00)$/, "Give a time as HH:MM, up to 24:00.");
+export const civilEndTime = z
+  .string()
+  .regex(/^(([01]\d|2[0-3]):[0-5]\d|24:00)$/, "Give a time as HH:MM, up to 24:00.");
 
 /** Local date and time without zone, `YYYY-MM-DDTHH:MM`. */
 export const civilDateTime = z

@@ -6,21 +6,20 @@ import { civilDate, civilDateTime, civilTime, timeZone } from "./civil";
 
 /** Body of `POST /api/plan`. Everything is checked here; the planner keeps nothing. */
 
-const houseRules = z
-  .record(z.string(), z.number())
-  .superRefine((values, context) => {
-    for (const [key, value] of Object.entries(values)) {
-      const rule = RULE_KEYS.find((known) => known === key);
-      if (!rule) context.addIssue({ code: "custom", path: [key], message: "There is no house rule of that name." });
-      else if (value < HOUSE_RULES[rule].min || value > HOUSE_RULES[rule].max) {
-        context.addIssue({
-          code: "custom",
-          path: [key],
-          message: `${HOUSE_RULES[rule].min} to ${HOUSE_RULES[rule].max} ${HOUSE_RULES[rule].unit}.`,
-        });
-      }
+const houseRules = z.record(z.string(), z.number()).superRefine((values, context) => {
+  for (const [key, value] of Object.entries(values)) {
+    const rule = RULE_KEYS.find((known) => known === key);
+    if (!rule)
+      context.addIssue({ code: "custom", path: [key], message: "There is no house rule of that name." });
+    else if (value < HOUSE_RULES[rule].min || value > HOUSE_RULES[rule].max) {
+      context.addIssue({
+        code: "custom",
+        path: [key],
+        message: `${HOUSE_RULES[rule].min} to ${HOUSE_RULES[rule].max} ${HOUSE_RULES[rule].unit}.`,
+      });
     }
-  });
+  }
+});
 
 /** CR-10 effort where none is given (Kirk et al. 2021 for sparring, drills and wrestling; the rest common practice, no published source). */
 export const DEFAULT_EFFORT: Record<z.infer<typeof sportKind>, number> = {
@@ -53,7 +52,14 @@ export const planRequestSchema = z.strictObject({
     .max(500),
   houseRules: houseRules.optional(),
   pins: z
-    .array(z.strictObject({ item: z.enum(ITEMS), week: z.int().min(0).max(19), date: civilDate, start: civilTime }))
+    .array(
+      z.strictObject({
+        item: z.enum(ITEMS),
+        week: z.int().min(0).max(19),
+        date: civilDate,
+        start: civilTime,
+      }),
+    )
     .max(100)
     .optional(),
   /** Plan as if it were this day, 00:00 in the bout's zone. */
@@ -95,7 +101,9 @@ export const planAnswerSchema = z.object({
     }),
   ),
   unplaced: z.array(z.object({ item: z.enum(ITEMS), week: z.int(), rules: z.array(reason) })),
-  violations: z.array(z.object({ rule: z.string(), ids: z.array(z.string()), date: civilDate, text: z.string() })),
+  violations: z.array(
+    z.object({ rule: z.string(), ids: z.array(z.string()), date: civilDate, text: z.string() }),
+  ),
   weeks: z.array(
     z.object({
       weeksOut: z.int(),

@@ -29,7 +29,11 @@ export function timed(runs: number, warmUp: number, work: (run: number) => void)
 }
 
 /** The same for work that waits. */
-export async function timedAsync(runs: number, warmUp: number, work: (run: number) => Promise<void>): Promise<number[]> {
+export async function timedAsync(
+  runs: number,
+  warmUp: number,
+  work: (run: number) => Promise<void>,
+): Promise<number[]> {
   for (let run = 0; run < warmUp; run++) await work(run);
   const times: number[] = [];
   for (let run = 0; run < runs; run++) {

@@ -21,7 +21,9 @@ export async function benchSaving(url: string) {
   const { as } = await teamWithEveryRole(db, now);
   const ctx = as("head");
   const camps = await Promise.all(
-    Array.from({ length: CAMPS }, (_, n) => createCamp(ctx, { body: campForm({ athlete: { name: `Bench ${n}` } }) })),
+    Array.from({ length: CAMPS }, (_, n) =>
+      createCamp(ctx, { body: campForm({ athlete: { name: `Bench ${n}` } }) }),
+    ),
   );
   const state = await Promise.all(
     camps.map(async ({ id }) => {
@@ -37,7 +39,12 @@ export async function benchSaving(url: string) {
     const answer = await saveChange(ctx, {
       params: { id: camp.id },
       body: {
-        change: { kind: "sport.edit", sportId: camp.sportId, scope: "this", values: { date, start: "18:00" } },
+        change: {
+          kind: "sport.edit",
+          sportId: camp.sportId,
+          scope: "this",
+          values: { date, start: "18:00" },
+        },
         baseRevision: camp.revision,
         idempotencyKey: randomUUID(),
       },
@@ -50,12 +57,17 @@ export async function benchSaving(url: string) {
   const together: number[] = [];
   for (let round = 0; round < 2; round++) for (const camp of state) await save(camp, round);
   for (let round = 0; round < ROUNDS; round++) for (const camp of state) alone.push(await save(camp, round));
-  for (let round = 0; round < ROUNDS; round++) together.push(...(await Promise.all(state.map((camp) => save(camp, round)))));
+  for (let round = 0; round < ROUNDS; round++)
+    together.push(...(await Promise.all(state.map((camp) => save(camp, round)))));
   await sql.end();
   const [one, many] = [figures(alone), figures(together)];
   return {
     "save, one after another, ms": { median: round(one.median), p95: round(one.p95), runs: one.runs },
-    "save, 20 at once on different camps, ms": { median: round(many.median), p95: round(many.p95), runs: many.runs },
-    "errors": errors,
+    "save, 20 at once on different camps, ms": {
+      median: round(many.median),
+      p95: round(many.p95),
+      runs: many.runs,
+    },
+    errors: errors,
   };
 }

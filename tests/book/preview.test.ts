@@ -1,5 +1,15 @@
 import { describe, expect, it } from "vitest";
-import { applyEdit, baseOf, inverseOf, isPreview, planBook, previewChange, previewEdit, type Preview, type StandingCamp } from "@/lib/book";
+import {
+  applyEdit,
+  baseOf,
+  inverseOf,
+  isPreview,
+  planBook,
+  previewChange,
+  previewEdit,
+  type Preview,
+  type StandingCamp,
+} from "@/lib/book";
 import { dayFromIso, isoFromDay } from "@/lib/engine";
 import type { Instant } from "@/lib/engine/types";
 import type { CampBook } from "@/lib/schemas/camp-book";
@@ -8,7 +18,10 @@ import { campBook } from "../factories/camp-book";
 
 const at = (iso: string): Instant => (Date.parse(iso) / 60_000) as Instant;
 const NOW = at("2026-11-26T12:00:00Z");
-const standing = (book: CampBook = campBook(), now = NOW): StandingCamp => ({ book, plan: planBook(book, now).plan });
+const standing = (book: CampBook = campBook(), now = NOW): StandingCamp => ({
+  book,
+  plan: planBook(book, now).plan,
+});
 
 const preview = (camp: StandingCamp, change: Exclude<Change, { kind: "put-back" }>, now = NOW): Preview => {
   const result = previewChange(camp, change, now);
@@ -20,16 +33,26 @@ const problems = (camp: StandingCamp, change: Exclude<Change, { kind: "put-back"
   return isPreview(result) ? [] : result.problems;
 };
 const sportDates = ({ input }: Preview, series: string) =>
-  input.sport.filter((session) => session.id.startsWith(`${series}@`)).map((session) => isoFromDay(session.day));
+  input.sport
+    .filter((session) => session.id.startsWith(`${series}@`))
+    .map((session) => isoFromDay(session.day));
 
 describe("moving a sparring day", () => {
   const moved = preview(standing(), {
-    kind: "sport.edit", sportId: "sat@2026-12-05", scope: "this", values: { date: "2026-12-03", start: "18:00" },
+    kind: "sport.edit",
+    sportId: "sat@2026-12-05",
+    scope: "this",
+    values: { date: "2026-12-03", start: "18:00" },
   });
 
   it("moves that one and keeps its identity", () => {
     expect(moved.knockOn.sport).toMatchObject([
-      { id: "sat@2026-12-05", kind: "moved", from: { day: dayFromIso("2026-12-05") }, to: { day: dayFromIso("2026-12-03") } },
+      {
+        id: "sat@2026-12-05",
+        kind: "moved",
+        from: { day: dayFromIso("2026-12-05") },
+        to: { day: dayFromIso("2026-12-03") },
+      },
     ]);
   });
 
@@ -40,9 +63,15 @@ describe("moving a sparring day", () => {
 
   it("moving it back, measured against the same plan, shows nothing", () => {
     const camp = standing();
-    const back = preview({ book: moved.book, plan: moved.plan }, {
-      kind: "sport.edit", sportId: "sat@2026-12-05", scope: "this", values: { date: "2026-12-05", start: "11:00" },
-    });
+    const back = preview(
+      { book: moved.book, plan: moved.plan },
+      {
+        kind: "sport.edit",
+        sportId: "sat@2026-12-05",
+        scope: "this",
+        values: { date: "2026-12-05", start: "11:00" },
+      },
+    );
     const again = previewEdit({ book: back.book, plan: camp.plan }, {}, NOW);
     if (!isPreview(again)) throw new Error("not planned");
     expect(again.knockOn).toEqual({ lifts: [], sport: [], weeks: [], violations: [], bout: null });
@@ -59,9 +88,14 @@ describe("moving a sparring day", () => {
 describe("which of a recurring session", () => {
   it("this and following: the earlier ones stay, the later ones move, all under their own names", () => {
     const result = preview(standing(), {
-      kind: "sport.edit", sportId: "tue@2026-12-08", scope: "following", values: { date: "2026-12-09", start: "19:00" },
+      kind: "sport.edit",
+      sportId: "tue@2026-12-08",
+      scope: "following",
+      values: { date: "2026-12-09", start: "19:00" },
     });
-    const days = result.input.sport.filter((session) => session.id.startsWith("tue@")).map((s) => [s.id, isoFromDay(s.day)]);
+    const days = result.input.sport
+      .filter((session) => session.id.startsWith("tue@"))
+      .map((s) => [s.id, isoFromDay(s.day)]);
     expect(days).toEqual([
       ["tue@2026-11-17", "2026-11-17"],
       ["tue@2026-11-24", "2026-11-24"],
@@ -75,20 +109,47 @@ describe("which of a recurring session", () => {
 
   it("all of them: what is past stays", () => {
     const result = preview(standing(), {
-      kind: "sport.edit", sportId: "tue@2026-12-08", scope: "all", values: { start: "19:00" },
+      kind: "sport.edit",
+      sportId: "tue@2026-12-08",
+      scope: "all",
+      values: { start: "19:00" },
     });
-    const times = result.input.sport.filter((session) => session.id.startsWith("tue@")).map((session) => session.start);
+    const times = result.input.sport
+      .filter((session) => session.id.startsWith("tue@"))
+      .map((session) => session.start);
     expect(times).toEqual([1080, 1080, 1140, 1140, 1140, 1140, 1140]);
   });
 
   it("one of several weekdays moves without the others", () => {
     const book = campBook({
-      sport: [{ ...campBook().sport[0], id: "pair", series: "pair", idShift: 0, kind: "skill", title: "Drills", minutes: 60, effort: 4, place: "", exdate: [], start: "2026-11-17T18:00", rrule: "FREQ=WEEKLY;BYDAY=TU,TH" }],
+      sport: [
+        {
+          ...campBook().sport[0],
+          id: "pair",
+          series: "pair",
+          idShift: 0,
+          kind: "skill",
+          title: "Drills",
+          minutes: 60,
+          effort: 4,
+          place: "",
+          exdate: [],
+          start: "2026-11-17T18:00",
+          rrule: "FREQ=WEEKLY;BYDAY=TU,TH",
+        },
+      ],
     });
     const result = preview(standing(book), {
-      kind: "sport.edit", sportId: "pair@2026-12-08", scope: "following", values: { date: "2026-12-09", start: "18:00" },
+      kind: "sport.edit",
+      sportId: "pair@2026-12-08",
+      scope: "following",
+      values: { date: "2026-12-09", start: "18:00" },
     });
-    const weekdays = new Set(sportDates(result, "pair").filter((date) => date >= "2026-12-08").map((date) => new Date(`${date}T00:00Z`).getUTCDay()));
+    const weekdays = new Set(
+      sportDates(result, "pair")
+        .filter((date) => date >= "2026-12-08")
+        .map((date) => new Date(`${date}T00:00Z`).getUTCDay()),
+    );
     expect(weekdays).toEqual(new Set([3, 4]));
   });
 
@@ -101,9 +162,31 @@ describe("which of a recurring session", () => {
 
 describe("what is past", () => {
   it.each<[string, Exclude<Change, { kind: "put-back" }>]>([
-    ["a past sparring day is not moved", { kind: "sport.edit", sportId: "tue@2026-11-24", scope: "this", values: { date: "2026-12-03" } }],
-    ["nothing is moved into the past", { kind: "sport.edit", sportId: "tue@2026-12-01", scope: "this", values: { date: "2026-11-25" } }],
-    ["nothing is added in the past", { kind: "sport.add", entryId: "8a6e0804-2bd0-4672-b79d-d97027f9071a", values: { kind: "skill", title: "Pads", date: "2026-11-20", start: "18:00", minutes: 60, effort: 4, place: "", rrule: null } }],
+    [
+      "a past sparring day is not moved",
+      { kind: "sport.edit", sportId: "tue@2026-11-24", scope: "this", values: { date: "2026-12-03" } },
+    ],
+    [
+      "nothing is moved into the past",
+      { kind: "sport.edit", sportId: "tue@2026-12-01", scope: "this", values: { date: "2026-11-25" } },
+    ],
+    [
+      "nothing is added in the past",
+      {
+        kind: "sport.add",
+        entryId: "8a6e0804-2bd0-4672-b79d-d97027f9071a",
+        values: {
+          kind: "skill",
+          title: "Pads",
+          date: "2026-11-20",
+          start: "18:00",
+          minutes: 60,
+          effort: 4,
+          place: "",
+          rrule: null,
+        },
+      },
+    ],
   ])("%s", (_, change) => {
     expect(problems(standing(), change)).toMatchObject([{ message: expect.stringContaining("past") }]);
   });
@@ -112,7 +195,9 @@ describe("what is past", () => {
     const result = preview(standing(), { kind: "bout.off" });
     expect(result.plan.lifts.every((lift) => lift.past)).toBe(true);
     expect(result.plan.lifts.length).toBeGreaterThan(0);
-    expect(result.input.sport.map((session) => isoFromDay(session.day)).every((date) => date <= "2026-11-26")).toBe(true);
+    expect(
+      result.input.sport.map((session) => isoFromDay(session.day)).every((date) => date <= "2026-11-26"),
+    ).toBe(true);
   });
 });
 
@@ -122,8 +207,19 @@ describe("pins", () => {
     const lift = camp.plan.lifts.find((candidate) => candidate.heavyLower && !candidate.past);
     if (!lift) throw new Error("no lift");
     const monday = dayFromIso("2026-12-07");
-    const result = preview(camp, { kind: "lift.move", liftId: lift.id, item: lift.item, week: lift.week, date: isoFromDay(monday), start: "19:30" });
-    expect(result.plan.lifts.find((candidate) => candidate.id === lift.id)).toMatchObject({ day: monday, start: 1170, pinned: true });
+    const result = preview(camp, {
+      kind: "lift.move",
+      liftId: lift.id,
+      item: lift.item,
+      week: lift.week,
+      date: isoFromDay(monday),
+      start: "19:30",
+    });
+    expect(result.plan.lifts.find((candidate) => candidate.id === lift.id)).toMatchObject({
+      day: monday,
+      start: 1170,
+      pinned: true,
+    });
     expect(result.plan.violations.map((violation) => violation.rule)).toContain("heavy-before-hard");
   });
 });
@@ -131,7 +227,12 @@ describe("pins", () => {
 describe("edits", () => {
   it("the inverse of an edit takes the book back", () => {
     const camp = standing();
-    const result = preview(camp, { kind: "sport.edit", sportId: "tue@2026-12-08", scope: "following", values: { title: "Hard rounds", minutes: 75 } });
+    const result = preview(camp, {
+      kind: "sport.edit",
+      sportId: "tue@2026-12-08",
+      scope: "following",
+      values: { title: "Hard rounds", minutes: 75 },
+    });
     const back = applyEdit(result.book, inverseOf(camp.book, result.edit));
     const byId = (book: CampBook) => [...book.sport].sort((a, b) => a.id.localeCompare(b.id));
     expect(byId(back)).toEqual(byId(camp.book));
@@ -141,7 +242,8 @@ describe("edits", () => {
     const camp = standing();
     const later = at("2026-12-03T09:00:00Z");
     const again = planBook(camp.book, later, baseOf(camp.plan)).plan;
-    const place = (plan: typeof again) => plan.lifts.map(({ id, day, start, sets }) => ({ id, day, start, sets }));
+    const place = (plan: typeof again) =>
+      plan.lifts.map(({ id, day, start, sets }) => ({ id, day, start, sets }));
     expect(place(again)).toEqual(place(camp.plan));
   });
 
@@ -150,6 +252,8 @@ describe("edits", () => {
     const held = planBook(book, NOW);
     const inHold = (day: number) => day >= dayFromIso("2026-11-30") && day <= dayFromIso("2026-12-06");
     expect(held.plan.lifts.filter((lift) => inHold(lift.day))).toEqual([]);
-    expect(held.input.sport.filter((session) => inHold(session.day)).map((session) => session.kind)).toEqual(["skill"]);
+    expect(held.input.sport.filter((session) => inHold(session.day)).map((session) => session.kind)).toEqual([
+      "skill",
+    ]);
   });
 });

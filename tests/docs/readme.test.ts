@@ -6,11 +6,17 @@ import { POLICY, ROLES, ROLE_TITLES, type Role } from "@/lib/policy";
 const README = "README.md";
 
 const policyTable = (): string => {
-  const rows = Object.entries<{ description: string; roles: readonly Role[]; own?: readonly Role[] }>(POLICY).map(
+  const rows = Object.entries<{ description: string; roles: readonly Role[]; own?: readonly Role[] }>(
+    POLICY,
+  ).map(
     ([, row]) =>
       `| ${row.description} | ${ROLES.map((role) => (row.roles.includes(role) ? "yes" : row.own?.includes(role) ? "own" : "")).join(" | ")} |`,
   );
-  return [`| | ${ROLES.map((role) => ROLE_TITLES[role]).join(" | ")} |`, `|---|${"---|".repeat(ROLES.length)}`, ...rows].join("\n");
+  return [
+    `| | ${ROLES.map((role) => ROLE_TITLES[role]).join(" | ")} |`,
+    `|---|${"---|".repeat(ROLES.length)}`,
+    ...rows,
+  ].join("\n");
 };
 
 const rulesTable = (): string => {
@@ -18,7 +24,9 @@ const rulesTable = (): string => {
     const rule = HOUSE_RULES[key];
     return `| \`${key}\` | ${rule.title} | ${rule.value} ${rule.unit} | ${rule.min} to ${rule.max} | ${rule.reason} | ${rule.source} |`;
   });
-  return ["| key | rule | default | range | reason | source |", "|---|---|---|---|---|---|", ...rows].join("\n");
+  return ["| key | rule | default | range | reason | source |", "|---|---|---|---|---|---|", ...rows].join(
+    "\n",
+  );
 };
 
 const within = (text: string, name: string, body?: string): string => {
@@ -28,11 +36,16 @@ const within = (text: string, name: string, body?: string): string => {
 };
 
 if (process.env.UPDATE_DOCS === "1") {
-  writeFileSync(README, within(within(readFileSync(README, "utf8"), "policy", policyTable()), "rules", rulesTable()));
+  writeFileSync(
+    README,
+    within(within(readFileSync(README, "utf8"), "policy", policyTable()), "rules", rulesTable()),
+  );
 }
 
 describe("the README", () => {
   const text = readFileSync(README, "utf8");
-  it("shows the policy table as the code has it", () => expect(within(text, "policy").trim()).toBe(policyTable()));
-  it("shows every house rule with unit, range, reason and source", () => expect(within(text, "rules").trim()).toBe(rulesTable()));
+  it("shows the policy table as the code has it", () =>
+    expect(within(text, "policy").trim()).toBe(policyTable()));
+  it("shows every house rule with unit, range, reason and source", () =>
+    expect(within(text, "rules").trim()).toBe(rulesTable()));
 });

@@ -66,7 +66,14 @@ export const campForm = (over: Partial<CampForm> = {}): CampForm => {
     weighIn: book.weighIn,
     facts: book.athlete,
     sport: book.sport.map(({ kind, title, start, minutes, effort, place, rrule, exdate }) => ({
-      kind, title, start, minutes, effort, place, rrule, exdate,
+      kind,
+      title,
+      start,
+      minutes,
+      effort,
+      place,
+      rrule,
+      exdate,
     })),
     ...over,
   };

@@ -121,7 +121,7 @@ describe("several processes on one database", () => {
   it("send a mail once although its job runs in each of them", async () => {
     const mail = letter();
     const id = await db.transaction((tx) => queueMail(tx, mail));
-    await sql`select graphile_worker.add_job('send-mail', ${sql.json({ mailId: id })}), graphile_worker.add_job('send-mail', ${sql.json({ mailId: id })})`;
+    await sql`select graphile_worker.add_job('send-mail', ${JSON.stringify({ mailId: id })}::json) from generate_series(1, 4)`;
     await Promise.all([runDueJobs(url, deps), runDueJobs(url, deps), runDueJobs(url, deps)]);
     expect((await subjects()).filter((subject) => subject === mail.subject)).toHaveLength(1);
   });
@@ -178,6 +178,8 @@ describe("what a mail is made of", () => {
     await db.transaction((tx) => queueMail(tx, letter({ key: "comma", to: "ines@gym.example, spy@gym.example" })));
     await db.transaction((tx) => queueMail(tx, letter({ key: "break", to: "ines@gym.example\r\nRCPT TO:<spy@gym.example>" })));
     await runDueJobs(url, deps);
+    const states = await db.select({ status: mails.status }).from(mails);
+    expect(states).toEqual([{ status: "failed" }, { status: "failed" }]);
     const everyone = (await box.caught()).flatMap(({ envelope }) => envelope.to);
     expect(everyone).not.toContain("spy@gym.example");
   });

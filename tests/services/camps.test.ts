@@ -22,14 +22,26 @@ async function camp() {
 }
 
 const read = (ctx: TeamContext, id: string) => readCamp(ctx, { params: { id } });
-const save = (ctx: TeamContext, id: string, change: Change, baseRevision: number, idempotencyKey = randomUUID()) =>
-  saveChange(ctx, { params: { id }, body: { change, baseRevision, idempotencyKey } });
+const save = (
+  ctx: TeamContext,
+  id: string,
+  change: Change,
+  baseRevision: number,
+  idempotencyKey = randomUUID(),
+) => saveChange(ctx, { params: { id }, body: { change, baseRevision, idempotencyKey } });
 
 async function moveSaturday(ctx: TeamContext, id: string, baseRevision = 1) {
   const view = await read(ctx, id);
-  const saturday = view.sport.find((session) => session.kind === "hard-sparring" && session.id.endsWith("@2026-12-05"));
+  const saturday = view.sport.find(
+    (session) => session.kind === "hard-sparring" && session.id.endsWith("@2026-12-05"),
+  );
   if (!saturday) throw new Error("no sparring");
-  const change: Change = { kind: "sport.edit", sportId: saturday.id, scope: "this", values: { date: "2026-12-03", start: "18:00" } };
+  const change: Change = {
+    kind: "sport.edit",
+    sportId: saturday.id,
+    scope: "this",
+    values: { date: "2026-12-03", start: "18:00" },
+  };
   return { view, change, answer: await save(ctx, id, change, baseRevision) };
 }
 
@@ -49,12 +61,20 @@ describe("saving a change", () => {
     expect(answer.revision).toBe(2);
     expect(answer.knockOn.sport).toMatchObject([{ kind: "moved" }]);
     expect(answer.knockOn.lifts.length).toBeGreaterThan(0);
-    const [revision] = await db.select().from(revisions).where(and(eq(revisions.campId, id), eq(revisions.number, 2)));
+    const [revision] = await db
+      .select()
+      .from(revisions)
+      .where(and(eq(revisions.campId, id), eq(revisions.number, 2)));
     expect(revision?.summary).toMatch(/^Moved Hard sparring from Sat 5 Dec 11:00 to Thu 3 Dec 18:00$/);
     const rows = await db.select().from(sessions).where(eq(sessions.campId, id));
     const moved = rows.find((row) => row.id === answer.knockOn.sport[0]?.id);
     expect(moved).toMatchObject({ day: "2026-12-03", start: "18:00", sequence: 1, changedAt: NOW });
-    expect(await db.select().from(auditLog).where(and(eq(auditLog.subject, id), eq(auditLog.action, "camp.change")))).toHaveLength(1);
+    expect(
+      await db
+        .select()
+        .from(auditLog)
+        .where(and(eq(auditLog.subject, id), eq(auditLog.action, "camp.change"))),
+    ).toHaveLength(1);
     const told = await db.select().from(notices).where(eq(notices.campId, id));
     // Strength coach, skills coach and athlete; not the head coach who saved, nor medic and guest, whose dates did not move.
     expect(told).toHaveLength(3);
@@ -63,8 +83,12 @@ describe("saving a change", () => {
 
   it("a failure on the way leaves nothing behind", async () => {
     const { as, id } = await camp();
-    await db.execute(sql`create or replace function refuse() returns trigger language plpgsql as $$ begin raise exception 'no'; end $$`);
-    await db.execute(sql`create trigger refuse_notice before insert on notices for each row execute function refuse()`);
+    await db.execute(
+      sql`create or replace function refuse() returns trigger language plpgsql as $$ begin raise exception 'no'; end $$`,
+    );
+    await db.execute(
+      sql`create trigger refuse_notice before insert on notices for each row execute function refuse()`,
+    );
     await expect(moveSaturday(as("head"), id)).rejects.toThrow();
     await db.execute(sql`drop trigger refuse_notice on notices`);
     expect((await read(as("head"), id)).revision).toBe(1);
@@ -87,15 +111,27 @@ describe("saving a change", () => {
     const { change } = await moveSaturday(as("head"), id);
     const error = await refusal(save(as("strength"), id, change, 1));
     expect(error.code).toBe("stale");
-    expect(error.extra).toMatchObject({ revision: 2, changes: [{ number: 2, by: expect.stringContaining("head") }], view: { revision: 2 } });
+    expect(error.extra).toMatchObject({
+      revision: 2,
+      changes: [{ number: 2, by: expect.stringContaining("head") }],
+      view: { revision: 2 },
+    });
   });
 
   it("two at once: one is saved, the other is stale", async () => {
     const { as, id } = await camp();
     const view = await read(as("head"), id);
     const tuesday = view.sport.find((session) => session.id.endsWith("@2026-12-08"));
-    const change: Change = { kind: "sport.edit", sportId: tuesday?.id ?? "", scope: "this", values: { date: "2026-12-09", start: "18:00" } };
-    const results = await Promise.allSettled([save(as("head"), id, change, 1), save(as("strength"), id, change, 1)]);
+    const change: Change = {
+      kind: "sport.edit",
+      sportId: tuesday?.id ?? "",
+      scope: "this",
+      values: { date: "2026-12-09", start: "18:00" },
+    };
+    const results = await Promise.allSettled([
+      save(as("head"), id, change, 1),
+      save(as("strength"), id, change, 1),
+    ]);
     expect(results.map((result) => result.status).sort()).toEqual(["fulfilled", "rejected"]);
   });
 
@@ -115,7 +151,9 @@ describe("saving a change", () => {
     const theirs = await camp();
     expect(await refusal(read(mine.as("head"), theirs.id))).toMatchObject({ code: "not-found" });
     expect(await refusal(read(mine.as("head"), randomUUID()))).toMatchObject({ code: "not-found" });
-    expect(await refusal(save(mine.as("head"), theirs.id, { kind: "bout.off" }, 1))).toMatchObject({ code: "not-found" });
+    expect(await refusal(save(mine.as("head"), theirs.id, { kind: "bout.off" }, 1))).toMatchObject({
+      code: "not-found",
+    });
   });
 });
 
@@ -142,14 +180,39 @@ describe("put back", () => {
   });
 
   it.each<[string, (view: Awaited<ReturnType<typeof read>>) => Change]>([
-    ["a pin", (view) => {
-      const lift = view.plan.lifts.filter((candidate) => !candidate.past).at(3);
-      if (!lift) throw new Error("no lift");
-      return { kind: "lift.move", liftId: lift.id, item: lift.item, week: lift.week, date: "2026-12-10", start: "12:00" };
-    }],
-    ["a bout moved a week on", (view) => ({ kind: "bout.change", bout: { ...view.book.bout, date: "2027-01-16" }, weeks: 9, weighIn: { date: "2027-01-15", time: "11:00" } })],
+    [
+      "a pin",
+      (view) => {
+        const lift = view.plan.lifts.filter((candidate) => !candidate.past).at(3);
+        if (!lift) throw new Error("no lift");
+        return {
+          kind: "lift.move",
+          liftId: lift.id,
+          item: lift.item,
+          week: lift.week,
+          date: "2026-12-10",
+          start: "12:00",
+        };
+      },
+    ],
+    [
+      "a bout moved a week on",
+      (view) => ({
+        kind: "bout.change",
+        bout: { ...view.book.bout, date: "2027-01-16" },
+        weeks: 9,
+        weighIn: { date: "2027-01-15", time: "11:00" },
+      }),
+    ],
     ["a bout marked off", () => ({ kind: "bout.off" })],
-    ["a series taken out", (view) => ({ kind: "sport.drop", sportId: view.sport.find((session) => session.id.endsWith("@2026-12-08"))?.id ?? "", scope: "following" })],
+    [
+      "a series taken out",
+      (view) => ({
+        kind: "sport.drop",
+        sportId: view.sport.find((session) => session.id.endsWith("@2026-12-08"))?.id ?? "",
+        scope: "following",
+      }),
+    ],
   ])("undoes %s", async (_, changeFor) => {
     const { as, id } = await camp();
     const before = await standing(as("head"), id);
@@ -163,7 +226,9 @@ describe("put back", () => {
     const { as, id } = await camp();
     const { change } = await moveSaturday(as("head"), id);
     await save(as("head"), id, { ...change, values: { date: "2026-12-04", start: "18:00" } } as Change, 2);
-    expect(await refusal(save(as("head"), id, { kind: "put-back", revision: 2 }, 3))).toMatchObject({ code: "invalid" });
+    expect(await refusal(save(as("head"), id, { kind: "put-back", revision: 2 }, 3))).toMatchObject({
+      code: "invalid",
+    });
   });
 });
 
@@ -180,7 +245,9 @@ describe("what each role sees of a camp", () => {
   it("an athlete sees the own camp with its sets, and not that of another", async () => {
     const { as, id, team } = await camp();
     expect((await read(as("athlete"), id)).plan.lifts[0]?.sets).toBeGreaterThan(0);
-    const { id: other } = await createCamp(as("head"), { body: campForm({ athlete: { name: `Someone else of ${team.name}` } }) });
+    const { id: other } = await createCamp(as("head"), {
+      body: campForm({ athlete: { name: `Someone else of ${team.name}` } }),
+    });
     expect(await refusal(read(as("athlete"), other))).toMatchObject({ code: "not-found" });
   });
 });

@@ -19,7 +19,9 @@ const URGENT_MINUTES = 48 * 60;
 
 /** True where something that changes stands, or stood, within 48 h from now. */
 function isUrgent({ knockOn, input }: Preview, now: Instant): boolean {
-  const near = (at: { day: Parameters<typeof instantAt>[1]; start: Parameters<typeof instantAt>[2] } | null): boolean => {
+  const near = (
+    at: { day: Parameters<typeof instantAt>[1]; start: Parameters<typeof instantAt>[2] } | null,
+  ): boolean => {
     if (!at) return false;
     const wait = instantAt(input.zone, at.day, at.start) - now;
     return wait > 0 && wait <= URGENT_MINUTES;
@@ -52,7 +54,10 @@ export async function commitPreview(
   await writeEdit(tx, ctx.teamId, camp.row.id, preview.edit);
   await updateCamp(tx, camp.row, { book: preview.book, summary, revision, now: ctx.now });
   const planned = sessionsOf(preview.book, preview.input, { ...preview.plan, lifts });
-  await writeSessions(tx, sessionWrites({ teamId: ctx.teamId, campId: camp.row.id }, camp.sessions, planned, ctx.now));
+  await writeSessions(
+    tx,
+    sessionWrites({ teamId: ctx.teamId, campId: camp.row.id }, camp.sessions, planned, ctx.now),
+  );
   await insertRevision(tx, {
     teamId: ctx.teamId,
     campId: camp.row.id,
@@ -74,12 +79,25 @@ export async function commitPreview(
   return { revision, told };
 }
 
-async function tell(tx: Tx, ctx: TeamContext, camp: LoadedCamp, preview: Preview, revision: number): Promise<number> {
+async function tell(
+  tx: Tx,
+  ctx: TeamContext,
+  camp: LoadedCamp,
+  preview: Preview,
+  revision: number,
+): Promise<number> {
   const others = await othersOf(tx, ctx, camp.athlete.id);
   const userIds = others.filter(({ role }) => concerns(role, preview.knockOn)).map(({ userId }) => userId);
   if (userIds.length > 0) {
     const urgent = isUrgent(preview, instantOf(ctx.now));
-    await queueChangeMail(tx, { teamId: ctx.teamId, campId: camp.row.id, revision, userIds, urgent, now: ctx.now });
+    await queueChangeMail(tx, {
+      teamId: ctx.teamId,
+      campId: camp.row.id,
+      revision,
+      userIds,
+      urgent,
+      now: ctx.now,
+    });
   }
   return userIds.length;
 }

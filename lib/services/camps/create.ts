@@ -48,7 +48,8 @@ function planned(book: CampBook, now: Date) {
   try {
     return planBook(book, instantOf(now));
   } catch (error) {
-    if (error instanceof PlanInputError) throw new AppError("invalid", "This camp cannot be laid out.", { errors: error.problems });
+    if (error instanceof PlanInputError)
+      throw new AppError("invalid", "This camp cannot be laid out.", { errors: error.problems });
     if (error instanceof RecurrenceError) {
       throw new AppError("invalid", "This recurrence cannot be expanded.", {
         errors: [{ pointer: `/sport/${error.entryIndex}/${error.pointerField}`, message: error.message }],
@@ -59,7 +60,10 @@ function planned(book: CampBook, now: Date) {
 }
 
 /** Lays a camp out and keeps it: camp, sessions and the first revision in one transaction. */
-export async function createCamp(ctx: TeamContext, { body: form }: { body: CampForm }): Promise<{ id: string }> {
+export async function createCamp(
+  ctx: TeamContext,
+  { body: form }: { body: CampForm },
+): Promise<{ id: string }> {
   return ctx.db.transaction(async (tx) => {
     const team = await findTeam(tx, ctx.teamId);
     if (!team) throw notFound();

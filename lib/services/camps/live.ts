@@ -36,13 +36,19 @@ export function followCamp(campId: string, listener: Listener): () => void {
 }
 
 /** Server-sent events of a camp: one `data: {"revision": n}` a revision, and a comment every 20 s so that proxies keep the line open. */
-export function campEvents(campId: string, revision: number, signal: AbortSignal): ReadableStream<Uint8Array> {
+export function campEvents(
+  campId: string,
+  revision: number,
+  signal: AbortSignal,
+): ReadableStream<Uint8Array> {
   const encoder = new TextEncoder();
   return new ReadableStream({
     start(controller) {
       const send = (text: string) => controller.enqueue(encoder.encode(text));
       send(`retry: 2000\ndata: ${JSON.stringify({ revision })}\n\n`);
-      const stop = followCamp(campId, (change) => send(`data: ${JSON.stringify({ revision: change.revision })}\n\n`));
+      const stop = followCamp(campId, (change) =>
+        send(`data: ${JSON.stringify({ revision: change.revision })}\n\n`),
+      );
       const beat = setInterval(() => send(": still here\n\n"), 20_000);
       signal.addEventListener("abort", () => {
         clearInterval(beat);

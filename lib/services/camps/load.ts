@@ -15,7 +15,12 @@ export interface LoadedCamp extends StandingCamp {
 }
 
 /** A camp with its standing plan. Missing, foreign and not for this member's eyes give the same 404. */
-export async function loadCamp(tx: Tx, ctx: TeamContext, campId: string, options: { lock?: boolean } = {}): Promise<LoadedCamp> {
+export async function loadCamp(
+  tx: Tx,
+  ctx: TeamContext,
+  campId: string,
+  options: { lock?: boolean } = {},
+): Promise<LoadedCamp> {
   const row = await (options.lock ? lockCamp : findCamp)(tx, ctx.teamId, campId);
   if (!row || !can(ctx.member, "camps.read", row.athleteId)) throw notFound();
   const parts = await loadCampParts(tx, row);

@@ -11,7 +11,10 @@ const DAY_MS = 86_400_000;
 /** Days ahead that the board shows. */
 const BOARD_DAYS = 14;
 
-export async function readCamp(ctx: TeamContext, { params }: { params: Record<string, string> }): Promise<CampView> {
+export async function readCamp(
+  ctx: TeamContext,
+  { params }: { params: Record<string, string> },
+): Promise<CampView> {
   return viewOf(ctx.db, ctx, await loadCamp(ctx.db, ctx, params.id ?? ""));
 }
 
@@ -31,13 +34,23 @@ export async function listCampSummaries(ctx: TeamContext): Promise<{ camps: Camp
       athlete: { id: camp.athleteId, name: athleteName },
       status: camp.status,
       bout: {
-        date: camp.boutDate, time: camp.boutTime, timeZone: camp.boutZone, place: camp.place, opponent: camp.opponent,
-        ruleset: camp.ruleset, rounds: camp.rounds, roundMinutes: camp.roundMinutes, limitKg: camp.limitKg,
+        date: camp.boutDate,
+        time: camp.boutTime,
+        timeZone: camp.boutZone,
+        place: camp.place,
+        opponent: camp.opponent,
+        ruleset: camp.ruleset,
+        rounds: camp.rounds,
+        roundMinutes: camp.roundMinutes,
+        limitKg: camp.limitKg,
       },
       weeks: camp.weeks,
       phases: camp.summary.phases,
       onHold: held.some(
-        (hold) => hold.athleteId === camp.athleteId && hold.fromDay <= today && (hold.toDay === null || hold.toDay >= today),
+        (hold) =>
+          hold.athleteId === camp.athleteId &&
+          hold.fromDay <= today &&
+          (hold.toDay === null || hold.toDay >= today),
       ),
       unplaced: camp.summary.unplaced.length,
       violations: camp.summary.violations.length,
@@ -49,10 +62,15 @@ export async function listCampSummaries(ctx: TeamContext): Promise<{ camps: Camp
   return { camps };
 }
 
-export async function listChanges(ctx: TeamContext, { params }: { params: Record<string, string> }): Promise<{ changes: ChangeView[] }> {
+export async function listChanges(
+  ctx: TeamContext,
+  { params }: { params: Record<string, string> },
+): Promise<{ changes: ChangeView[] }> {
   const camp = await loadCamp(ctx.db, ctx, params.id ?? "");
   const rows = await listRevisions(ctx.db, ctx.teamId, camp.row.id);
-  const putBack = new Map(rows.flatMap((row) => (row.putBackOf === null ? [] : [[row.putBackOf, row.number] as const])));
+  const putBack = new Map(
+    rows.flatMap((row) => (row.putBackOf === null ? [] : [[row.putBackOf, row.number] as const])),
+  );
   return {
     changes: rows.map((row) => ({
       number: row.number,

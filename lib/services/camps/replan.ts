@@ -20,10 +20,18 @@ export async function replan(tx: Tx, ctx: TeamContext, summary: string, athleteI
     const camp = await loadCamp(tx, ctx, id, { lock: true });
     if (boutIsOver(camp, ctx.now)) continue;
     const preview = previewEdit(camp, {}, instantOf(ctx.now));
-    if (!isPreview(preview)) throw new AppError("invalid", preview.problems[0]?.message ?? "A camp cannot be planned.", { errors: preview.problems });
+    if (!isPreview(preview))
+      throw new AppError("invalid", preview.problems[0]?.message ?? "A camp cannot be planned.", {
+        errors: preview.problems,
+      });
     const { lifts, sport, weeks, violations } = preview.knockOn;
     if (lifts.length + sport.length + weeks.length + violations.length === 0) continue;
-    await commitPreview(tx, ctx, camp, preview, { change: null, summary, idempotencyKey: randomUUID(), putBackOf: null });
+    await commitPreview(tx, ctx, camp, preview, {
+      change: null,
+      summary,
+      idempotencyKey: randomUUID(),
+      putBackOf: null,
+    });
     changed++;
   }
   return changed;
@@ -33,5 +41,9 @@ const boutIsOver = (camp: LoadedCamp, now: Date): boolean =>
   camp.sessions.some((session) => session.source === "bout" && session.startsAt <= now);
 
 /** After a hold was set or lifted. */
-export const replanAthlete = (tx: Tx, ctx: TeamContext, athleteId: string, summary: string): Promise<number> =>
-  replan(tx, ctx, summary, athleteId);
+export const replanAthlete = (
+  tx: Tx,
+  ctx: TeamContext,
+  athleteId: string,
+  summary: string,
+): Promise<number> => replan(tx, ctx, summary, athleteId);

@@ -1,7 +1,15 @@
 import { isDeepStrictEqual } from "node:util";
 import { findRevision, findRevisionByKey, listRevisions } from "@/db/queries/camps";
 import type { Tx } from "@/db/client";
-import { changeWords, isPreview, previewChange, previewEdit, putBackBase, putBackProblem, type PreviewResult } from "@/lib/book";
+import {
+  changeWords,
+  isPreview,
+  previewChange,
+  previewEdit,
+  putBackBase,
+  putBackProblem,
+  type PreviewResult,
+} from "@/lib/book";
 import { instantOf } from "@/lib/calendar/zones";
 import { AppError } from "@/lib/errors";
 import { CHANGE_ACTION, can } from "@/lib/policy";
@@ -28,11 +36,19 @@ export async function saveChange(
     }
     const earlier = await findRevisionByKey(tx, ctx.teamId, camp.row.id, body.idempotencyKey);
     if (earlier) {
-      return { revision: earlier.number, view: await viewOf(tx, ctx, camp), knockOn: earlier.knockOn ?? NOTHING, told: 0 };
+      return {
+        revision: earlier.number,
+        view: await viewOf(tx, ctx, camp),
+        knockOn: earlier.knockOn ?? NOTHING,
+        told: 0,
+      };
     }
     if (body.baseRevision !== camp.row.revision) throw await staleError(tx, ctx, camp, body.baseRevision);
     const { preview, putBackOf } = await previewOf(tx, ctx, camp, body.change);
-    if (!isPreview(preview)) throw new AppError("invalid", preview.problems[0]?.message ?? "This change cannot be made.", { errors: preview.problems });
+    if (!isPreview(preview))
+      throw new AppError("invalid", preview.problems[0]?.message ?? "This change cannot be made.", {
+        errors: preview.problems,
+      });
     if (isDeepStrictEqual(preview.book, camp.book)) {
       return { revision: camp.row.revision, view: await viewOf(tx, ctx, camp), knockOn: NOTHING, told: 0 };
     }
@@ -59,19 +75,40 @@ async function previewOf(
   if (!saved?.edit || !saved.inverse || !saved.knockOn || !saved.change) {
     return refused({ pointer: "/change/revision", message: "That revision cannot be put back." });
   }
-  const past = { edit: saved.edit, inverse: saved.inverse, knockOn: saved.knockOn, liftsBefore: saved.liftsBefore };
+  const past = {
+    edit: saved.edit,
+    inverse: saved.inverse,
+    knockOn: saved.knockOn,
+    liftsBefore: saved.liftsBefore,
+  };
   const problem = putBackProblem(camp.book, past);
   if (problem) return refused(problem);
-  return { preview: previewEdit(camp, past.inverse, now, putBackBase(camp.plan, past)), putBackOf: change.revision };
+  return {
+    preview: previewEdit(camp, past.inverse, now, putBackBase(camp.plan, past)),
+    putBackOf: change.revision,
+  };
 }
 
-const refused = (problem: { pointer: string; message: string }) => ({ preview: { problems: [problem] }, putBackOf: null });
+const refused = (problem: { pointer: string; message: string }) => ({
+  preview: { problems: [problem] },
+  putBackOf: null,
+});
 
-async function staleError(tx: Tx, ctx: TeamContext, camp: LoadedCamp, baseRevision: number): Promise<AppError> {
+async function staleError(
+  tx: Tx,
+  ctx: TeamContext,
+  camp: LoadedCamp,
+  baseRevision: number,
+): Promise<AppError> {
   const since = await listRevisions(tx, ctx.teamId, camp.row.id, baseRevision);
   return new AppError("stale", "Someone else changed this camp in the meantime.", {
     revision: camp.row.revision,
-    changes: since.map(({ number, by, at, summary }) => ({ number, by: by ?? "Someone who left the team", at: at.toISOString(), summary })),
+    changes: since.map(({ number, by, at, summary }) => ({
+      number,
+      by: by ?? "Someone who left the team",
+      at: at.toISOString(),
+      summary,
+    })),
     view: await viewOf(tx, ctx, camp),
   });
 }

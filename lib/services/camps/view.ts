@@ -13,9 +13,15 @@ import type { LoadedCamp } from "./load";
 const ACTIONS = Object.keys(POLICY) as Action[];
 
 /** Others whom a save of this camp may concern: athletes and guests only where the camp is theirs. */
-export async function othersOf(tx: Tx, ctx: TeamContext, athleteId: string): Promise<{ userId: string; role: Role }[]> {
+export async function othersOf(
+  tx: Tx,
+  ctx: TeamContext,
+  athleteId: string,
+): Promise<{ userId: string; role: Role }[]> {
   const members = await listMembersToTell(tx, ctx.teamId, ctx.userId);
-  return members.filter(({ role, athleteId: tied }) => (role !== "athlete" && role !== "guest") || tied === athleteId);
+  return members.filter(
+    ({ role, athleteId: tied }) => (role !== "athlete" && role !== "guest") || tied === athleteId,
+  );
 }
 
 /** Dates without numbers: what a guest gets. */
@@ -23,8 +29,24 @@ function withoutLiftingDetail(plan: Plan): Plan {
   const none = 0 as Au;
   return {
     ...plan,
-    lifts: plan.lifts.map((lift) => ({ ...lift, sets: 0, baseSets: 0, floorSets: 0, effort: 0, factors: [], reasons: [] })),
-    weeks: plan.weeks.map((week) => ({ ...week, sets: 0, sportLoad: none, liftingLoad: none, monotony: null, strain: null, loadCap: null })),
+    lifts: plan.lifts.map((lift) => ({
+      ...lift,
+      sets: 0,
+      baseSets: 0,
+      floorSets: 0,
+      effort: 0,
+      factors: [],
+      reasons: [],
+    })),
+    weeks: plan.weeks.map((week) => ({
+      ...week,
+      sets: 0,
+      sportLoad: none,
+      liftingLoad: none,
+      monotony: null,
+      strain: null,
+      loadCap: null,
+    })),
     days: plan.days.map((day) => ({ ...day, sets: 0, sport: none, lifting: none })),
     unplaced: [],
     violations: [],

@@ -1,7 +1,16 @@
 import { campSpan } from "@/lib/book";
 import { RecurrenceError, expandEntries } from "@/lib/calendar/recurrence";
 import { instantOf, offsetSteps } from "@/lib/calendar/zones";
-import { PlanInputError, dayFromIso, hhmm, instantAt, isoFromDay, minuteFromHhmm, plan, withOverrides } from "@/lib/engine";
+import {
+  PlanInputError,
+  dayFromIso,
+  hhmm,
+  instantAt,
+  isoFromDay,
+  minuteFromHhmm,
+  plan,
+  withOverrides,
+} from "@/lib/engine";
 import type { Day, Instant, Minute, Plan, PlanInput, SportSession, Weekday } from "@/lib/engine/types";
 import { AppError } from "@/lib/errors";
 import type { SportEntry } from "@/lib/schemas/camp-book";
@@ -35,13 +44,17 @@ function inputOf(request: PlanRequest, now: Date): PlanInput {
     venueFrom: to,
   });
   // One minute before midnight: a session at 00:00 of `today` is still ahead.
-  const asOf = request.today ? ((instantAt(zone, dayFromIso(request.today), 0 as Minute) - 1) as Instant) : instantOf(now);
+  const asOf = request.today
+    ? ((instantAt(zone, dayFromIso(request.today), 0 as Minute) - 1) as Instant)
+    : instantOf(now);
   return {
     now: asOf,
     zone,
     bout: { day: to, start: minuteFromHhmm(request.bout.time) },
     weeks: request.weeks,
-    weighIn: request.weighIn ? { day: dayFromIso(request.weighIn.date), start: minuteFromHhmm(request.weighIn.time) } : null,
+    weighIn: request.weighIn
+      ? { day: dayFromIso(request.weighIn.date), start: minuteFromHhmm(request.weighIn.time) }
+      : null,
     athlete: {
       ...request.athlete,
       freeHours: request.athlete.freeHours.map((hours) => ({
@@ -66,7 +79,11 @@ function inputOf(request: PlanRequest, now: Date): PlanInput {
 
 function answerOf(result: Plan, sport: readonly SportSession[]): PlanAnswer {
   return {
-    phases: result.phases.map(({ phase, from, to }) => ({ phase, from: isoFromDay(from), to: isoFromDay(to) })),
+    phases: result.phases.map(({ phase, from, to }) => ({
+      phase,
+      from: isoFromDay(from),
+      to: isoFromDay(to),
+    })),
     lifting: result.lifts.map((lift) => ({
       id: lift.id,
       week: lift.week,
@@ -91,8 +108,17 @@ function answerOf(result: Plan, sport: readonly SportSession[]): PlanAnswer {
       minutes: session.minutes,
       effort: session.effort,
     })),
-    unplaced: result.unplaced.map(({ item, week, rules }) => ({ item, week, rules: rules.map((rule) => ({ ...rule })) })),
-    violations: result.violations.map(({ rule, ids, day, text }) => ({ rule, ids: [...ids], date: isoFromDay(day), text })),
+    unplaced: result.unplaced.map(({ item, week, rules }) => ({
+      item,
+      week,
+      rules: rules.map((rule) => ({ ...rule })),
+    })),
+    violations: result.violations.map(({ rule, ids, day, text }) => ({
+      rule,
+      ids: [...ids],
+      date: isoFromDay(day),
+      text,
+    })),
     weeks: result.weeks.map((week) => ({
       weeksOut: week.weeksOut,
       phase: week.phase,
@@ -124,7 +150,9 @@ export async function layOut(request: PlanRequest, now: Date): Promise<PlanAnswe
     return answerOf(plan(input), input.sport);
   } catch (error) {
     if (error instanceof PlanInputError) {
-      throw new AppError("invalid", "This camp cannot be laid out.", { errors: error.problems.map(({ pointer, message }) => ({ pointer, message })) });
+      throw new AppError("invalid", "This camp cannot be laid out.", {
+        errors: error.problems.map(({ pointer, message }) => ({ pointer, message })),
+      });
     }
     if (error instanceof RecurrenceError) {
       throw new AppError("invalid", "This recurrence cannot be expanded.", {
