@@ -24,6 +24,8 @@ interface SessionChipProps extends ChipState {
   readonly title?: string;
   /** "18:00"; left out where the grid is too small for it. */
   readonly time?: string;
+  /** On a phone the mark stands alone; the words stay for screen readers. */
+  readonly markOnPhone?: boolean;
 }
 
 const Pin = () => (
@@ -33,7 +35,7 @@ const Pin = () => (
 );
 
 /** One session in a calendar cell: mark, title, time. Looks only; whoever places it makes it a button or draggable. */
-export function SessionChip({ look, title = look.label, time, ...state }: SessionChipProps) {
+export function SessionChip({ look, title = look.label, time, markOnPhone, ...state }: SessionChipProps) {
   return (
     <span
       className={classNames(
@@ -43,10 +45,13 @@ export function SessionChip({ look, title = look.label, time, ...state }: Sessio
         state.past && "saturate-50",
         (state.moved || state.marked) && "outline-2 outline-offset-1 outline-ink",
         state.held && "shadow-drag",
+        markOnPhone && "max-sm:min-h-control max-sm:justify-center max-sm:px-0",
       )}
     >
-      <KindMark mark={look.mark} size={9} />
-      <span className="min-w-0 flex-1 break-words hyphens-auto">
+      <KindMark mark={look.mark} size={9} className={markOnPhone ? "max-sm:size-3.5" : undefined} />
+      <span
+        className={classNames("min-w-0 flex-1 break-words hyphens-auto", markOnPhone && "max-sm:sr-only")}
+      >
         {title}
         {state.ghost ? <span className="sr-only">, stood here before</span> : null}
         {state.broken ? <span className="block font-semibold">breaks a rule</span> : null}
@@ -57,7 +62,7 @@ export function SessionChip({ look, title = look.label, time, ...state }: Sessio
           <span className="sr-only">pinned</span>
         </>
       ) : null}
-      {time ? <span className="shrink-0">{time}</span> : null}
+      {time ? <span className={classNames("shrink-0", markOnPhone && "max-sm:sr-only")}>{time}</span> : null}
     </span>
   );
 }
