@@ -17,6 +17,9 @@ export class UndeliverableError extends Error {
 const SIGNED =
   "From:To:Subject:Date:Message-ID:MIME-Version:Content-Type:Content-Transfer-Encoding:List-Id:List-Unsubscribe:List-Unsubscribe-Post:Auto-Submitted";
 
+/** One address and nothing else: nodemailer reads commas as further recipients, in values as well as in text. */
+const ONE_ADDRESS = /^[^\s@,;:<>()[\]"\\]+@[^\s@,;:<>()[\]"\\]+$/;
+
 /** Milliseconds. A server that hangs must not hold a worker: the job comes again. */
 const TIMEOUTS = {
   connectionTimeout: 10_000,
@@ -44,9 +47,9 @@ export function smtpSender(settings: MailSettings): SendMail {
   };
   const transport = createTransport(options);
   return async (mail) => {
+    if (!ONE_ADDRESS.test(mail.recipient)) throw new UndeliverableError("The recipient is no address.");
     try {
       await transport.sendMail({
-        // An address as a value, never parsed out of text: a comma in it makes no second recipient.
         from: settings.from,
         to: { name: "", address: mail.recipient },
         envelope: { from: settings.from.address, to: [mail.recipient] },

@@ -44,7 +44,10 @@ export async function mailbox() {
       return Promise.all(
         names.map(async (name) => {
           const source = await readFile(path.join(dir, name.replace(/json$/, "eml")));
-          const { envelope } = JSON.parse(await readFile(path.join(dir, name), "utf8")) as Pick<Caught, "envelope">;
+          const { envelope } = JSON.parse(await readFile(path.join(dir, name), "utf8")) as Pick<
+            Caught,
+            "envelope"
+          >;
           return { envelope, source: source.toString("latin1"), mail: await simpleParser(source) };
         }),
       );
@@ -53,7 +56,11 @@ export async function mailbox() {
 }
 
 /** What the jobs need, with the real SMTP transport. */
-export const mailDeps = ({ db }: Pick<TestDatabase, "db">, smtpUrl: string, now = () => new Date()): MailDeps => ({
+export const mailDeps = (
+  { db }: Pick<TestDatabase, "db">,
+  smtpUrl: string,
+  now = () => new Date(),
+): MailDeps => ({
   db,
   now,
   send: smtpSender({ ...mailSettings(), smtpUrl }),
@@ -61,7 +68,14 @@ export const mailDeps = ({ db }: Pick<TestDatabase, "db">, smtpUrl: string, now 
 
 /** Runs every job that is due, one worker, to the end. */
 export const runDueJobs = (url: string, deps: MailDeps) =>
-  runOnce({ connectionString: url, taskList: mailTasks(deps), preset: WORKER_PRESET, noHandleSignals: true, logger: queueLogger, parsedCronItems: [] });
+  runOnce({
+    connectionString: url,
+    taskList: mailTasks(deps),
+    preset: WORKER_PRESET,
+    noHandleSignals: true,
+    logger: queueLogger,
+    parsedCronItems: [],
+  });
 
 /** Time passes for the queue: everything that waits is due now. */
 export const makeJobsDue = async ({ sql }: Pick<TestDatabase, "sql">): Promise<void> => {

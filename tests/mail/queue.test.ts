@@ -95,7 +95,8 @@ describe("a mail server that is down", () => {
     const server = new SMTPServer({
       authOptional: true,
       disabledCommands: ["AUTH", "STARTTLS"],
-      onRcptTo: (_address, _session, done) => done(Object.assign(new Error("No such user"), { responseCode: 550 })),
+      onRcptTo: (_address, _session, done) =>
+        done(Object.assign(new Error("No such user"), { responseCode: 550 })),
     });
     await new Promise<void>((resolve) => server.listen(0, "127.0.0.1", resolve));
     const address = server.server.address();
@@ -155,18 +156,24 @@ describe("several processes on one database", () => {
 describe("what a mail is made of", () => {
   it("keeps non-ASCII whole in subject, text and HTML", async () => {
     const subject = "Čarobnjak Žnidaršić: тренировка, 稽古";
-    await db.transaction((tx) => queueMail(tx, letter({ subject, text: "Đurđa → šprint", html: "<p>Đurđa → šprint</p>" })));
+    await db.transaction((tx) =>
+      queueMail(tx, letter({ subject, text: "Đurđa → šprint", html: "<p>Đurđa → šprint</p>" })),
+    );
     await runDueJobs(url, deps);
     const caught = (await box.caught()).find(({ mail }) => mail.subject === subject);
     expect(caught?.mail.text).toContain("Đurđa → šprint");
     expect(caught?.mail.html).toContain("Đurđa → šprint");
     // RFC 5322 2.2 and 2.1.1: headers are ASCII, no line above 998 octets.
     expect(caught?.source.split("\r\n\r\n")[0]).toMatch(/^[\x00-\x7f]*$/);
-    expect(Math.max(...(caught?.source.split("\r\n").map((line) => line.length) ?? [Infinity]))).toBeLessThanOrEqual(998);
+    expect(
+      Math.max(...(caught?.source.split("\r\n").map((line) => line.length) ?? [Infinity])),
+    ).toBeLessThanOrEqual(998);
   });
 
   it("line breaks in a subject begin no header", async () => {
-    await db.transaction((tx) => queueMail(tx, letter({ subject: "Pads\r\nBcc: all@gym.example\r\n\r\nHello\u2028there" })));
+    await db.transaction((tx) =>
+      queueMail(tx, letter({ subject: "Pads\r\nBcc: all@gym.example\r\n\r\nHello\u2028there" })),
+    );
     await runDueJobs(url, deps);
     const caught = (await box.caught()).find(({ mail }) => mail.subject?.startsWith("Pads"));
     expect(caught?.mail.subject).toBe("Pads Bcc: all@gym.example Hello there");
@@ -175,8 +182,12 @@ describe("what a mail is made of", () => {
   });
 
   it("an address with a comma or a line break reaches nobody else", async () => {
-    await db.transaction((tx) => queueMail(tx, letter({ key: "comma", to: "ines@gym.example, spy@gym.example" })));
-    await db.transaction((tx) => queueMail(tx, letter({ key: "break", to: "ines@gym.example\r\nRCPT TO:<spy@gym.example>" })));
+    await db.transaction((tx) =>
+      queueMail(tx, letter({ key: "comma", to: "ines@gym.example, spy@gym.example" })),
+    );
+    await db.transaction((tx) =>
+      queueMail(tx, letter({ key: "break", to: "ines@gym.example\r\nRCPT TO:<spy@gym.example>" })),
+    );
     await runDueJobs(url, deps);
     const states = await db.select({ status: mails.status }).from(mails);
     expect(states).toEqual([{ status: "failed" }, { status: "failed" }]);

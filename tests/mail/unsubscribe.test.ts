@@ -24,7 +24,8 @@ const multipart = () => {
 };
 const choiceOf = async (id: string) => (await db.select().from(users).where(eq(users.id, id)))[0]?.mailChoice;
 const reset = () => db.update(users).set({ mailChoice: "each" });
-const post = (token: string, init: RequestInit) => oneClickUnsubscribe(db, token, new Request(address(token), init));
+const post = (token: string, init: RequestInit) =>
+  oneClickUnsubscribe(db, token, new Request(address(token), init));
 
 describe("one click (RFC 8058 section 3.2)", () => {
   it.each([
@@ -47,7 +48,14 @@ describe("one click (RFC 8058 section 3.2)", () => {
   it.each([
     ["another body", urlencoded("hello=there")],
     ["no body", { method: "POST" }],
-    ["JSON", { method: "POST", body: '{"List-Unsubscribe":"One-Click"}', headers: { "Content-Type": "application/json" } }],
+    [
+      "JSON",
+      {
+        method: "POST",
+        body: '{"List-Unsubscribe":"One-Click"}',
+        headers: { "Content-Type": "application/json" },
+      },
+    ],
   ])("changes nothing with %s", async (_name, init) => {
     await reset();
     expect((await post(unsubscribeToken(userId), init)).status).toBe(400);
@@ -64,7 +72,13 @@ describe("the token", () => {
     await reset();
     const mine = Buffer.from(unsubscribeToken(userId), "base64url");
     const theirs = Buffer.concat([Buffer.from(other.replaceAll("-", ""), "hex"), mine.subarray(16)]);
-    const bad = [theirs.toString("base64url"), unsubscribeToken(userId).slice(0, -1), "", "x", "A".repeat(64)];
+    const bad = [
+      theirs.toString("base64url"),
+      unsubscribeToken(userId).slice(0, -1),
+      "",
+      "x",
+      "A".repeat(64),
+    ];
     for (const token of bad) {
       expect(readUnsubscribeToken(token)).toBeNull();
       expect((await post(token, multipart())).status).toBe(404);
