@@ -1,5 +1,6 @@
 // Plain Node, no dependency: one running Bellward a checkout, remembered in .data/run.json.
 import { existsSync, readFileSync, rmSync } from "node:fs";
+import { setTimeout as pause } from "node:timers/promises";
 import { isAlive, portIsFree } from "../../db/server-ports.mjs";
 import { killGroup, SetupError } from "./command.mjs";
 import { inData, writeWhole } from "./project.mjs";
@@ -31,13 +32,17 @@ export function runningInstance() {
 }
 
 /** Refuses a second start of one checkout, and ends what a killed one left behind. */
-export function claimInstance(address) {
+export async function claimInstance(address) {
   const run = remembered();
   if (run && isStill(run))
     throw new SetupError(
       `already started from here: ${run.address} (process ${run.pid}); stop that one first`,
     );
-  for (const child of run?.children ?? []) if (isStill(child)) killGroup(child.pid, "SIGKILL");
+  for (const child of run?.children ?? []) {
+    if (isStill(child)) killGroup(child.pid, "SIGKILL");
+    // Its port is free only when it is gone.
+    while (isStill(child)) await pause(20);
+  }
   rememberInstance(address, []);
 }
 

@@ -25,28 +25,33 @@ function takeDown() {
   return stopping;
 }
 
-function stopOnSignals() {
-  for (const [signal, code] of [
-    ["SIGINT", 130],
-    ["SIGTERM", 143],
-    ["SIGHUP", 129],
-  ]) {
-    process.on(signal, () => {
-      if (stopping) return;
-      say("\nStopping …");
-      void takeDown().then(
-        () => (say("Stopped."), process.exit(signal === "SIGINT" ? 0 : code)),
-        (error) => (console.error(`bellward: ${explain(String(error.message))}`), process.exit(1)),
-      );
-    });
-  }
+function stopAndExit(code) {
+  if (stopping) return;
+  say("\nStopping …");
+  void takeDown().then(
+    () => {
+      say("Stopped.");
+      process.exit(code);
+    },
+    (error) => {
+      console.error(`bellward: ${explain(String(error.message))}`);
+      process.exit(1);
+    },
+  );
+}
+
+function stopWhenTold() {
+  process.on("SIGINT", () => stopAndExit(0));
+  process.on("SIGTERM", () => stopAndExit(143));
+  process.on("SIGHUP", () => stopAndExit(129));
+  // npm passes SIGTERM to its shell, and that dies without telling us: losing the shell means being told.
+  const { ppid } = process;
+  if (process.env.npm_lifecycle_event)
+    setInterval(() => process.ppid !== ppid && stopAndExit(143), 500).unref();
 }
 
 /** Settings of the server: what the environment gives, and a local stand-in for the rest. */
 async function settings(address, databaseUrl) {
-  const external = Boolean(process.env.SMTP_URL);
-  if (external && !process.env.MAIL_FROM)
-    throw new SetupError("SMTP_URL is set, but MAIL_FROM (the sender of the mails) is not");
   const nextAuthUrl = process.env.NEXTAUTH_URL || address;
   const env = {
     DATABASE_URL: databaseUrl,
@@ -55,7 +60,7 @@ async function settings(address, databaseUrl) {
     NEXTAUTH_SECRET: process.env.NEXTAUTH_SECRET || localSecret(),
     MAIL_FROM: process.env.MAIL_FROM || "Bellward <bellward@localhost>",
   };
-  if (external) return env;
+  if (process.env.SMTP_URL) return env;
   const { startCatcher } = await import("./stack.mjs");
   const outbox = inData("outbox");
   const catcher = await startCatcher(outbox, (child) => children.push(child));
@@ -94,10 +99,12 @@ async function main() {
   readDotEnv();
   const port = wantedPort();
   const address = `http://127.0.0.1:${port}`;
+  if (process.env.SMTP_URL && !process.env.MAIL_FROM)
+    throw new SetupError("SMTP_URL is set, but MAIL_FROM (the sender of the mails) is not");
   makeDataFolder();
-  claimInstance(address);
+  await claimInstance(address);
   ownsInstance = true;
-  stopOnSignals();
+  stopWhenTold();
   await refuseTakenPort(port);
   await ensurePackages();
   const { url, accounts } = await readyDatabase();
