@@ -39,7 +39,7 @@ export function SessionChip({ look, title = look.label, time, markOnPhone, ...st
   return (
     <span
       className={classNames(
-        "flex w-full items-center gap-1.5 rounded border px-1.5 py-[3px] text-left text-2xs leading-tight",
+        "flex w-full items-center gap-1.5 rounded border px-1.5 py-[3px] text-left text-xs leading-tight",
         state.ghost ? "border-dashed border-ink bg-transparent text-ink opacity-60" : look.chip,
         // No opacity: what is past must stay readable; its day is hatched besides.
         state.past && "saturate-50",

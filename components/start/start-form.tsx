@@ -75,7 +75,7 @@ export function StartForm({ params, problems, onChange, zone, weeksGone }: Start
           onChange={(e) => onChange({ lifts: Number(e.target.value) })}
         />
       </Field>
-      <Field label="Has been lifting for">
+      <Field label="Training age">
         <Select
           name="age"
           choices={AGE_CHOICES}

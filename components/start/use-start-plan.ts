@@ -2,6 +2,7 @@
 
 import { useMemo, useState } from "react";
 import { startInput } from "@/lib/book/start-camp";
+import { civilNow, dateOf } from "@/lib/calendar/zones";
 import { dayFromIso, inputProblems, isoFromDay, plan } from "@/lib/engine";
 import type { Day, Instant, Plan, PlanInput } from "@/lib/engine/types";
 import type { StartParams } from "@/lib/schemas/start-params";
@@ -24,17 +25,6 @@ const FIELD_OF_POINTER: readonly (readonly [string, keyof StartParams])[] = [
   ["/athlete/liftsPerWeek", "lifts"],
   ["/athlete/freeHours", "to"],
 ];
-
-/** The civil day of an instant in a zone. */
-function dayIn(zone: string, now: Instant): Day {
-  const parts = new Intl.DateTimeFormat("en-CA", {
-    timeZone: zone,
-    year: "numeric",
-    month: "2-digit",
-    day: "2-digit",
-  });
-  return dayFromIso(parts.format(new Date(now * 60_000)));
-}
 
 const exists = (date: string): boolean =>
   /^\d{4}-\d{2}-\d{2}$/.test(date) && isoFromDay(dayFromIso(date)) === date;
@@ -61,7 +51,7 @@ export function layOut(params: StartParams, zone: string, now: Instant): LaidOut
   const input = startInput(params, zone, now);
   const found = inputProblems(input);
   if (found.length === 0)
-    return { camp: { input, plan: plan(input), today: dayIn(zone, now) }, problems: {} };
+    return { camp: { input, plan: plan(input), today: civilNow(zone, dateOf(now)).day }, problems: {} };
   const problems: StartProblems = {};
   for (const problem of found) {
     const field = FIELD_OF_POINTER.find(([pointer]) => problem.pointer.startsWith(pointer))?.[1] ?? "date";

@@ -11,9 +11,9 @@ export const BASE_WORDS: Record<StrikingBase, string> = {
 };
 
 export const AGE_WORDS: Record<TrainingAge, string> = {
-  novice: "New to lifting",
-  intermediate: "One to three years",
-  advanced: "More than three years",
+  novice: "Novice",
+  intermediate: "Intermediate",
+  advanced: "Advanced",
 };
 
 const WEIGH_IN_WORDS: Record<WeighInDay, string> = {

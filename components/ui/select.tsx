@@ -21,7 +21,11 @@ export function Select({ choices, children, className, required, ...rest }: Sele
   const wiring = useFieldWiring({ required, ...rest });
   return (
     <span className="relative block">
-      <select {...rest} {...wiring} className={classNames(CONTROL_LOOK, "appearance-none pr-9", className)}>
+      <select
+        {...rest}
+        {...wiring}
+        className={classNames(CONTROL_LOOK, "appearance-none pr-7 pl-2.5", className)}
+      >
         {choices
           ? choices.map((choice) => (
               <option key={choice.value} value={choice.value}>
@@ -30,7 +34,7 @@ export function Select({ choices, children, className, required, ...rest }: Sele
             ))
           : children}
       </select>
-      <ChevronDown className="pointer-events-none absolute top-1/2 right-3 -translate-y-1/2" />
+      <ChevronDown className="pointer-events-none absolute top-1/2 right-2.5 -translate-y-1/2" />
     </span>
   );
 }

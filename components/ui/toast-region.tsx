@@ -25,6 +25,18 @@ export function ToastRegion() {
           )}
         >
           <p className="py-1">{toast.text}</p>
+          {toast.action ? (
+            <button
+              type="button"
+              onClick={() => {
+                closeToast(toast.id);
+                toast.action?.run();
+              }}
+              className="min-h-control-small rounded px-2 font-semibold underline underline-offset-4"
+            >
+              {toast.action.label}
+            </button>
+          ) : null}
           <button
             type="button"
             aria-label="Close this message"

@@ -2,6 +2,8 @@ export interface Toast {
   readonly id: number;
   readonly text: string;
   readonly tone: "done" | "error";
+  /** One act that follows from what was said: "Put back". */
+  readonly action?: { readonly label: string; readonly run: () => void };
 }
 
 /** Long enough to read two lines twice; an error stays until it is closed. */
@@ -29,8 +31,12 @@ export function closeToast(id: number): void {
 }
 
 /** Says in a corner of the page, and to screen readers, that something worked or failed. */
-export function showToast(text: string, tone: Toast["tone"] = "done"): void {
+export function showToast(
+  text: string,
+  { tone = "done", action }: { readonly tone?: Toast["tone"]; readonly action?: Toast["action"] } = {},
+): void {
   const id = ++last;
-  set([...toasts, { id, text, tone }]);
-  if (tone === "done") setTimeout(() => closeToast(id), SHOWN_MS);
+  set([...toasts, { id, text, tone, ...(action && { action }) }]);
+  // What can be acted on stays twice as long.
+  if (tone === "done") setTimeout(() => closeToast(id), action ? 2 * SHOWN_MS : SHOWN_MS);
 }
