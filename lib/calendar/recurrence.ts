@@ -1,145 +1,196 @@
-import { RRule } from "rrule";
-import { dayFromIso, hhmm, isoFromDay, minuteFromHhmm } from "@/lib/engine/geometry";
-import type { Day, Minute, SportSession } from "@/lib/engine/types";
+import { dayFromIso, isoFromDay, minuteFromHhmm } from "@/lib/engine";
+import type { Day, SportSession } from "@/lib/engine/types";
 import type { SportEntry } from "@/lib/schemas/camp-book";
+import { allowance, occurrences, type Allowance, type Rule } from "./occurrences";
+import { MOST_OCCURRENCES, TOO_MANY, readRule, ruleText, untilMs, type RuleParts } from "./rrule-text";
 
-/** Most occurrences of one timetable over a camp. */
-export const MOST_OCCURRENCES = 2000;
+/** The part of an entry that says when it takes place. */
+type Timed = Pick<SportEntry, "start" | "rrule" | "exdate">;
 
-const DAY_MS = 86_400_000;
-/** Candidates looked at before a rule that never yields is given up. */
-const MOST_STEPS = 20_000;
-const FREQUENCIES = new Set([RRule.DAILY, RRule.WEEKLY, RRule.MONTHLY, RRule.YEARLY]);
-
-/** A recurrence that cannot be expanded. `entryIndex` counts in the list that was given. */
+/** A recurrence that cannot be expanded: which entry, which of its fields, and why in a coach's words. */
 export class RecurrenceError extends Error {
   constructor(
-    message: string,
+    readonly entryIndex: number,
     readonly pointerField: "rrule" | "exdate" | "start",
-    readonly entryIndex = 0,
+    message: string,
   ) {
     super(message);
     this.name = "RecurrenceError";
   }
 }
 
-// rrule works on UTC fields: wall-clock times go in as if they were UTC and come out the same way.
-const asUtc = (local: string): Date => new Date(`${local}:00Z`);
-const localOf = (date: Date): string => date.toISOString().slice(0, 16);
-const dateOfDay = (day: Day, minute = 0): Date => new Date(day * DAY_MS + minute * 60_000);
+const LOCAL = /^(\d{4}-\d{2}-\d{2})T(\d{2}:\d{2})$/;
+/** A rule without an occurrence for so long has none: 29 February is at most 8 years away. */
+const SEARCH_DAYS = 9 * 366;
 
-function ruleOf(entry: SportEntry, rrule: string): RRule {
-  let rule: RRule;
+function dayOf(local: string, field: "start" | "exdate", index: number): Day {
+  const parts = LOCAL.exec(local);
   try {
-    // UNTIL is read as wall-clock time of the entry, whatever its suffix.
-    rule = new RRule({ ...RRule.parseString(rrule), dtstart: asUtc(entry.start) });
+    if (parts?.[1] && parts[2]) {
+      minuteFromHhmm(parts[2]);
+      return dayFromIso(parts[1]);
+    }
   } catch {
-    throw new RecurrenceError("This is not an RRULE of RFC 5545.", "rrule");
+    // Falls through to the refusal below.
   }
-  if (!FREQUENCIES.has(rule.options.freq))
-    throw new RecurrenceError("Recurrences are daily, weekly, monthly or yearly.", "rrule");
-  if (
-    [rule.options.byhour, rule.options.byminute, rule.options.bysecond].some(
-      (list) => Array.isArray(list) && list.length > 1,
-    )
-  ) {
-    throw new RecurrenceError("A recurrence keeps one time of day.", "rrule");
-  }
-  return rule;
+  throw new RecurrenceError(index, field, "Give a local date and time as YYYY-MM-DDTHH:MM.");
 }
 
-/** Local starts of a recurring entry from one day to another, both inclusive. */
-function startsOf(entry: SportEntry, rrule: string, from: Day, to: Day): string[] {
-  const rule = ruleOf(entry, rrule);
-  const out = new Set(entry.exdate);
-  const starts: string[] = [];
-  let steps = 0;
-  rule.between(dateOfDay(from), dateOfDay(to, 1439), true, (date) => {
-    const local = localOf(date);
-    if (!out.has(local)) starts.push(local);
-    return ++steps <= MOST_STEPS && starts.length <= MOST_OCCURRENCES;
-  });
-  if (starts.length > MOST_OCCURRENCES)
-    throw new RecurrenceError(`More than ${MOST_OCCURRENCES} occurrences.`, "rrule");
-  return starts;
-}
-
-function sessionAt(entry: SportEntry, local: string): SportSession {
-  const day = dayFromIso(local.slice(0, 10));
+function ruleOf(entry: Timed, rrule: string, index: number): Rule {
+  const parts = readRule(rrule, entry.start);
+  if ("problem" in parts) throw new RecurrenceError(index, "rrule", parts.problem);
+  const until = parts.get("UNTIL");
   return {
-    id: entry.rrule === null ? entry.id : `${entry.series}@${isoFromDay((day - entry.idShift) as Day)}`,
-    kind: entry.kind,
-    title: entry.title,
-    day,
-    start: minuteFromHhmm(local.slice(11)),
-    minutes: entry.minutes,
-    effort: entry.effort,
+    parts,
+    start: entry.start,
+    startDay: dayOf(entry.start, "start", index),
+    until: until === undefined ? null : untilMs(until),
   };
 }
 
-const byTime = (a: SportSession, b: SportSession): number =>
+/** Days on which the rule falls, exceptions not yet taken out. */
+function ruleDays(rule: Rule, from: Day, to: Day, index: number, left: Allowance): Day[] {
+  const days = occurrences(rule, from, to, left);
+  if (days.length === 0 && rule.until === null) {
+    // Outside the window is no mistake; nowhere at all is one.
+    const ever = occurrences(rule, rule.startDay, (rule.startDay + SEARCH_DAYS) as Day, left, 1);
+    if (ever.length === 0 && left.periods > 0)
+      throw new RecurrenceError(index, "rrule", "This recurrence never falls on any day.");
+  }
+  if (left.periods <= 0)
+    throw new RecurrenceError(
+      index,
+      "start",
+      "This recurrence starts too long before the camp to be worked out.",
+    );
+  return days;
+}
+
+function daysOf(entry: Timed, from: Day, to: Day, index: number, left: Allowance): Day[] {
+  const first = dayOf(entry.start, "start", index);
+  const without = new Set(entry.exdate.map((date) => (dayOf(date, "exdate", index), date)));
+  const all =
+    entry.rrule === null
+      ? [first].filter((day) => day >= from && day <= to)
+      : ruleDays(ruleOf(entry, entry.rrule, index), from, to, index, left);
+  const time = entry.start.slice(10);
+  return all.filter((day) => !without.has(`${isoFromDay(day)}${time}`));
+}
+
+/**
+ * Days from `from` to `to`, both inclusive, on which an entry takes place, in order. Wall-clock days: no time zone is
+ * asked. Throws `RecurrenceError` (index 0) for a recurrence that cannot be expanded.
+ */
+export const occurrenceDays = (entry: Timed, from: Day, to: Day): Day[] =>
+  daysOf(entry, from, to, 0, allowance());
+
+// Entries are values that nobody changes, so that one worked out for a window stays worked out: a preview expands the
+// whole book again and again while a session is dragged.
+const expanded = new WeakMap<
+  SportEntry,
+  { readonly window: string; readonly sessions: readonly SportSession[] }
+>();
+
+function sessionsOf(
+  entry: SportEntry,
+  from: Day,
+  to: Day,
+  index: number,
+  left: Allowance,
+): readonly SportSession[] {
+  const window = `${from} ${to}`;
+  const known = expanded.get(entry);
+  if (known?.window === window) return known.sessions;
+  const { kind, title, minutes, effort } = entry;
+  const sessions = daysOf(entry, from, to, index, left).map((day): SportSession => ({
+    id: entry.rrule === null ? entry.id : `${entry.series}@${isoFromDay((day - entry.idShift) as Day)}`,
+    kind,
+    title,
+    day,
+    start: minuteFromHhmm(entry.start.slice(11)),
+    minutes,
+    effort,
+  }));
+  expanded.set(entry, { window, sessions });
+  return sessions;
+}
+
+const inOrder = (a: SportSession, b: SportSession): number =>
   a.day - b.day || a.start - b.start || (a.id < b.id ? -1 : a.id > b.id ? 1 : 0);
 
 /**
- * Dated sessions of a timetable from one day to another, both inclusive, sorted by day, start and id. Wall-clock times stay
- * the same across daylight-saving changes. Throws `RecurrenceError`.
+ * All sessions of a timetable from `from` to `to`, both inclusive, sorted by day, start and id. Recurrences are expanded on
+ * the wall clock, so that 18:00 stays 18:00 across a daylight-saving change. A recurrence without an end is bounded by the
+ * window. Throws `RecurrenceError` for one that is invalid, finer than daily, never falls on a day, or brings the whole
+ * above 2,000 sessions.
  */
 export function expandEntries(entries: readonly SportEntry[], from: Day, to: Day): SportSession[] {
+  const left = allowance();
   const sessions: SportSession[] = [];
-  entries.forEach((entry, entryIndex) => {
-    try {
-      if (entry.rrule !== null) {
-        for (const local of startsOf(entry, entry.rrule, from, to)) sessions.push(sessionAt(entry, local));
-        return;
-      }
-      const day = dayFromIso(entry.start.slice(0, 10));
-      if (day >= from && day <= to) sessions.push(sessionAt(entry, entry.start));
-    } catch (error) {
-      if (error instanceof RecurrenceError)
-        throw new RecurrenceError(error.message, error.pointerField, entryIndex);
-      throw error;
-    }
+  entries.forEach((entry, index) => {
+    sessions.push(...sessionsOf(entry, from, to, index, left));
+    if (sessions.length > MOST_OCCURRENCES) throw new RecurrenceError(index, "rrule", TOO_MANY);
   });
-  if (sessions.length > MOST_OCCURRENCES)
-    throw new RecurrenceError(`More than ${MOST_OCCURRENCES} sessions in one camp.`, "rrule");
-  return sessions.sort(byTime);
+  return sessions.sort(inOrder);
 }
 
-const partsOf = (rrule: string): string[] => rrule.split(";").filter((part) => part !== "");
-const without = (rrule: string, names: readonly string[]): string[] =>
-  partsOf(rrule).filter((part) => !names.includes((part.split("=")[0] ?? "").toUpperCase()));
+const partsOf = (entry: Timed, rrule: string): { rule: Rule; parts: Map<string, string> } => {
+  const rule = ruleOf(entry, rrule, 0);
+  return { rule, parts: new Map(rule.parts) };
+};
 
-/** The series cut before a date: its last occurrence is on an earlier day. `date` is `YYYY-MM-DD`. */
+/** Occurrences, exceptions included, from the start of the series up to the day before `day`. */
+const countBefore = (rule: Rule, day: Day): number =>
+  occurrences(rule, rule.startDay, (day - 1) as Day, allowance()).length;
+
+const withRule = (entry: SportEntry, parts: RuleParts, exdate: string[]): SportEntry => ({
+  ...entry,
+  rrule: ruleText(parts),
+  exdate,
+});
+
+/**
+ * The series up to the day before `date` (YYYY-MM-DD). A COUNT that ends it earlier stays; any later end becomes an UNTIL.
+ * A single entry is given back as it is.
+ */
 export function endBefore(entry: SportEntry, date: string): SportEntry {
   if (entry.rrule === null) return entry;
-  const last = isoFromDay((dayFromIso(date) - 1) as Day).replaceAll("-", "");
-  return {
-    ...entry,
-    rrule: [...without(entry.rrule, ["UNTIL", "COUNT"]), `UNTIL=${last}T235900Z`].join(";"),
-    exdate: entry.exdate.filter((local) => local.slice(0, 10) < date),
-  };
-}
-
-/** The rest of a series from a date on, under a new id; a COUNT becomes what remains of it. */
-export function startFrom(entry: SportEntry, firstDate: string, newId: string): SportEntry {
-  if (entry.rrule === null) return entry;
-  const rule = ruleOf(entry, entry.rrule);
-  const next = rule.after(dateOfDay(dayFromIso(firstDate)), true);
-  if (!next) throw new RecurrenceError("The series has ended by that day.", "rrule");
-  const { count } = rule.options;
-  let rrule = entry.rrule;
-  if (count !== null && count !== undefined) {
-    const gone = rule.all((date) => date < next).filter((date) => date < next).length;
-    rrule = [...without(entry.rrule, ["COUNT"]), `COUNT=${count - gone}`].join(";");
+  const day = dayFromIso(date);
+  const { rule, parts } = partsOf(entry, entry.rrule);
+  const count = Number(parts.get("COUNT") ?? Infinity);
+  const cut = `${isoFromDay((day - 1) as Day).replaceAll("-", "")}T235959`;
+  if (countBefore(rule, day) < count && (rule.until === null || rule.until > untilMs(cut))) {
+    parts.delete("COUNT");
+    parts.set("UNTIL", cut);
   }
-  return {
-    ...entry,
-    id: newId,
-    start: localOf(next),
-    rrule,
-    exdate: entry.exdate.filter((local) => local.slice(0, 10) >= firstDate),
-  };
+  return withRule(
+    entry,
+    parts,
+    entry.exdate.filter((exception) => exception < date),
+  );
 }
 
-/** Wall-clock start of a dated session, as entries write it. */
-export const localStart = (day: Day, start: Minute): string => `${isoFromDay(day)}T${hhmm(start)}`;
+/**
+ * The rest of a series from `firstDate` (YYYY-MM-DD) on, as an entry of its own with `newId`: it starts at the first
+ * occurrence that remains, and a COUNT becomes what remains of it. Throws `RecurrenceError` where nothing remains.
+ */
+export function startFrom(entry: SportEntry, firstDate: string, newId: string): SportEntry {
+  if (entry.rrule === null) return { ...entry, id: newId };
+  const day = dayFromIso(firstDate);
+  const { rule, parts } = partsOf(entry, entry.rrule);
+  const [first] = occurrences(rule, day, (day + SEARCH_DAYS) as Day, allowance(), 1);
+  if (first === undefined)
+    throw new RecurrenceError(0, "start", "Nothing of this recurrence remains from that day on.");
+  const count = parts.get("COUNT");
+  if (count !== undefined) parts.set("COUNT", String(Number(count) - countBefore(rule, day)));
+  const start = `${isoFromDay(first)}${entry.start.slice(10)}`;
+  return {
+    ...withRule(
+      entry,
+      parts,
+      entry.exdate.filter((exception) => exception >= firstDate),
+    ),
+    id: newId,
+    start,
+  };
+}
