@@ -1,5 +1,4 @@
 import { tzOffset } from "@date-fns/tz/tzOffset";
-import { MINUTES_A_DAY } from "@/lib/engine";
 import type { Day, Instant, Minute, OffsetStep } from "@/lib/engine/types";
 
 /**
@@ -7,6 +6,7 @@ import type { Day, Instant, Minute, OffsetStep } from "@/lib/engine/types";
  * through `Intl`, which is slow, so that transitions are found once a zone and block of days and kept.
  */
 
+const DAY_MINUTES = 1440;
 const MINUTE_MS = 60_000;
 const DAY_MS = 86_400_000;
 /** Days measured at once; a camp of 20 weeks meets three blocks. */
@@ -72,7 +72,7 @@ function stepsOf(zone: string, from: Day, to: Day): OffsetStep[] {
   const last = Math.floor((to + 2) / BLOCK_DAYS);
   const steps: OffsetStep[] = [];
   let before = blockOf(zone, first).offset;
-  steps.push({ from: first * BLOCK_DAYS * MINUTES_A_DAY + before, offset: before });
+  steps.push({ from: first * BLOCK_DAYS * DAY_MINUTES + before, offset: before });
   for (let index = first; index <= last; index++) {
     for (const { at, offset } of blockOf(zone, index).changes) {
       // The later of the two wall readings: before it the old offset holds, in the gap as in the overlap.
@@ -99,8 +99,8 @@ export function offsetSteps(span: {
   readonly venueFrom: Day;
 }): OffsetStep[] {
   const { homeZone, venueZone, from, to, venueFrom } = span;
-  const start = from * MINUTES_A_DAY;
-  const change = venueFrom * MINUTES_A_DAY;
+  const start = from * DAY_MINUTES;
+  const change = venueFrom * DAY_MINUTES;
   const home = stepsOf(homeZone, from, to);
   const venue = homeZone === venueZone ? home : stepsOf(venueZone, from, to);
   const lived = [
@@ -110,7 +110,7 @@ export function offsetSteps(span: {
     ...venue.filter((step) => step.from > Math.max(start, change)),
   ];
   return lived.filter(
-    (step, index) => step.offset !== lived[index - 1]?.offset && step.from < (to + 1) * MINUTES_A_DAY,
+    (step, index) => step.offset !== lived[index - 1]?.offset && step.from < (to + 1) * DAY_MINUTES,
   );
 }
 
@@ -128,6 +128,6 @@ export const dateOf = (instant: Instant): Date => new Date(instant * MINUTE_MS);
 /** What calendar and clock on the wall of `zone` show at `now`. */
 export function civilNow(zone: string, now: Date): { day: Day; minute: Minute } {
   const civil = instantOf(now) + offsetAt(zone, now.getTime());
-  const day = Math.floor(civil / MINUTES_A_DAY);
-  return { day: day as Day, minute: (civil - day * MINUTES_A_DAY) as Minute };
+  const day = Math.floor(civil / DAY_MINUTES);
+  return { day: day as Day, minute: (civil - day * DAY_MINUTES) as Minute };
 }
