@@ -50,10 +50,10 @@ function moveText(was: Place | null, is: Place | null, context: LineContext, gon
   return from ? `${gone}: was ${from}` : gone;
 }
 
-const setsText = (before: number | null | undefined, after: number | null | undefined): string | null => {
-  if (before != null && after != null)
-    return before === after ? `${after} sets, as before` : `${before} → ${after} sets`;
-  return after != null ? `${after} sets` : null;
+const setsText = (before: number | null, after: number | null): string | null => {
+  if (after === null) return null;
+  if (before === null) return `${after} sets`;
+  return before === after ? `${after} sets, as before` : `${before} → ${after} sets`;
 };
 
 function liftLine(lift: NetLift, context: LineContext): ChangeLine {
@@ -66,7 +66,7 @@ function liftLine(lift: NetLift, context: LineContext): ChangeLine {
       context,
       lift.unplaced ? "Finds no place" : "Taken out",
     ),
-    sets: context.detail ? setsText(lift.before?.sets, lift.after?.sets) : null,
+    sets: context.detail ? setsText(lift.before?.sets ?? null, lift.after?.sets ?? null) : null,
     why: context.detail ? lift.because.map((reason) => reason.text) : [],
   };
 }

@@ -18,10 +18,34 @@ const page = (status: number, title: string, text: string): Response => {
   });
 };
 
+/** Bytes; the body that is meant has about 200 with its multipart frame. Anyone can post here. */
+const MOST_BYTES = 4096;
+
+/** The body, or null where it is longer than it can rightly be: the rest is not read. */
+async function shortBody(request: Request): Promise<Blob | null> {
+  const reader = request.body?.getReader();
+  const parts: Uint8Array<ArrayBuffer>[] = [];
+  let length = 0;
+  for (let part = await reader?.read(); part && !part.done; part = await reader?.read()) {
+    length += part.value.byteLength;
+    if (length > MOST_BYTES) {
+      await reader?.cancel();
+      return null;
+    }
+    parts.push(part.value);
+  }
+  return new Blob(parts);
+}
+
 /** True for the body that RFC 8058 section 3.2 names, in either of its two encodings. */
 async function asksForIt(request: Request): Promise<boolean> {
+  const body = await shortBody(request);
+  if (!body) return false;
   try {
-    return (await request.formData()).get("List-Unsubscribe") === "One-Click";
+    const form = await new Response(body, {
+      headers: { "Content-Type": request.headers.get("Content-Type") ?? "" },
+    }).formData();
+    return form.get("List-Unsubscribe") === "One-Click";
   } catch {
     // Neither multipart nor urlencoded.
     return false;

@@ -67,6 +67,7 @@ const SUMMARY: CampRow["summary"] = {
   days: [],
   form: { from: dayFromIso("2026-11-15"), values: [], stopsHelping: 0, helpsMost: 0 },
   cost: 0,
+  causes: [],
 };
 
 /** A saved camp of one athlete; its plan does not matter to mail, its book and revisions do. */

@@ -48,6 +48,7 @@ describe("one click (RFC 8058 section 3.2)", () => {
   it.each([
     ["another body", urlencoded("hello=there")],
     ["no body", { method: "POST" }],
+    ["a body that has no end", urlencoded(`List-Unsubscribe=One-Click&more=${"x".repeat(5000)}`)],
     [
       "JSON",
       {
