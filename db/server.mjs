@@ -69,10 +69,12 @@ async function createCluster({ dir, fast, log }) {
       "--auth=scram-sha-256",
       "--encoding=UTF8",
       "--locale=C.UTF-8",
+      // What it leaves on a failure is ours to clear, after looking whether the disk is full.
+      "--no-clean",
       ...(fast ? ["--no-sync"] : []),
     ]);
     if (made.code !== 0)
-      throw new SetupError(`PostgreSQL could not make its cluster: ${explain(made.stderr)}`);
+      throw new SetupError(`PostgreSQL could not make its cluster: ${explain(made.output, dir)}`);
     // Under its final name only when whole: a start that was killed half-way begins afresh.
     rmSync(data, { recursive: true, force: true });
     renameSync(fresh, data);
@@ -126,7 +128,7 @@ async function startPostmaster({ dir, state, log }) {
     if (started.code === 0) return;
     const said = existsSync(logFile(data)) ? readFileSync(logFile(data)).subarray(from).toString("utf8") : "";
     if (/could not bind|Address already in use/i.test(said)) continue;
-    const reason = explain(said.trim() === "" ? started.output : said);
+    const reason = explain(said.trim() === "" ? started.output : said, data);
     const hint = /disk is full/.test(reason)
       ? ""
       : ` (log: ${logFile(data)}; \`npm run db:reset\` makes a new, empty one)`;

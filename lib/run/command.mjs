@@ -1,5 +1,6 @@
 // Plain Node, no dependency: runs before anything is installed.
 import { spawn } from "node:child_process";
+import { statfsSync } from "node:fs";
 
 /** A failure whose message is the one line a person needs; anything else is a defect and keeps its stack. */
 export class SetupError extends Error {
@@ -78,8 +79,20 @@ export async function endRunning() {
   await Promise.all(all.map(([, { ended }]) => ended));
 }
 
-/** Turns what the system said into one line a person can act on. */
-export function explain(text) {
+const FULL_BELOW_BYTES = 1_000_000;
+
+function isFull(folder) {
+  const { bavail, bsize } = statfsSync(folder);
+  return bavail * bsize < FULL_BELOW_BYTES;
+}
+
+/**
+ * Turns what the system said into one line a person can act on.
+ * @param {string} text
+ * @param {string} [folder] where it wrote: some programs fail on a full disk without saying so
+ */
+export function explain(text, folder) {
+  if (folder && isFull(folder)) return "the disk is full; free some space and start again";
   if (/No space left on device|ENOSPC|Disk quota exceeded|EDQUOT/i.test(text))
     return "the disk is full; free some space and start again";
   if (/Read-only file system|EROFS/i.test(text)) return "the disk is read-only here";
