@@ -282,6 +282,15 @@ export interface Plan {
   readonly form: Form;
   /** Total of should costs and unplaced prices: the value the solver minimised. */
   readonly cost: number;
+  /** Against the base: why its lifts moved or went, and why new ones came. Empty for a plan made from scratch. */
+  readonly causes: readonly Cause[];
+}
+
+/** Kept beside the lifts, not in them: a lift reads the same whatever the plan was measured against. */
+export interface Cause {
+  /** `Lift.id`. */
+  readonly id: string;
+  readonly because: readonly Reason[];
 }
 
 /** The part of an earlier plan that a new one is measured against. */

@@ -1,0 +1,7 @@
+export * from "./camp-dose";
+export * from "./cap";
+export * from "./lift-dose";
+export * from "./sets";
+export * from "./sparring";
+export * from "./taper";
+export * from "./wave";

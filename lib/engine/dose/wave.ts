@@ -1,0 +1,13 @@
+import type { CampWeek } from "../phases";
+import type { Factor, HouseRules } from "../types";
+
+const STEP_WORDS = ["First", "Second", "Third"] as const;
+
+/** The week's place in its block: from a little under the planned dose to a little over, then a lighter week. */
+export function waveFactor(week: CampWeek, rules: HouseRules): Factor {
+  if (week.deload) return { name: "wave", value: rules["wave.deload"], text: "Lighter week" };
+  if (week.step === 0) return { name: "wave", value: 1, text: "No wave in the taper" };
+  const text = `${STEP_WORDS[week.step - 1] ?? `${week.step}th`} week of the block`;
+  const key = week.step === 1 ? "wave.first" : week.step === 2 ? "wave.second" : "wave.third";
+  return { name: "wave", value: rules[key], text };
+}

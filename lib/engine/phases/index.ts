@@ -1,0 +1,3 @@
+export * from "./phase-spans";
+export * from "./camp-weeks";
+export * from "./frame";
