@@ -3,9 +3,9 @@
 import { useMemo, useState } from "react";
 import { startInput } from "@/lib/book/start-camp";
 import { civilNow, dateOf } from "@/lib/calendar/zones";
-import { dayFromIso, inputProblems, isoFromDay, plan } from "@/lib/engine";
+import { inputProblems, plan } from "@/lib/engine";
 import type { Day, Instant, Plan, PlanInput } from "@/lib/engine/types";
-import type { StartParams } from "@/lib/schemas/start-params";
+import { isDate, type StartParams } from "@/lib/schemas/start-params";
 
 export interface StartCamp {
   readonly input: PlanInput;
@@ -26,12 +26,9 @@ const FIELD_OF_POINTER: readonly (readonly [string, keyof StartParams])[] = [
   ["/athlete/freeHours", "to"],
 ];
 
-const exists = (date: string): boolean =>
-  /^\d{4}-\d{2}-\d{2}$/.test(date) && isoFromDay(dayFromIso(date)) === date;
-
 function shapeProblems(params: StartParams): StartProblems {
   return {
-    ...(exists(params.date) ? {} : { date: "Give the date of the bout." }),
+    ...(isDate(params.date) ? {} : { date: "Give the date of the bout." }),
     ...(params.time ? {} : { time: "Give the time of the first bell." }),
     ...(params.hardTime ? {} : { hardTime: "Give a time." }),
     ...(params.weighIn === "unknown" || params.weighInTime ? {} : { weighInTime: "Give a time." }),

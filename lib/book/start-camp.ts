@@ -2,7 +2,7 @@ import { offsetSteps } from "@/lib/calendar/zones";
 import { DEFAULT_RULES, dayFromIso, isoFromDay, minuteFromHhmm, weekSpan, weekdayOf } from "@/lib/engine";
 import type { Day, Instant, PlanInput, SportKind, SportSession, Weekday } from "@/lib/engine/types";
 import type { CampForm } from "@/lib/schemas/camp";
-import type { StartParams } from "@/lib/schemas/start-params";
+import { isDate, type StartParams } from "@/lib/schemas/start-params";
 
 /** What the start page takes a session to be, since it asks for no more than the days: common practice, no published source. */
 const HARD_MINUTES = 75;
@@ -87,7 +87,7 @@ export function startWeighIn(params: StartParams): { date: string; time: string 
 
 const WEEK: readonly Weekday[] = [1, 2, 3, 4, 5, 6, 7];
 
-/** The engine's input for the start page: dates and times must have their shape, see `readStartParams`. */
+/** The engine's input for the start page: dates and times must be real ones. */
 export function startInput(params: StartParams, zone: string, now: Instant): PlanInput {
   const boutDay = dayFromIso(params.date);
   const weighIn = startWeighIn(params);
@@ -123,8 +123,9 @@ export function startInput(params: StartParams, zone: string, now: Instant): Pla
   };
 }
 
-/** The same camp as the form that a team keeps: recurring sessions stay recurring. */
-export function startCampForm(params: StartParams, zone: string, athleteName: string): CampForm {
+/** The same camp as the form that a team keeps: recurring sessions stay recurring. Null without a date of the bout. */
+export function startCampForm(params: StartParams, zone: string, athleteName: string): CampForm | null {
+  if (!isDate(params.date)) return null;
   return {
     athlete: { name: athleteName },
     homeZone: zone,

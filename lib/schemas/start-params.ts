@@ -61,6 +61,13 @@ export const START_DEFAULTS: Omit<StartParams, "date"> = {
 };
 
 const DATE = /^\d{4}-\d{2}-\d{2}$/;
+
+/** True for `YYYY-MM-DD` of a day that exists. */
+export function isDate(text: string): boolean {
+  const midnight = DATE.test(text) ? Date.parse(`${text}T00:00:00Z`) : Number.NaN;
+  return !Number.isNaN(midnight) && new Date(midnight).toISOString().startsWith(text);
+}
+
 const TIME = /^([01]\d|2[0-3]):[0-5]\d$/;
 const END_TIME = /^(([01]\d|2[0-3]):[0-5]\d|24:00)$/;
 
@@ -91,10 +98,11 @@ export function readStartParams(search: URLSearchParams, fallback: StartParams):
   };
   const word = <T extends string>(key: string, words: readonly T[], otherwise: T): T =>
     words.find((known) => known === search.get(key)) ?? otherwise;
+  const bout = search.get("bout") ?? "";
   const zone = search.get("zone");
   const hard = search.getAll("hard").join("");
   return {
-    date: text("bout", DATE, fallback.date),
+    date: isDate(bout) ? bout : fallback.date,
     time: text("at", TIME, fallback.time),
     zone: zone !== null && zone.length <= 64 && knowsZone(zone) ? zone : fallback.zone,
     weeks: whole("weeks", 1, 20, fallback.weeks),
@@ -117,7 +125,7 @@ export function readStartParams(search: URLSearchParams, fallback: StartParams):
 export function writeStartParams(params: StartParams): string {
   const search = new URLSearchParams();
   const put = (key: string, value: string | number): void => search.set(key, String(value));
-  if (DATE.test(params.date)) put("bout", params.date);
+  if (isDate(params.date)) put("bout", params.date);
   if (TIME.test(params.time)) put("at", params.time);
   if (params.zone) put("zone", params.zone);
   put("weeks", params.weeks);
