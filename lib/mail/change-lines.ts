@@ -85,23 +85,23 @@ function sportLine(sport: NetSport, context: LineContext): ChangeLine {
   return { title: sport.title, url: sessionUrl(context.campId, sport.id), what, sets: null, why: [] };
 }
 
-/** True where a lift keeps its place: nothing to tell to someone who is not told the sets. */
-const doseOnly = ({ before, after }: NetLift): boolean =>
-  before !== null && after !== null && before.at.day === after.at.day && before.at.start === after.at.start;
+/** A lift that keeps its place, or never had one, is nothing to tell to someone who is not told the sets. */
+const isMove = ({ before, after }: NetLift): boolean =>
+  before !== null && after !== null
+    ? before.at.day !== after.at.day || before.at.start !== after.at.start
+    : before !== after;
 
 /** One line a session, in the order in which they now stand (or stood, where they are gone). */
 export function linesOf(
   net: { lifts: readonly NetLift[]; sport: readonly NetSport[] },
   context: LineContext,
 ): ChangeLine[] {
-  const order = (before: Place | null, after: Place | null): number =>
-    after
-      ? dateAt(context.zoneAfter, after).getTime()
-      : before
-        ? dateAt(context.zoneBefore, before).getTime()
-        : 0;
+  const order = (before: Place | null, after: Place | null): number => {
+    if (after) return dateAt(context.zoneAfter, after).getTime();
+    return before ? dateAt(context.zoneBefore, before).getTime() : Number.MAX_SAFE_INTEGER;
+  };
   const lifts = net.lifts
-    .filter((lift) => context.detail || !doseOnly(lift))
+    .filter((lift) => context.detail || isMove(lift))
     .map((lift) => ({
       at: order(lift.before?.at ?? null, lift.after?.at ?? null),
       line: liftLine(lift, context),

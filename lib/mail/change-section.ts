@@ -79,7 +79,10 @@ export function campSection({ camp, parts, revisions, reader, now }: SectionInpu
   const bout = boutFrom ? boutLines(boutFrom, book, reader.timeZone) : [];
   const off = boutFrom !== undefined && boutFrom.status === "on" && book.status === "off";
   const detail = seesSets(reader.member, camp.athleteId);
-  const net = { lifts: netLifts(burst), sport: netSport(burst, byId(before), byId(after)) };
+  const net = {
+    lifts: netLifts(burst, new Set(camp.summary.unplaced.map((slot) => slot.id))),
+    sport: netSport(burst, byId(before), byId(after)),
+  };
   const lines = linesOf(net, {
     campId: camp.id,
     zoneBefore: before.zone,

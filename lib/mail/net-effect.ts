@@ -66,17 +66,21 @@ const liftAfter = ({ kind, from, to, setsAfter }: LiftEffect): NetLift["after"] 
   return at && { at, sets: setsAfter };
 };
 
-/** What a burst did to lifting on balance: a session that moved and came back is left out. */
-export function netLifts(burst: readonly BurstRevision[]): NetLift[] {
+/**
+ * What a burst did to lifting on balance: a session that moved and came back is left out. `unplaced` names the lifts that
+ * find no place as things stand.
+ */
+export function netLifts(burst: readonly BurstRevision[], unplaced: ReadonlySet<string>): NetLift[] {
   return runsOf(burst, (knockOn) => knockOn.lifts).flatMap((run) => {
     const [first, last] = [run[0], run.at(-1)];
     if (!first || !last) return [];
     const [before, after] = [liftBefore(first), liftAfter(last)];
-    if (!before && !after) return [];
+    const lost = after === null && unplaced.has(last.id);
+    if (!before && !after && !lost) return [];
     if (before && after && samePlace(before.at, after.at) && before.sets === after.sets) return [];
     // Why it stands where it does now: an earlier reason of the burst may no longer hold.
     const because = run.findLast((effect) => effect.because.length > 0)?.because ?? [];
-    return [{ id: last.id, item: last.item, before, after, unplaced: last.kind === "unplaced", because }];
+    return [{ id: last.id, item: last.item, before, after, unplaced: lost, because }];
   });
 }
 

@@ -7,6 +7,7 @@ import { afterAll, describe, expect, it } from "vitest";
 import { mails } from "@/db/schema";
 import { queueMail } from "@/lib/mail/queue";
 import { sweep } from "@/lib/mail/tasks";
+import { superviseMailWorker } from "@/lib/mail/worker";
 import { testDatabase } from "../setup/database";
 import { mailDeps, mailbox, runDueJobs } from "./mailbox";
 
@@ -69,7 +70,8 @@ const letter = (key: string) => ({
 });
 const rowOf = async (key: string) => (await db.select().from(mails).where(eq(mails.key, key)))[0];
 
-describe("a server process", () => {
+// A child process compiles what it imports: slow where other tests take the processors.
+describe("a server process", { timeout: 90_000 }, () => {
   it("killed while it sends loses no mail: another one sends it, under the same Message-ID", async () => {
     const slow = await slowServer();
     const { child, failed } = startWorker(slow.url);
@@ -107,5 +109,19 @@ describe("a server process", () => {
     await slow.close();
     expect(await rowOf("graceful")).toMatchObject({ status: "sent", attempts: 1 });
     expect(await sql`select 1 from graphile_worker.jobs where task_identifier = 'send-mail'`).toHaveLength(0);
+  });
+
+  it("whose database connections are cut goes on by itself", async () => {
+    const worker = superviseMailWorker(url, mailDeps(database, box.url));
+    const sent = async (key: string) => {
+      await db.transaction((tx) => queueMail(tx, letter(key)));
+      await expect.poll(async () => (await rowOf(key))?.status, { timeout: 40_000 }).toBe("sent");
+    };
+    await sent("before");
+    // postgres.js is the pool of this test, the others are the worker's.
+    await sql`select pg_terminate_backend(pid) from pg_stat_activity
+               where datname = current_database() and application_name <> 'postgres.js' and pid <> pg_backend_pid()`;
+    await sent("after");
+    await worker.stop();
   });
 });

@@ -42,6 +42,7 @@ const session = (over: Partial<SportSession>): SportSession => ({
   ...over,
 });
 const none = new Map<string, SportSession>();
+const nowhere = new Set<string>();
 
 describe("the net effect on a lift", () => {
   it("goes from where it first stood to where it last stands, and is nothing where these are one (2000 walks)", () => {
@@ -66,7 +67,7 @@ describe("the net effect on a lift", () => {
             : [];
         });
         const [first, last] = [stops[0], stops.at(-1)];
-        const net = netLifts(burstOf(steps));
+        const net = netLifts(burstOf(steps), nowhere);
         if (first?.day === last?.day && first?.sets === last?.sets) expect(net).toEqual([]);
         else {
           expect(net).toHaveLength(1);
@@ -86,6 +87,7 @@ describe("the net effect on a lift", () => {
         lift({ kind: "dropped", from: place(2), to: null, setsAfter: null }),
       ],
       [],
+      [],
     ],
     [
       "taken out and added where it was: nothing",
@@ -94,20 +96,43 @@ describe("the net effect on a lift", () => {
         lift({ kind: "added", from: null, to: place(1), setsBefore: null }),
       ],
       [],
+      [],
     ],
     [
       "lost its place",
       [lift({ kind: "unplaced", to: null, setsAfter: null })],
+      ["strength-a.5"],
       [{ before: { at: place(1), sets: 16 }, after: null, unplaced: true }],
+    ],
+    [
+      "lost its place, and is no longer wanted",
+      [lift({ kind: "unplaced", to: null, setsAfter: null })],
+      [],
+      [{ before: { at: place(1), sets: 16 }, after: null, unplaced: false }],
+    ],
+    [
+      "new, and finds no place",
+      [lift({ kind: "unplaced", from: null, to: null, setsBefore: null, setsAfter: null })],
+      ["strength-a.5"],
+      [{ before: null, after: null, unplaced: true }],
+    ],
+    [
+      "new, found no place and is no longer wanted: nothing",
+      [lift({ kind: "unplaced", from: null, to: null, setsBefore: null, setsAfter: null })],
+      [],
+      [],
     ],
     [
       "only its sets",
       [lift({ kind: "dose", to: place(1), setsAfter: 12 })],
+      [],
       [{ before: { at: place(1), sets: 16 }, after: { at: place(1), sets: 12 }, unplaced: false }],
     ],
-  ])("%s", (_name, effects, expected) => {
-    const net = netLifts(burstOf(effects.map((effect) => ({ lifts: [effect] }))));
-    expect(net.map(({ before, after, unplaced }) => ({ before, after, unplaced }))).toEqual(expected);
+  ])("%s", (_name, effects, unplaced, expected) => {
+    const net = netLifts(burstOf(effects.map((effect) => ({ lifts: [effect] }))), new Set(unplaced));
+    expect(net.map(({ before, after, unplaced: lost }) => ({ before, after, unplaced: lost }))).toEqual(
+      expected,
+    );
   });
 
   it("gives the reason of the last move: earlier ones may no longer hold", () => {
@@ -117,15 +142,17 @@ describe("the net effect on a lift", () => {
         { lifts: [lift({ because: because("old") })] },
         { lifts: [lift({ from: place(2), to: place(3), because: because("new") })] },
       ]),
+      nowhere,
     );
     expect(net[0]?.because).toEqual(because("new"));
   });
 
   it("leaves out what only revisions touched that the reader is not told of", () => {
     expect(
-      netLifts(burstOf([{ lifts: [lift({})] }, { lifts: [lift({ id: "strength-b.5" })], told: false }])).map(
-        ({ id }) => id,
-      ),
+      netLifts(
+        burstOf([{ lifts: [lift({})] }, { lifts: [lift({ id: "strength-b.5" })], told: false }]),
+        nowhere,
+      ).map(({ id }) => id),
     ).toEqual(["strength-a.5"]);
   });
 });
