@@ -5,7 +5,8 @@ import { dayText } from "@/lib/format/civil";
 import { hoursText, type CellEntry } from "./camp-days";
 import { KindMark } from "./kind-mark";
 
-const intensityText = ({ low, high, of }: Lift["intensity"]): string =>
+/** "80 to 85 % of best", "2 to 3 in reserve". */
+export const intensityText = ({ low, high, of }: Lift["intensity"]): string =>
   of === "best" ? `${low} to ${high} % of best` : `${low} to ${high} in reserve`;
 
 const Fact = ({ name, value }: { readonly name: ReactNode; readonly value: ReactNode }) => (
