@@ -54,9 +54,11 @@ async function staticChecks() {
   return tally;
 }
 
+let built = false;
 async function build() {
   const { ensureBuild } = await import("./build.mjs");
   await ensureBuild();
+  built = true;
   return { passed: 1, failed: 0, failures: [] };
 }
 
@@ -78,7 +80,10 @@ async function main() {
     );
   }
   await section("Production build", build);
-  await section("Browser tests", () => runPlaywright({ timeoutMs: 8 * MINUTE }));
+  await section("Browser tests", () => {
+    if (!built) throw new SetupError("not run: there is no build to test");
+    return runPlaywright({ timeoutMs: 8 * MINUTE });
+  });
 }
 
 function summary() {
