@@ -1,4 +1,4 @@
-import { and, eq, sql } from "drizzle-orm";
+import { and, count, eq, getTableColumns, inArray, sql } from "drizzle-orm";
 import type { Tx } from "../client";
 import { mails, users } from "../schema";
 
@@ -19,12 +19,6 @@ export type NewMail = Pick<
   | "createdAt"
 >;
 
-/**
- * Tries at sending before a mail counts as failed. The worker waits exp(min(10, attempt)) seconds between them, so 28
- * tries span 4.7 days; RFC 5321 4.5.4.1 asks for 4 to 5.
- */
-const MAX_ATTEMPTS = 28;
-
 /** Name of the job that sends mail `id`: one job a mail. */
 const sendKey = (id: string): string => `mail:${id}`;
 
@@ -38,20 +32,25 @@ export async function insertMail(tx: Tx, mail: NewMail): Promise<string | null> 
   return row?.id ?? null;
 }
 
-/** Adds the job that sends a mail, in the caller's transaction; replaces one that waits. */
-export async function addSendJob(tx: Tx, mailId: string): Promise<void> {
+/** Adds the job that sends a mail in `seconds` from now, in the caller's transaction; replaces one that waits. */
+export async function addSendJob(tx: Tx, mailId: string, seconds = 0): Promise<void> {
   await tx.execute(sql`
     select graphile_worker.add_job(
-      'send-mail', ${JSON.stringify({ mailId })}::json, job_key := ${sendKey(mailId)}, max_attempts := ${MAX_ATTEMPTS}::int)`);
+      'send-mail', ${JSON.stringify({ mailId })}::json, job_key := ${sendKey(mailId)},
+      run_at := now() + make_interval(secs => ${seconds}::float8))`);
 }
 
 /**
  * The mail, locked until the transaction ends, or null where it no longer waits or someone else is sending it. The lock is
  * the claim: when a process dies, its connection and with it the claim end at once.
  */
-export async function claimMail(tx: Tx, mailId: string): Promise<MailRow | null> {
+export async function claimMail(tx: Tx, mailId: string): Promise<(MailRow & { stale: boolean }) | null> {
   const [row] = await tx
-    .select()
+    .select({
+      ...getTableColumns(mails),
+      // RFC 5321 4.5.4.1: one gives up after 4 to 5 days.
+      stale: sql<boolean>`${mails.createdAt} < now() - interval '5 days'`,
+    })
     .from(mails)
     .where(and(eq(mails.id, mailId), eq(mails.status, "waiting")))
     .for("update", { skipLocked: true });
@@ -102,4 +101,15 @@ export async function updateMailChoice(
     .where(eq(users.id, userId))
     .returning({ id: users.id });
   return rows.length > 0;
+}
+
+/** How many mails wait, and how many were given up. */
+export async function countMails(tx: Tx): Promise<{ waiting: number; failed: number }> {
+  const rows = await tx
+    .select({ status: mails.status, number: count() })
+    .from(mails)
+    .where(inArray(mails.status, ["waiting", "failed"]))
+    .groupBy(mails.status);
+  const of = (status: MailRow["status"]) => rows.find((row) => row.status === status)?.number ?? 0;
+  return { waiting: of("waiting"), failed: of("failed") };
 }

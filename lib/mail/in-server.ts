@@ -2,7 +2,7 @@ import { logger } from "@/lib/logger";
 import { startMailWorker, type MailWorker } from "./worker";
 
 /** Milliseconds that jobs in hand get on shutdown; a mail that takes longer is sent by the next process. */
-const STOP_MS = 20_000;
+const STOP_MS = 12_000;
 
 declare global {
   /** Once a process, also when a development server loads its modules again. */

@@ -48,10 +48,8 @@ export async function sweep({
 /** The jobs of mail. */
 export function mailTasks(deps: MailDeps): TaskList {
   return {
-    "send-mail": async (payload, { job }) => {
-      const { mailId } = sendPayload.parse(payload);
-      const outcome = await sendQueuedMail(deps, mailId, job.attempts >= job.max_attempts);
-      if (outcome === "failed") logger.error({ mailId }, "mail given up");
+    "send-mail": async (payload) => {
+      await sendQueuedMail(deps, sendPayload.parse(payload).mailId);
     },
     "collect-changes": async (payload) => {
       const { userId, since, digest } = collectPayload.parse(payload);

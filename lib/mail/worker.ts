@@ -27,6 +27,8 @@ export const queueLogger = new Logger((scope) => (level, message, meta) => {
 export interface MailWorker {
   /** Takes no more jobs and waits for those in hand. */
   readonly stop: () => Promise<void>;
+  /** False while it starts, or starts again because the database was away. */
+  readonly runs: () => boolean;
 }
 
 /** Runs the jobs until `stop`; starts again by itself after the database was away. */
@@ -68,6 +70,7 @@ export function superviseMailWorker(connectionString: string, deps: MailDeps): M
     }
   })();
   return {
+    runs: () => runner !== undefined && !ending.signal.aborted,
     stop: async () => {
       ending.abort();
       await runner
@@ -84,6 +87,7 @@ export function startMailWorker(): MailWorker {
   const { db, sql } = openDatabase(DATABASE_URL, { max: CONCURRENCY + 1 });
   const worker = superviseMailWorker(DATABASE_URL, { db, send: smtpSender(mailSettings()), now });
   return {
+    ...worker,
     stop: async () => {
       await worker.stop();
       await sql.end({ timeout: 5 });
