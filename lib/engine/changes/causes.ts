@@ -1,10 +1,19 @@
 import { itemSpec, liftsOfWeek, menuOf, type Layout } from "../menu";
 import type { CampFrame } from "../phases";
-import type { Base, Cause, Lift, Reason } from "../types";
+import type { Base, Cause, Day, Lift, Minute, Reason } from "../types";
 import { weekOfBaseLift } from "./base";
 
-/** Why the place that a lift had is worse, or shut, now. */
-export type WhyLeft = (id: string) => readonly Reason[];
+/** The rules that shut the place a lift had, or make it dear; none where it fell to another lift. */
+export type WhyLeft = (id: string, day: Day, start: Minute) => readonly Reason[];
+
+const MADE_ROOM: readonly Reason[] = [{ rule: "spread", text: "The lifts of the week lie better this way." }];
+
+function whyMoved(lift: Lift, was: Lift, whyLeft: WhyLeft): readonly Reason[] {
+  // A pin says why it stands here, and nothing shut the place it left.
+  if (lift.pinned) return lift.reasons;
+  const reasons = whyLeft(lift.id, was.day, was.start);
+  return reasons.length > 0 ? reasons : MADE_ROOM;
+}
 
 const PHASE_WEEKS = {
   foundation: "A foundation week",
@@ -57,7 +66,7 @@ export function causesOf(
     const was = before.get(lift.id);
     if (!was) causes.push({ id: lift.id, because: [whyAdded(frame, lift)] });
     else if (was.day !== lift.day || was.start !== lift.start) {
-      causes.push({ id: lift.id, because: lift.pinned ? lift.reasons : whyLeft(lift.id) });
+      causes.push({ id: lift.id, because: whyMoved(lift, was, whyLeft) });
     }
   }
   for (const lift of layout.dropped) {

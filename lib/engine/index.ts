@@ -1,0 +1,12 @@
+/** The one public face of the engine. Pure: no clock, no chance, no machine; see `types.ts` for the glossary. */
+export * from "./types";
+export * from "./geometry";
+export * from "./phases";
+export { ITEM_TITLES, itemSpec, type ItemSpec } from "./menu";
+export { meanOfDecay, sessionMinutes, tauFor, taperFactor } from "./dose";
+export * from "./load";
+export { inputProblems, PlanInputError } from "./input";
+export { plan } from "./plan";
+export { knockOn } from "./changes/knock-on";
+export { DEFAULT_RULES, HOUSE_RULES, RULE_KEYS, withOverrides, type RuleGroup } from "./rules/house-rules";
+export { PLACEMENT_RULES } from "./rules/placement-rules";
