@@ -19,7 +19,7 @@ const MENU = "bg-bar text-bar-text on-bar border-bar-line absolute inset-auto to
 function AccountMenu({ team, person, role }: Omit<TopBarProps, "nav">) {
   return (
     <div id="account-menu" popover="auto" className={`${MENU} right-4 w-64 rounded-b py-2 md:right-7`}>
-      <p className="px-5 py-2 text-sm">
+      <p className="px-6 py-2 text-sm">
         <span className="block font-semibold">{person}</span>
         <span className="block text-xs text-bar-quiet">
           {role}, {team}

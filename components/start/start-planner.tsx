@@ -51,14 +51,18 @@ const summary = ({ plan }: StartCamp): string => {
 function StartCampView({ camp, stale }: { readonly camp: StartCamp; readonly stale: boolean }) {
   const { plan, input, today } = camp;
   return (
-    <div className={stale ? "opacity-60" : undefined}>
+    <div className={stale ? "grayscale" : undefined}>
       <div className="mb-2 flex flex-wrap items-baseline justify-between gap-x-4">
         <h2 className="font-semibold">{summary(camp)}</h2>
-        <p className="text-sm text-ink-2">Press a session to see why it stands there.</p>
+        <p className="text-sm text-ink-2">
+          {stale
+            ? "Shown as it was: one of the fields is wrong."
+            : "Press a session to see why it stands there."}
+        </p>
       </div>
       <CampGrid plan={plan} sport={input.sport} weighIn={input.weighIn} today={today} />
       <div className="mt-2">
-        <KindLegend entries={legendOf(plan, input.sport)} />
+        <KindLegend entries={legendOf(plan, input.sport, input.weighIn !== null)} />
       </div>
       <StartRemarks plan={plan} />
       <LiveRegion>{stale ? "" : `Camp laid out: ${summary(camp)}.`}</LiveRegion>

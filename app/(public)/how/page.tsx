@@ -43,7 +43,8 @@ export default function HowPage() {
           <p>
             In the taper the sets fall by about half on average while load on the bar and days a week stay,
             because that is what the pooled studies support (Bosquet et al. 2007, 27 studies of competitive
-            athletes). None of them was on fighters in camp; read it as the best there is.
+            athletes). It pools several sports and says nothing of fighters in particular; read it as the best
+            there is.
           </p>
         </Part>
         <Part title="It adds up load and does not guess form">
