@@ -14,7 +14,11 @@ export async function findAthlete(tx: Tx, teamId: string, athleteId: string): Pr
 }
 
 export async function listAthletes(tx: Tx, teamId: string): Promise<AthleteRow[]> {
-  return tx.select().from(athletes).where(eq(athletes.teamId, teamId)).orderBy(asc(athletes.name), asc(athletes.id));
+  return tx
+    .select()
+    .from(athletes)
+    .where(eq(athletes.teamId, teamId))
+    .orderBy(asc(athletes.name), asc(athletes.id));
 }
 
 export async function insertAthlete(tx: Tx, teamId: string, values: AthleteValues): Promise<AthleteRow> {
@@ -26,7 +30,12 @@ export async function insertAthlete(tx: Tx, teamId: string, values: AthleteValue
   return row;
 }
 
-export async function updateAthlete(tx: Tx, teamId: string, athleteId: string, values: Partial<AthleteValues>): Promise<void> {
+export async function updateAthlete(
+  tx: Tx,
+  teamId: string,
+  athleteId: string,
+  values: Partial<AthleteValues>,
+): Promise<void> {
   await tx
     .update(athletes)
     .set(values)

@@ -9,5 +9,7 @@ export async function writeAudit(
   subject: string,
   detail: Record<string, unknown> = {},
 ): Promise<void> {
-  await tx.insert(auditLog).values({ teamId: actor.teamId, userId: actor.userId, action, subject, detail, createdAt: actor.now });
+  await tx
+    .insert(auditLog)
+    .values({ teamId: actor.teamId, userId: actor.userId, action, subject, detail, createdAt: actor.now });
 }

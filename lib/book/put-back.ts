@@ -1,3 +1,4 @@
+import { dequal } from "dequal";
 import type { Base, KnockOn, Lift, Plan } from "@/lib/engine/types";
 import type { FieldError } from "@/lib/errors";
 import type { CampBook } from "@/lib/schemas/camp-book";
@@ -12,20 +13,18 @@ export interface SavedChange {
   readonly liftsBefore: readonly Lift[];
 }
 
-const same = (a: unknown, b: unknown): boolean => JSON.stringify(a) === JSON.stringify(b);
-
 /** What the revision wrote must still stand; otherwise putting it back would take a later change with it. */
 export function putBackProblem(book: CampBook, { edit }: SavedChange): FieldError | null {
   const sport = new Map(book.sport.map((entry) => [entry.id, entry]));
   const pins = new Map(book.pins.map((pin) => [pin.liftId, pin]));
   const stands =
-    (edit.putSport ?? []).every((entry) => same(sport.get(entry.id), entry)) &&
+    (edit.putSport ?? []).every((entry) => dequal(sport.get(entry.id), entry)) &&
     (edit.dropSport ?? []).every((id) => !sport.has(id)) &&
-    (edit.putPins ?? []).every((pin) => same(pins.get(pin.liftId), pin)) &&
+    (edit.putPins ?? []).every((pin) => dequal(pins.get(pin.liftId), pin)) &&
     (edit.dropPins ?? []).every((id) => !pins.has(id)) &&
-    (edit.bout === undefined || same(edit.bout, book.bout)) &&
+    (edit.bout === undefined || dequal(edit.bout, book.bout)) &&
     (edit.weeks === undefined || edit.weeks === book.weeks) &&
-    (edit.weighIn === undefined || same(edit.weighIn, book.weighIn)) &&
+    (edit.weighIn === undefined || dequal(edit.weighIn, book.weighIn)) &&
     (edit.status === undefined || edit.status === book.status) &&
     Object.entries(edit.factors ?? {}).every(([id, factor]) => (book.coachFactors[id] ?? null) === factor);
   return stands

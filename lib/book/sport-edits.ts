@@ -1,4 +1,4 @@
-import { endBefore, expandEntries, startFrom } from "@/lib/calendar/recurrence";
+import { endBefore, expandEntries, occurrenceDays, startFrom } from "@/lib/calendar/recurrence";
 import { dayFromIso, hhmm, isoFromDay, weekdayOf } from "@/lib/engine";
 import type { Day, SportSession, Weekday } from "@/lib/engine/types";
 import type { CampBook, SportEntry } from "@/lib/schemas/camp-book";
@@ -106,54 +106,67 @@ function editFollowing(
   from: Day,
   values: Partial<SportValues>,
 ): BookEdit {
-  const put: SportEntry[] = [];
-  const drop: string[] = [];
   const whole = from <= firstDay(entry);
-  if (!whole) put.push(endBefore(entry, isoFromDay(from)));
+  const before = whole ? [] : [endBefore(entry, isoFromDay(from))];
   const rest = whole
     ? entry
     : startFrom(entry, isoFromDay(from), freshId(book, `${entry.series}~${isoFromDay(from)}`));
-
+  const facts = withFacts(rest, values);
   const shift = values.date ? dayFromIso(values.date) - session.day : 0;
   const time = values.start ?? hhmm(session.start);
-  const days = rest.rrule === null ? null : byDay(rest.rrule);
-  const oldDay = WEEKDAY_NAMES[weekdayOf(session.day)];
   const newDay = WEEKDAY_NAMES[weekdayOf((session.day + shift) as Day)];
 
-  if (values.rrule !== undefined) {
+  if (values.rrule !== undefined || rest.rrule === null) {
     const start = startText((session.day + shift) as Day, time);
-    put.push({ ...withFacts(rest, values), start, rrule: values.rrule, exdate: [] });
-  } else if (shift !== 0 && rest.rrule !== null && days !== null && days.length > 1) {
-    const others = withByDay(
-      rest.rrule,
-      days.filter((day) => day !== oldDay),
-    );
-    put.push({ ...rest, rrule: others });
-    put.push({
-      ...withFacts(rest, values),
-      id: freshId(book, `${entry.series}~${isoFromDay(from)}m`),
-      idShift: rest.idShift + shift,
-      start: startText((firstOnWeekday(from, session.day) + shift) as Day, time),
-      rrule: withByDay(rest.rrule, [newDay]),
-      exdate: shiftExdates(
-        rest.exdate.filter((date) => onWeekday(date, session.day)),
-        shift,
-        time,
-      ),
-    });
-  } else {
-    const rrule =
-      rest.rrule !== null && days !== null && shift !== 0 ? withByDay(rest.rrule, [newDay]) : rest.rrule;
-    put.push({
-      ...withFacts(rest, values),
-      idShift: rest.idShift + shift,
-      start: startText((dayFromIso(rest.start.slice(0, 10)) + shift) as Day, time),
-      rrule,
-      exdate: shiftExdates(rest.exdate, shift, time),
-    });
+    return { putSport: [...before, { ...facts, start, rrule: values.rrule ?? null, exdate: [] }] };
   }
-  return { putSport: put, dropSport: drop };
+  const days = byDay(rest.rrule);
+  if (shift === 0 || days === null || days.length === 1) {
+    const moved: SportEntry = {
+      ...facts,
+      idShift: rest.idShift + shift,
+      start: startText((firstDay(rest) + shift) as Day, time),
+      rrule: shiftUntil(days === null || shift === 0 ? rest.rrule : withByDay(rest.rrule, [newDay]), shift),
+      exdate: shiftExdates(rest.exdate, shift, time),
+    };
+    return { putSport: [...before, moved] };
+  }
+  const ends = untilForCount(rest, rest.rrule);
+  const oldDay = WEEKDAY_NAMES[weekdayOf(session.day)];
+  const others = withByDay(
+    ends,
+    days.filter((day) => day !== oldDay),
+  );
+  const moved: SportEntry = {
+    ...facts,
+    id: freshId(book, `${entry.series}~${isoFromDay(from)}m`),
+    idShift: rest.idShift + shift,
+    start: startText((firstOnWeekday(from, session.day) + shift) as Day, time),
+    rrule: shiftUntil(withByDay(ends, [newDay]), shift),
+    exdate: shiftExdates(
+      rest.exdate.filter((date) => onWeekday(date, session.day)),
+      shift,
+      time,
+    ),
+  };
+  return { putSport: [...before, { ...rest, rrule: others }, moved] };
 }
+
+/** A count means all weekdays together: before they part, it becomes the day of the last one. */
+function untilForCount(entry: SportEntry, rrule: string): string {
+  if (!/(^|;)COUNT=/.test(rrule)) return rrule;
+  const first = firstDay(entry);
+  const days = occurrenceDays(entry, first, (first + 3 * 366) as Day);
+  const last = isoFromDay(days.at(-1) ?? first).replaceAll("-", "");
+  return rrule.replace(/(^|;)COUNT=\d+/, `$1UNTIL=${last}T235900Z`);
+}
+
+/** The rule with its end moved along: a series that moves by a day ends a day later, at the end of that day. */
+const shiftUntil = (rrule: string, shift: number): string =>
+  rrule.replace(/UNTIL=(\d{4})(\d{2})(\d{2})(T\d{6}Z?)?/, (_, year: string, month: string, date: string) => {
+    const until = (dayFromIso(`${year}-${month}-${date}`) + shift) as Day;
+    return `UNTIL=${isoFromDay(until).replaceAll("-", "")}T235900Z`;
+  });
 
 const firstDay = (entry: SportEntry): Day => dayFromIso(entry.start.slice(0, 10));
 const onWeekday = (date: string, like: Day): boolean =>

@@ -35,7 +35,9 @@ export async function readBody<B>(request: Request, schema: ZodType<B>): Promise
   try {
     value = JSON.parse(text);
   } catch {
-    throw new AppError("invalid", "The body is not JSON.", { errors: [{ pointer: "", message: "Not JSON." }] });
+    throw new AppError("invalid", "The body is not JSON.", {
+      errors: [{ pointer: "", message: "Not JSON." }],
+    });
   }
   const parsed = schema.safeParse(value);
   if (parsed.success) return parsed.data;

@@ -19,12 +19,23 @@ export function problemResponse(error: unknown): Response {
   const headers = new Headers({ "content-type": "application/problem+json", "cache-control": "no-store" });
   if (!(error instanceof AppError)) {
     logger.error({ error }, "unexpected error");
-    const body = { type: "about:blank", title: "Something went wrong", status: 500, detail: "Nothing was changed. Try again in a moment." };
+    const body = {
+      type: "about:blank",
+      title: "Something went wrong",
+      status: 500,
+      detail: "Nothing was changed. Try again in a moment.",
+    };
     return new Response(JSON.stringify(body), { status: 500, headers });
   }
   const { status, title } = PROBLEMS[error.code];
   const { retryAfter, ...extra } = error.extra;
   if (typeof retryAfter === "number") headers.set("retry-after", String(Math.ceil(retryAfter)));
-  const body = { type: `tag:bellward,2026:${error.code}`, title, status, detail: error.userMessage, ...extra };
+  const body = {
+    type: `tag:bellward,2026:${error.code}`,
+    title,
+    status,
+    detail: error.userMessage,
+    ...extra,
+  };
   return new Response(JSON.stringify(body), { status, headers });
 }

@@ -192,7 +192,7 @@ describe("what is past", () => {
   });
 
   it("a camp called off keeps what was done and plans nothing more", () => {
-    const result = preview(standing(), { kind: "bout.off" });
+    const result = preview(standing(campBook(), at("2026-11-14T12:00:00Z")), { kind: "bout.off" });
     expect(result.plan.lifts.every((lift) => lift.past)).toBe(true);
     expect(result.plan.lifts.length).toBeGreaterThan(0);
     expect(

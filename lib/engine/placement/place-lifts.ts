@@ -15,12 +15,20 @@ function reasonsFor(around: Surroundings, lift: LiftSpan, fresh: boolean): Reaso
   const { rules } = around.input;
   const next = nextFrom(around.hard, lift.endsAt);
   if (next && lift.heavyLower) {
-    reasons.push({ rule: "heavy-before-hard", text: `Ends ${hours(next.startsAt - lift.endsAt)} before ${next.title}; house rule asks ${rules["heavy-before-hard.hours"]} h.` });
+    reasons.push({
+      rule: "heavy-before-hard",
+      text: `Ends ${hours(next.startsAt - lift.endsAt)} before ${next.title}; house rule asks ${rules["heavy-before-hard.hours"]} h.`,
+    });
   }
   const last = lastBefore(around.hard, lift.startsAt);
   if (last && lift.startsAt - last.endsAt < 72 * 60) {
-    const asked = lift.heavyLower ? Math.max(rules["heavy-after-hard.hours"], rules["lift-after-hard.hours"]) : rules["lift-after-hard.hours"];
-    reasons.push({ rule: "lift-after-hard", text: `Starts ${hours(lift.startsAt - last.endsAt)} after ${last.title}; house rule asks ${asked} h.` });
+    const asked = lift.heavyLower
+      ? Math.max(rules["heavy-after-hard.hours"], rules["lift-after-hard.hours"])
+      : rules["lift-after-hard.hours"];
+    reasons.push({
+      rule: "lift-after-hard",
+      text: `Starts ${hours(lift.startsAt - last.endsAt)} after ${last.title}; house rule asks ${asked} h.`,
+    });
   }
   for (const { rule, text } of shouldCosts(around, lift, fresh)) reasons.push({ rule, text });
   if (reasons.length === 0) reasons.push({ rule: "spread", text: "The day that costs the week least." });
@@ -61,17 +69,35 @@ export function placeLifts(request: PlacementRequest): Placement {
     if (!candidate) {
       const rules = shut.get(slot.id) ?? [];
       const left = problem.candidates.some(({ item }) => item === index);
-      unplaced.push({ slot, rules: left ? [{ rule: "one-lift", text: "The days it could take are needed by lifts that come first." }, ...rules] : rules });
+      unplaced.push({
+        slot,
+        rules: left
+          ? [
+              { rule: "one-lift", text: "The days it could take are needed by lifts that come first." },
+              ...rules,
+            ]
+          : rules,
+      });
       return;
     }
     const lift = liftSpanAt(around, slot, candidate.day, candidate.start);
-    placed.push({ slot, day: candidate.day, start: candidate.start, reasons: reasonsFor(around, lift, slot.fresh) });
+    placed.push({
+      slot,
+      day: candidate.day,
+      start: candidate.start,
+      reasons: reasonsFor(around, lift, slot.fresh),
+    });
   });
   return { placed, unplaced, violations: violationsOf(request, around), cost: solution.cost };
 }
 
 /** What shuts, or makes dear, a place that a lift had before: for the words of a knock-on. */
-export function whyNotAt(request: PlacementRequest, slotId: string, day: Day, start: LiftSpan["startMinute"]): readonly Reason[] {
+export function whyNotAt(
+  request: PlacementRequest,
+  slotId: string,
+  day: Day,
+  start: LiftSpan["startMinute"],
+): readonly Reason[] {
   const slot = request.slots.find(({ id }) => id === slotId);
   if (!slot) return [];
   const around = surroundingsOf(request.input, request.fixed, (item) => ITEM_TITLES[item]);

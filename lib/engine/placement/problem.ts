@@ -44,7 +44,8 @@ function startsOn(around: Surroundings, slot: Slot, day: Day): Minute[] {
     if (free.weekday !== weekday) continue;
     for (let start: number = free.from; start + slot.minutes <= free.to; start += step) starts.add(start);
     const base = slot.base;
-    if (base?.day === day && base.start >= free.from && base.start + slot.minutes <= free.to) starts.add(base.start);
+    if (base?.day === day && base.start >= free.from && base.start + slot.minutes <= free.to)
+      starts.add(base.start);
   }
   return [...starts].sort((a, b) => a - b) as Minute[];
 }
@@ -57,14 +58,18 @@ class ShutCount {
     else this.counts.set(rule, { reason: { rule, text }, count });
   }
   list(): Reason[] {
-    return [...this.counts.values()].sort((a, b) => b.count - a.count || (a.reason.rule < b.reason.rule ? -1 : 1)).map(({ reason }) => reason);
+    return [...this.counts.values()]
+      .sort((a, b) => b.count - a.count || (a.reason.rule < b.reason.rule ? -1 : 1))
+      .map(({ reason }) => reason);
   }
 }
 
 function candidatesOf(around: Surroundings, slot: Slot, index: number, shut: ShutCount): Candidate[] {
   const found: Candidate[] = [];
   const { from, to } = weekSpan(around.input.bout.day, slot.week);
-  const basePrice = slot.base ? stayPutPrice(around, liftSpanAt(around, slot, slot.base.day, slot.base.start).startsAt) : 0;
+  const basePrice = slot.base
+    ? stayPutPrice(around, liftSpanAt(around, slot, slot.base.day, slot.base.start).startsAt)
+    : 0;
   for (let day = from; day <= to; day = (day + 1) as Day) {
     const probe = liftSpanAt(around, slot, day, 0 as Minute);
     const broken = dayBreak(around, probe);
@@ -73,7 +78,8 @@ function candidatesOf(around: Surroundings, slot: Slot, index: number, shut: Shu
       continue;
     }
     const starts = startsOn(around, slot, day);
-    if (starts.length === 0) shut.add({ rule: "free-hours", text: `No free hours long enough for ${slot.minutes} min.` });
+    if (starts.length === 0)
+      shut.add({ rule: "free-hours", text: `No free hours long enough for ${slot.minutes} min.` });
     for (const start of starts) {
       const lift = liftSpanAt(around, slot, day, start);
       if (lift.startsAt <= around.input.now) {
@@ -87,7 +93,14 @@ function candidatesOf(around: Surroundings, slot: Slot, index: number, shut: Shu
       }
       const stays = slot.base?.day === day && slot.base.start === start;
       const own = shouldCosts(around, lift, slot.fresh).reduce((sum, { points }) => sum + points, 0);
-      found.push({ item: index, day, start, startsAt: lift.startsAt, endsAt: lift.endsAt, cost: own + (stays ? 0 : basePrice) });
+      found.push({
+        item: index,
+        day,
+        start,
+        startsAt: lift.startsAt,
+        endsAt: lift.endsAt,
+        cost: own + (stays ? 0 : basePrice),
+      });
     }
   }
   return found;
@@ -125,7 +138,9 @@ export function placementProblem(request: PlacementRequest): BuiltProblem {
       unplaced:
         UNPLACED +
         IMPORTANCE_STEP * Math.max(0, MOST_ORDER - slot.order) +
-        (slot.base ? stayPutPrice(around, liftSpanAt(around, slot, slot.base.day, slot.base.start).startsAt) : 0),
+        (slot.base
+          ? stayPutPrice(around, liftSpanAt(around, slot, slot.base.day, slot.base.start).startsAt)
+          : 0),
     })),
     candidates,
     apart: [

@@ -22,7 +22,13 @@ function sportGapCost(around: Surroundings, lift: LiftSpan): Cost | null {
     points += Math.round(short * rules["sport-gap.price"]);
     if (gap < shortest) [shortest, name] = [gap, other.title];
   }
-  return points === 0 ? null : { rule: "sport-gap", points, text: `${hours(shortest)} from ${name}; house rule would like ${rules["sport-gap.hours"]} h.` };
+  return points === 0
+    ? null
+    : {
+        rule: "sport-gap",
+        points,
+        text: `${hours(shortest)} from ${name}; house rule would like ${rules["sport-gap.hours"]} h.`,
+      };
 }
 
 function nearHardCost(around: Surroundings, lift: LiftSpan): Cost | null {
@@ -53,14 +59,24 @@ function residualLoad(around: Surroundings, startsAt: number): number {
 function freshCost(around: Surroundings, lift: LiftSpan): Cost | null {
   const residual = residualLoad(around, lift.startsAt);
   const points = Math.round((residual / 100) * around.input.rules["fresh-first.price"]);
-  return points === 0 ? null : { rule: "fresh-first", points, text: `${Math.round(residual)} AU of the days before are still in the legs.` };
+  return points === 0
+    ? null
+    : {
+        rule: "fresh-first",
+        points,
+        text: `${Math.round(residual)} AU of the days before are still in the legs.`,
+      };
 }
 
 function hardDayCost(around: Surroundings, lift: LiftSpan): Cost | null {
   const { rules } = around.input;
   if (rules["hard-days-hard.on"] < 1) return null;
   if (around.sportByDay.get(lift.day)?.some(({ kind }) => kind === "hard-sparring")) return null;
-  return { rule: "hard-days-hard", points: rules["hard-days-hard.price"], text: "The team likes lifts on hard-sparring days." };
+  return {
+    rule: "hard-days-hard",
+    points: rules["hard-days-hard.price"],
+    text: "The team likes lifts on hard-sparring days.",
+  };
 }
 
 function besideFixedCost(around: Surroundings, lift: LiftSpan): Cost | null {
@@ -110,4 +126,5 @@ export function stayPutPrice(around: Surroundings, startsAt: number): number {
 const LOCKED = 200_000;
 
 /** Why a published lift stays where another place would cost less. */
-export const stayText = (start: LiftSpan["startMinute"]): string => `Stays at ${hhmm(start as Parameters<typeof hhmm>[0])}, where it was published.`;
+export const stayText = (start: LiftSpan["startMinute"]): string =>
+  `Stays at ${hhmm(start as Parameters<typeof hhmm>[0])}, where it was published.`;

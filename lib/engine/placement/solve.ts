@@ -75,14 +75,18 @@ function keptUntil(
   const reach = Math.ceil((until - candidate.startsAt) / 540) + 1;
   for (let ahead = 1; ahead <= reach; ahead++) {
     for (const [item, first] of starts.get((candidate.day + ahead) as Day) ?? []) {
-      if (item !== candidate.item && first < until && (!heavyOnly || problem.items[item]?.heavy)) return until;
+      if (item !== candidate.item && first < until && (!heavyOnly || problem.items[item]?.heavy))
+        return until;
     }
   }
   return 0;
 }
 
 /** Latest end on earlier days of other items: what can shut this candidate. */
-function canBeShut(latestRelease: ReadonlyMap<Day, readonly { item: number; until: number }[]>, candidate: Candidate): boolean {
+function canBeShut(
+  latestRelease: ReadonlyMap<Day, readonly { item: number; until: number }[]>,
+  candidate: Candidate,
+): boolean {
   for (let back = 1; back <= 8; back++) {
     for (const { item, until } of latestRelease.get((candidate.day - back) as Day) ?? []) {
       if (item !== candidate.item && candidate.startsAt < until) return true;
@@ -95,7 +99,10 @@ function canBeShut(latestRelease: ReadonlyMap<Day, readonly { item: number; unti
 function optionsByDay(problem: PlacementProblem, bits: readonly number[]): Map<Day, Option[]> {
   const starts = earliestStarts(problem);
   const [all, heavy] = [least(problem, "all"), least(problem, "heavy")];
-  const origin = problem.candidates.reduce((first, { startsAt }) => Math.min(first, startsAt), Number.POSITIVE_INFINITY);
+  const origin = problem.candidates.reduce(
+    (first, { startsAt }) => Math.min(first, startsAt),
+    Number.POSITIVE_INFINITY,
+  );
   const releases = new Map<Day, { item: number; until: number }[]>();
   const made = problem.candidates.map((candidate, index): Option & { day: Day; item: number } => {
     const isHeavy = problem.items[candidate.item]?.heavy ?? false;
@@ -135,7 +142,8 @@ function optionsByDay(problem: PlacementProblem, bits: readonly number[]): Map<D
     const day = problem.candidates[option.candidate]?.day;
     if (day !== undefined) days.set(day, [...(days.get(day) ?? []), option]);
   }
-  for (const options of days.values()) options.sort((a, b) => a.bit - b.bit || a.score - b.score || a.candidate - b.candidate);
+  for (const options of days.values())
+    options.sort((a, b) => a.bit - b.bit || a.score - b.score || a.candidate - b.candidate);
   return days;
 }
 
@@ -156,7 +164,12 @@ function stepsOf(problem: PlacementProblem): { steps: DayStep[]; lost: number } 
   const span = new Map<number, { from: Day; to: Day }>();
   const widen = (week: number, day: Day): void => {
     const known = span.get(week);
-    span.set(week, known ? { from: Math.min(known.from, day) as Day, to: Math.max(known.to, day) as Day } : { from: day, to: day });
+    span.set(
+      week,
+      known
+        ? { from: Math.min(known.from, day) as Day, to: Math.max(known.to, day) as Day }
+        : { from: day, to: day },
+    );
   };
   for (const { item, day } of problem.candidates) widen(problem.items[item]?.week ?? 0, day);
   for (const { week, freeDays } of problem.weekly) for (const day of freeDays) widen(week, day);
@@ -233,10 +246,11 @@ export function solvePlacement(problem: PlacementProblem): PlacementSolution {
     const next = new Map<string, State>();
     const settle = (state: State): void => {
       let { score, open } = state;
-      for (const { bit, score: price } of step.closes) if (open & bit) {
-        score += price;
-        open &= ~bit;
-      }
+      for (const { bit, score: price } of step.closes)
+        if (open & bit) {
+          score += price;
+          open &= ~bit;
+        }
       if (step.noRest > 0 && !state.rested) score += step.noRest;
       const settled = { ...state, score, open };
       const key = keyOf(settled);

@@ -38,7 +38,12 @@ export interface Surroundings {
   readonly fixedByDay: ReadonlyMap<Day, readonly LiftSpan[]>;
 }
 
-export function spanAt(input: PlanInput, day: Day, start: Minute, minutes: number): { startsAt: Instant; endsAt: Instant } {
+export function spanAt(
+  input: PlanInput,
+  day: Day,
+  start: Minute,
+  minutes: number,
+): { startsAt: Instant; endsAt: Instant } {
   const startsAt = instantAt(input.zone, day, start);
   return { startsAt, endsAt: (startsAt + minutes) as Instant };
 }
@@ -72,7 +77,11 @@ function shutDaysOf({ bout, weighIn, sport, holds, weeks }: PlanInput): Map<Day,
   return days;
 }
 
-export function surroundingsOf(input: PlanInput, fixed: readonly FixedLift[], titleOf: (item: Item) => string): Surroundings {
+export function surroundingsOf(
+  input: PlanInput,
+  fixed: readonly FixedLift[],
+  titleOf: (item: Item) => string,
+): Surroundings {
   const sport = input.sport
     .filter(({ kind }) => kind !== "rest" && kind !== "travel")
     .map((session): SportSpan => ({
@@ -85,7 +94,12 @@ export function surroundingsOf(input: PlanInput, fixed: readonly FixedLift[], ti
     }))
     .sort((a, b) => a.startsAt - b.startsAt || (a.id < b.id ? -1 : 1));
   const lifts = fixed
-    .map((lift): LiftSpan => ({ ...spanAt(input, lift.day, lift.start, lift.minutes), ...lift, startMinute: lift.start, title: titleOf(lift.item) }))
+    .map((lift): LiftSpan => ({
+      ...spanAt(input, lift.day, lift.start, lift.minutes),
+      ...lift,
+      startMinute: lift.start,
+      title: titleOf(lift.item),
+    }))
     .sort((a, b) => a.startsAt - b.startsAt || (a.id < b.id ? -1 : 1));
   return {
     input,
@@ -120,5 +134,6 @@ export function lastBefore<T extends Span>(list: readonly T[], instant: number):
   return list[low - 1] ?? null;
 }
 
-export const daysOutOfLift = (input: PlanInput, lift: Pick<LiftSpan, "day">): number => input.bout.day - lift.day;
+export const daysOutOfLift = (input: PlanInput, lift: Pick<LiftSpan, "day">): number =>
+  input.bout.day - lift.day;
 export const weekOfDay = (input: PlanInput, day: Day): number => weeksOutOf(input.bout.day, day);
