@@ -37,7 +37,6 @@ export const cleanText = (text: string): string =>
   text
     .toWellFormed()
     .replace(/\r\n?|[\u0085\u2028\u2029]/g, "\n")
-    // eslint-disable-next-line no-control-regex -- these are what must not be in it
     .replace(/[\u0000-\u0008\u000b-\u001f\u007f-\u009f]/g, "");
 
 /** Value of type TEXT (RFC 5545 3.3.11). */

@@ -1,5 +1,5 @@
 import * as rruleModule from "rrule";
-import { dayFromIso, isoFromDay, weekdayOf } from "@/lib/engine";
+import { isoFromDay } from "@/lib/engine";
 import type { Day } from "@/lib/engine/types";
 import { frequencyOf, ruleText, type Frequency, type RuleParts } from "./rrule-text";
 
@@ -37,7 +37,6 @@ const PERIOD: Record<Frequency, { readonly days: number; readonly price: number 
   YEARLY: { days: 365, price: 10 },
 };
 
-const msOf = (day: Day): number => day * DAY_MS;
 const fakeUtc = (local: string): Date => new Date(`${local}:00Z`);
 
 /**
