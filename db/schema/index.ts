@@ -3,3 +3,4 @@ export * from "./athletes";
 export * from "./camps";
 export * from "./feeds";
 export * from "./mails";
+export * from "./rate-limits";

@@ -5,6 +5,7 @@ import { findActiveMember } from "@/db/queries/memberships";
 import { AppError } from "@/lib/errors";
 import { env } from "@/lib/env";
 import { logger } from "@/lib/logger";
+import { addressIn } from "./address";
 import { checkSignIn } from "./sign-in";
 
 declare module "next-auth" {
@@ -28,8 +29,19 @@ const MOST_CHARACTERS = 254;
 const textOf = (value: unknown): string =>
   typeof value === "string" && value.length <= MOST_CHARACTERS ? value : "";
 
-/** Set by our own route for each request; next-auth hands the headers on as they came. */
-export const ADDRESS_HEADER = "x-bellward-address";
+/** next-auth makes an address of the message of what `authorize` throws; `tooManySeconds` reads it back. */
+const TOO_MANY = /^too-many:(\d+)$/;
+
+const asMessage = (error: unknown): unknown =>
+  error instanceof AppError && error.code === "too-many"
+    ? new Error(`too-many:${Math.ceil(Number(error.extra.retryAfter))}`)
+    : error;
+
+/** Seconds to wait where next-auth's answer says that sign-in is limited, else null. */
+export const tooManySeconds = (error: string | null): number | null => {
+  const seconds = TOO_MANY.exec(error ?? "")?.[1];
+  return seconds === undefined ? null : Number(seconds);
+};
 
 /** next-auth with e-mail and password. Read at each request: a build has no settings. */
 export const authOptions = (): NextAuthOptions => ({
@@ -40,13 +52,14 @@ export const authOptions = (): NextAuthOptions => ({
     CredentialsProvider({
       credentials: { email: { type: "email" }, password: { type: "password" } },
       authorize: async (given, request) => {
-        const address: unknown = request.headers?.[ADDRESS_HEADER];
-        const signIn = {
+        const forwarded: unknown = request.headers?.["x-forwarded-for"];
+        return checkSignIn(database(), {
           email: textOf(given?.email).trim(),
           password: textOf(given?.password),
-          address: typeof address === "string" ? address : "direct",
-        };
-        return checkSignIn(database(), signIn);
+          address: addressIn(typeof forwarded === "string" ? forwarded : null),
+        }).catch((error: unknown) => {
+          throw asMessage(error);
+        });
       },
     }),
   ],

@@ -7,11 +7,20 @@ export interface SessionClaims {
   readonly version: number;
 }
 
+/** A cookie that is not ours may hold anything. */
+const decoded = (value: string): string => {
+  try {
+    return decodeURIComponent(value);
+  } catch {
+    return value;
+  }
+};
+
 const cookiesOf = (header: string): Record<string, string> =>
   Object.fromEntries(
     header.split(";").flatMap((pair) => {
       const at = pair.indexOf("=");
-      return at < 0 ? [] : [[pair.slice(0, at).trim(), decodeURIComponent(pair.slice(at + 1).trim())]];
+      return at < 0 ? [] : [[pair.slice(0, at).trim(), decoded(pair.slice(at + 1).trim())]];
     }),
   );
 

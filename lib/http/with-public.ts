@@ -1,7 +1,11 @@
 import type { ZodType } from "zod";
 import { RateLimiterMemory, RateLimiterRes } from "rate-limiter-flexible";
+import { database } from "@/db/pool";
+import { addressIn } from "@/lib/auth/address";
+import { activeMember } from "@/lib/auth/current-member";
 import { now } from "@/lib/clock";
 import { AppError } from "@/lib/errors";
+import type { PublicContext } from "@/lib/services/context";
 import { readBody } from "./body";
 import { problemResponse } from "./problem";
 import { answer } from "./with-team";
@@ -12,20 +16,17 @@ interface Limit {
   readonly seconds: number;
 }
 
-/**
- * Address that a request comes from. A proxy in front must set `x-forwarded-for`; Next does so for direct connections.
- */
-export const addressOf = (request: Request): string =>
-  request.headers.get("x-forwarded-for")?.split(",").at(-1)?.trim() || "direct";
+interface Declaration<B> {
+  readonly body: ZodType<B>;
+  /** Of a success; 200 unless told otherwise. */
+  readonly status?: number;
+}
 
-/** A route for anyone: limited per address and process (429), body checked (422), then the service. */
-export function withPublic<B, R>(
-  service: (input: { body: B; now: Date }) => Promise<R>,
-  declaration: { readonly body: ZodType<B>; readonly limit: Limit },
-) {
-  const { name, calls, seconds } = declaration.limit;
+const addressOf = (request: Request): string => addressIn(request.headers.get("x-forwarded-for"));
+
+function limiterOf({ name, calls, seconds }: Limit): (request: Request) => Promise<void> {
   let limiter: RateLimiterMemory | undefined;
-  const limit = async (request: Request): Promise<void> => {
+  return async (request) => {
     limiter ??= new RateLimiterMemory({ keyPrefix: name, points: calls(), duration: seconds });
     try {
       await limiter.consume(addressOf(request));
@@ -36,10 +37,41 @@ export function withPublic<B, R>(
       });
     }
   };
+}
+
+/** A route for anyone that keeps nothing: limited per address and process (429), body checked (422), then the service. */
+export function withPublic<B, R>(
+  service: (input: { body: B; now: Date }) => Promise<R>,
+  declaration: Declaration<B> & { readonly limit: Limit },
+) {
+  const limit = limiterOf(declaration.limit);
   return async (request: Request): Promise<Response> => {
     try {
       await limit(request);
-      return answer(await service({ body: await readBody(request, declaration.body), now: now() }));
+      const body = await readBody(request, declaration.body);
+      return answer(await service({ body, now: now() }), declaration.status);
+    } catch (error) {
+      return problemResponse(error);
+    }
+  };
+}
+
+const contextOf = (request: Request): PublicContext => ({
+  db: database(),
+  now: now(),
+  address: addressOf(request),
+  signedIn: async () => (await activeMember(request.headers.get("cookie")))?.userId ?? null,
+});
+
+/** A route for people without an account or a session; the service limits itself by what it is asked. */
+export function withAnyone<B, R>(
+  service: (ctx: PublicContext, input: { body: B }) => Promise<R>,
+  declaration: Declaration<B>,
+) {
+  return async (request: Request): Promise<Response> => {
+    try {
+      const body = await readBody(request, declaration.body);
+      return answer(await service(contextOf(request), { body }), declaration.status);
     } catch (error) {
       return problemResponse(error);
     }

@@ -9,3 +9,13 @@ export interface TeamContext {
   readonly member: Member;
   readonly now: Date;
 }
+
+/** Someone who need not be signed in: what services for anyone take first. */
+export interface PublicContext {
+  readonly db: Database;
+  readonly now: Date;
+  /** Where the request came from, for limits. */
+  readonly address: string;
+  /** Id of the person whose session the request carries. */
+  readonly signedIn: () => Promise<string | null>;
+}
