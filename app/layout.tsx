@@ -8,6 +8,9 @@ export const metadata: Metadata = {
   description: "Plans a fighter's camp: give the bout date and the lifting is laid around sparring.",
 };
 
+/** Every page carries the nonce of its own request (see proxy.ts); one made at build time would have none. */
+export const dynamic = "force-dynamic";
+
 export const viewport: Viewport = {
   width: "device-width",
   initialScale: 1,
