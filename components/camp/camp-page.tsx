@@ -18,6 +18,7 @@ import { Ropes } from "./ropes/ropes";
 import { todayOf } from "./today";
 import { useDesk } from "./use-desk";
 import { useNow } from "./use-now";
+import { useWarmEngine } from "./use-warm-engine";
 import { WeekTable } from "./week-table";
 
 // Forms and their validator are fetched when they are opened: most visits only look.
@@ -45,6 +46,7 @@ function Camp({ initial, now: serverNow, selected }: CampPageProps) {
   const { data: view, isError, error } = useCamp(initial, told);
   const now = useNow(serverNow);
   const desk = useDesk(view, now, selected);
+  useWarmEngine(desk.standing, now, view.may.includes("sport.write"));
   const [mark] = useState(createDayMark);
   const [dialog, setDialog] = useState<OpenDialog | null>(null);
   const heading = useRef<HTMLHeadingElement>(null);
@@ -67,11 +69,6 @@ function Camp({ initial, now: serverNow, selected }: CampPageProps) {
         onBout={() => setDialog({ kind: "bout" })}
         onAdd={() => addOn(today)}
       />
-      {isError ? (
-        <Notice tone="error" role="status" title="This page may be behind" className="mb-3">
-          {error.message}
-        </Notice>
-      ) : null}
       <HoldNotice book={shown.book} today={today} />
       <Ropes picture={shown} today={today} may={view.may} mark={mark} />
       <div className="mt-4 grid items-start gap-4 lg:grid-cols-[minmax(0,1fr)_356px]">
@@ -86,6 +83,14 @@ function Camp({ initial, now: serverNow, selected }: CampPageProps) {
         <Rail desk={desk} heading={heading} onEdit={(id) => setDialog({ kind: "edit", id })} />
       </div>
       {view.may.includes("lifts.detail") ? <WeekTable plan={shown.plan} /> : null}
+      {isError ? (
+        // Over the page, not in it: what is being dragged must not move under the pointer.
+        <div className="fixed bottom-3 left-3 z-40 max-w-sm">
+          <Notice tone="error" role="status" title="This page may be behind">
+            {error.message}
+          </Notice>
+        </div>
+      ) : null}
       {dialog?.kind === "bout" ? <BoutDialog desk={desk} onClose={close} /> : null}
       {dialog?.kind === "add" || dialog?.kind === "edit" ? (
         <SportDialog desk={desk} target={dialog} onClose={close} />

@@ -20,9 +20,17 @@ export const changesQuery = (id: string) =>
       (await sendJson<{ changes: readonly ChangeView[] }>(`${campUrl(id)}/changes`)).changes,
   });
 
+/** A refusal (signed out, removed from the team) does not go away by asking again. */
+const refused = (error: Error | null): boolean =>
+  error instanceof ProblemError && error.problem.status >= 400 && error.problem.status < 500;
+
 /** A camp as it stands; `initial` is what the server rendered. `told`: a live line is open, so there is no need to ask. */
 export const useCamp = (initial: CampView, told: boolean) =>
-  useQuery({ ...campQuery(initial.id), initialData: initial, refetchInterval: told ? false : POLL_MS });
+  useQuery({
+    ...campQuery(initial.id),
+    initialData: initial,
+    refetchInterval: ({ state }) => (told || refused(state.error) ? false : POLL_MS),
+  });
 
 export const useChanges = (id: string, initial: readonly ChangeView[]) =>
   useQuery({ ...changesQuery(id), initialData: initial });

@@ -34,7 +34,7 @@ export function CalendarArea({ desk, today, mark, onOpen, onAdd, onDropped }: Ca
   const calendar = useRef<FullCalendar>(null);
   const [said, say] = useState("");
   const { entries, store } = useEntries(desk);
-  const carry = useCarry(desk);
+  const carry = useCarry(desk, root);
   const pointing = useDayMark(root, mark);
   const onKeyDown = useCalendarKeys({ root, store, carry, dispatch: desk.dispatch, say, onDropped });
   useSync({ root, calendar, entries, hand: state.hand });

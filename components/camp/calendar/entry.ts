@@ -140,6 +140,11 @@ function sportEntry(
 
 const GONE = new Set<string>(["moved", "dropped", "unplaced"]);
 
+/** What a pointer carries stays where it was as its own ghost until it is dropped; FullCalendar draws the one under the pointer. */
+const carriedId = ({ hand }: Desk): string | null => (hand?.by === "pointer" ? hand.id : null);
+
+const carriedState = { ghost: true } as const;
+
 /** Where sessions stood before the change that is being tried. */
 function ghosts(knockOn: KnockOn, shown: Picture): CalendarEntry[] {
   const phaseOf = (day: Day) =>
@@ -224,12 +229,16 @@ export function calendarEntries(desk: Desk): CalendarEntry[] {
   const lifts = new Map(knockOn?.lifts.map((effect) => [effect.id, effect]));
   const sport = new Map(knockOn?.sport.map((effect) => [effect.id, effect]));
   const broken = brokenIds(shown.plan.violations, shown.plan.lifts);
-  return [
+  const carried = carriedId(desk);
+  const entries = [
     ...shown.plan.lifts.map((lift) => liftEntry(lift, desk, lifts.get(lift.id), broken.has(lift.id))),
     ...shown.sport.map((session) => sportEntry(session, desk, sport.get(session.id), broken.has(session.id))),
     ...weighInEntry(shown, desk.now),
-    ...(knockOn ? ghosts(knockOn, shown) : []),
-  ].sort((a, b) => a.day - b.day || a.start - b.start || a.id.localeCompare(b.id));
+    ...(knockOn ? ghosts(knockOn, shown).filter((ghost) => ghost.sessionId !== carried) : []),
+  ];
+  return entries
+    .map((entry) => (entry.id === carried ? { ...entry, state: carriedState } : entry))
+    .sort((a, b) => a.day - b.day || a.start - b.start || a.id.localeCompare(b.id));
 }
 
 /** "18:00", or nothing where the session takes the whole day. */

@@ -1,7 +1,7 @@
 "use client";
 
 import { useSyncExternalStore } from "react";
-import { SessionChip } from "@/components/session/chip";
+import { SessionChip, type ChipState } from "@/components/session/chip";
 import { entryTime } from "./entry";
 import type { EntryStore } from "./entry-store";
 
@@ -18,10 +18,10 @@ export function SessionButton({ store, id, mirror, onOpen }: SessionButtonProps)
   const read = () => store.read(id);
   const entry = useSyncExternalStore(store.subscribe, read, read);
   if (!entry) return null;
-  const chip = (state: typeof entry.state) => (
+  const chip = (state: ChipState) => (
     <SessionChip look={entry.look} title={entry.title} time={entryTime(entry)} {...state} />
   );
-  if (mirror) return chip({ ...entry.state, held: true });
+  if (mirror) return chip({ moved: true, held: true });
   if (entry.state.ghost) return chip(entry.state);
   return (
     <button

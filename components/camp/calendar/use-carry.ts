@@ -1,12 +1,13 @@
 "use client";
 
-import { useEffect, useMemo, useRef } from "react";
+import { useEffect, useMemo, useRef, type RefObject } from "react";
 import { dayFromIso } from "@/lib/engine";
 import type { Day, Minute } from "@/lib/engine/types";
 import type { Hand } from "../desk-state";
 import { moveChange, type Place } from "../move-change";
 import { isPastAt } from "../picture";
 import type { Desk } from "../use-desk";
+import { freezeRows, thawRows } from "./freeze";
 
 /** Carrying a session, by pointer or by keys: one way for both. */
 export interface Carry {
@@ -36,7 +37,7 @@ function canStand({ shown, now }: Desk, to: Place): boolean {
   );
 }
 
-export function useCarry(desk: Desk): Carry {
+export function useCarry(desk: Desk, root: RefObject<HTMLElement | null>): Carry {
   // FullCalendar and key handlers outlive a rendering: they always meet the newest state here.
   const latest = useRef(desk);
   const hand = useRef<Hand | null>(null);
@@ -52,11 +53,18 @@ export function useCarry(desk: Desk): Carry {
       const change = moved ? moveChange(standing, next.before?.change ?? null, next.id, next.at) : null;
       dispatch({ type: "hold", hand: next, change, key: crypto.randomUUID() });
     };
+    const release = (): boolean => {
+      if (hand.current?.by === "pointer" && root.current) thawRows(root.current);
+      const held = hand.current !== null;
+      hand.current = null;
+      return held;
+    };
     return {
       pickUp(id, by) {
         const from = placeOf(latest.current, id);
         if (!from || isPastAt(latest.current.shown.zone, from, latest.current.now)) return false;
         const place = { day: from.day, start: from.start };
+        if (by === "pointer" && root.current) freezeRows(root.current);
         hold({ by, id, from: place, at: place, before: latest.current.state.pending });
         return true;
       },
@@ -66,18 +74,16 @@ export function useCarry(desk: Desk): Carry {
         return true;
       },
       drop() {
-        if (!hand.current) return;
-        hand.current = null;
+        if (!release()) return;
         latest.current.dispatch({ type: "drop" });
       },
       letGo() {
-        if (!hand.current) return;
-        hand.current = null;
+        if (!release()) return;
         latest.current.dispatch({ type: "let-go" });
       },
       held: () => hand.current,
     };
-  }, []);
+  }, [root]);
 }
 
 /** A place some days and minutes from another. */
