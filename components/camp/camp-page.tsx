@@ -1,12 +1,11 @@
 "use client";
 
 import dynamic from "next/dynamic";
-import { useCallback, useRef, useState } from "react";
+import { useCallback, useEffect, useRef, useState } from "react";
 import { Notice } from "@/components/ui/notice";
 import { isoFromDay } from "@/lib/engine";
 import type { Day, Instant } from "@/lib/engine/types";
 import { useCamp } from "@/lib/query/camps";
-import { QueryProvider } from "@/lib/query/query-provider";
 import { useCampLive } from "@/lib/query/use-camp-live";
 import type { CampView } from "@/lib/schemas/camp";
 import { CalendarArea } from "./calendar/calendar-area";
@@ -41,7 +40,8 @@ type OpenDialog =
   | { readonly kind: "add"; readonly date: string }
   | { readonly kind: "edit"; readonly id: string };
 
-function Camp({ initial, now: serverNow, selected }: CampPageProps) {
+/** One camp: count, ropes, calendar, knock-on rail. */
+export function CampPage({ initial, now: serverNow, selected }: CampPageProps) {
   const told = useCampLive(initial.id);
   const { data: view, isError, error } = useCamp(initial, told);
   const now = useNow(serverNow);
@@ -52,6 +52,11 @@ function Camp({ initial, now: serverNow, selected }: CampPageProps) {
   const heading = useRef<HTMLHeadingElement>(null);
 
   const { shown, dispatch } = desk;
+  useEffect(() => {
+    // Mails lead to a session by the part of the address that the server never sees.
+    const id = decodeURIComponent(window.location.hash.replace(/^#session-/, ""));
+    if (window.location.hash.startsWith("#session-")) dispatch({ type: "select", id });
+  }, [dispatch]);
   const today = todayOf(shown.book, now);
   const openSession = useCallback((id: string) => dispatch({ type: "select", id }), [dispatch]);
   const addOn = useCallback((day: Day) => setDialog({ kind: "add", date: isoFromDay(day) }), []);
@@ -98,10 +103,3 @@ function Camp({ initial, now: serverNow, selected }: CampPageProps) {
     </div>
   );
 }
-
-/** One camp: count, ropes, calendar, knock-on rail. */
-export const CampPage = (props: CampPageProps) => (
-  <QueryProvider>
-    <Camp {...props} />
-  </QueryProvider>
-);

@@ -6,7 +6,6 @@ import { EmptyState } from "@/components/ui/empty-state";
 import { Notice } from "@/components/ui/notice";
 import { showToast } from "@/components/ui/toasts";
 import { changesQuery, saveChange, useChanges } from "@/lib/query/camps";
-import { QueryProvider } from "@/lib/query/query-provider";
 import { useCampLive } from "@/lib/query/use-camp-live";
 import type { ChangeView } from "@/lib/schemas/camp";
 import { toldText } from "../words";
@@ -34,7 +33,8 @@ function usePutBack(campId: string, newest: number) {
   });
 }
 
-function Changes({ campId, zone, initial, putsBack }: ChangeListProps) {
+/** Every saved change of a camp, newest first, each with what it knocked on and a way back. */
+export function ChangeList({ campId, zone, initial, putsBack }: ChangeListProps) {
   useCampLive(campId);
   const { data: changes } = useChanges(campId, initial);
   const newestFirst = [...changes].sort((a, b) => b.number - a.number);
@@ -71,10 +71,3 @@ function Changes({ campId, zone, initial, putsBack }: ChangeListProps) {
     </>
   );
 }
-
-/** Every saved change of a camp, newest first, each with what it knocked on and a way back. */
-export const ChangeList = (props: ChangeListProps) => (
-  <QueryProvider>
-    <Changes {...props} />
-  </QueryProvider>
-);
