@@ -5,6 +5,7 @@ import { addCollectJobs, listForgottenReaders } from "@/db/queries/notices";
 import type { Database } from "@/db/client";
 import { logger } from "@/lib/logger";
 import { collectChanges } from "./collect";
+import { mailReset } from "./reset";
 import { sendQueuedMail } from "./send";
 import type { SendMail } from "./transport";
 
@@ -15,6 +16,7 @@ export interface MailDeps {
 }
 
 const sendPayload = z.object({ mailId: z.guid() });
+const resetPayload = z.object({ email: z.string().max(254) });
 const collectPayload = z.object({ userId: z.guid(), since: z.iso.datetime(), digest: z.boolean() });
 
 /**
@@ -54,6 +56,9 @@ export function mailTasks(deps: MailDeps): TaskList {
     "collect-changes": async (payload) => {
       const { userId, since, digest } = collectPayload.parse(payload);
       await collectChanges(deps, { userId, since: new Date(since), digest });
+    },
+    "mail-reset": async (payload) => {
+      await mailReset(deps, resetPayload.parse(payload).email);
     },
     "sweep-mail": async () => {
       const found = await sweep(deps);
