@@ -44,7 +44,8 @@ const sessionAt = (
 });
 
 const arbAddition = fc.record({
-  share: fc.double({ min: 0, max: 0.999, noNaN: true }),
+  // Of the camp's days; whole thousandths, since doubles are drawn by exponent and pile up at 0.
+  share: fc.integer({ min: 0, max: 999 }).map((value) => value / 1000),
   start: fc.integer({ min: 0, max: 95 }).map((quarter) => quarter * 15),
 });
 
@@ -58,7 +59,7 @@ describe("for every valid input", () => {
         const reported = new Set(
           made.violations.flatMap(({ rule, ids }) => ids.map((id) => `${rule} ${id}`)),
         );
-        const pins = made.lifts.filter((lift) => lift.pinned);
+        const pins = made.lifts.filter((lift) => lift.pinned && !lift.past);
         for (const { rule, id } of brokenMustRules(input, made.lifts, pins))
           expect(reported).toContain(`${rule} ${id}`);
       }),

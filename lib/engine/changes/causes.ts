@@ -35,8 +35,9 @@ function whyDropped(frame: CampFrame, base: Base, lift: Lift, hardDays: Readonly
     return { rule: "menu", text: `${name} holds ${titles}.` };
   }
   const hard = hardDays.get(week.weeksOut) ?? 0;
-  const lifts = liftsOfWeek(athlete.liftsPerWeek, hard, rules["hard-days.off"]);
-  if (lifts < athlete.liftsPerWeek) {
+  const most = Math.min(menu.length, athlete.liftsPerWeek);
+  const lifts = liftsOfWeek(most, hard, rules["hard-days.off"]);
+  if (lifts < most) {
     return { rule: "hard-days.off", text: `${hard} days of hard sparring that week take one lift off.` };
   }
   return {

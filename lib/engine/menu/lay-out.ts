@@ -50,7 +50,7 @@ function openItems(
 ): readonly Item[] {
   const { athlete, rules } = frame.input;
   const menu = menuOf(week);
-  const number = Math.min(menu.length, liftsOfWeek(athlete.liftsPerWeek, hardDays, rules["hard-days.off"]));
+  const number = liftsOfWeek(Math.min(menu.length, athlete.liftsPerWeek), hardDays, rules["hard-days.off"]);
   return menu.filter((item) => !held.includes(item)).slice(0, Math.max(0, number - held.length));
 }
 

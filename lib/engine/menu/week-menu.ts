@@ -21,7 +21,7 @@ export function menuOf(week: Pick<CampWeek, "phase" | "weeksOut">): readonly Ite
   return week.weeksOut === 0 ? FIGHT_WEEK : MENUS[week.phase];
 }
 
-/** Lifts that a week may hold: the athlete's number, one less where hard sparring takes the recovery, never none. */
-export function liftsOfWeek(liftsPerWeek: number, hardDays: number, hardDaysOff: number): number {
-  return hardDays >= hardDaysOff ? Math.max(1, liftsPerWeek - 1) : liftsPerWeek;
+/** Lifts that a week may hold: `most`, one less where hard sparring takes the recovery, never none. */
+export function liftsOfWeek(most: number, hardDays: number, hardDaysOff: number): number {
+  return hardDays >= hardDaysOff ? Math.max(1, most - 1) : most;
 }
