@@ -2,7 +2,7 @@ import Link from "next/link";
 import { classNames } from "@/components/ui/class-names";
 import { formatInstant } from "@/lib/format/dates";
 
-export interface OutboxEntry {
+interface OutboxEntry {
   readonly id: string;
   /** ISO instant. */
   readonly receivedAt: string;

@@ -34,12 +34,12 @@ const dateAt = (zone: readonly OffsetStep[], { day, start }: Place): Date =>
   new Date(instantAt(zone, day, start) * 60_000);
 
 /** "Sat 5 Dec 18:00", with the session's local time behind it where the reader lives by another clock. */
-export function placeText(zone: readonly OffsetStep[], place: Place, readerZone: string): string {
+function placeText(zone: readonly OffsetStep[], place: Place, readerZone: string): string {
   const [read, local] = [formatInstant(dateAt(zone, place), readerZone), momentText(place)];
   return read === local ? read : `${read} (${local} local time)`;
 }
 
-export const sessionUrl = (campId: string, sessionId: string): string =>
+const sessionUrl = (campId: string, sessionId: string): string =>
   `${mailSettings().appUrl}/camps/${campId}#session-${encodeURIComponent(sessionId)}`;
 
 function moveText(was: Place | null, is: Place | null, context: LineContext, gone: string): string {

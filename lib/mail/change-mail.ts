@@ -20,7 +20,7 @@ const whose = ({ own, athleteName }: CampSection): string => (own ? "Your" : `${
 const campUrl = (campId: string): string => `${mailSettings().appUrl}/camps/${campId}`;
 
 /** Says how much changed and nothing of what: a subject is read on a locked screen. */
-export function subjectOf(sections: readonly CampSection[]): string {
+function subjectOf(sections: readonly CampSection[]): string {
   const sessions = sections.reduce((sum, section) => sum + section.lines.length, 0);
   const [only, second] = sections;
   if (!only || second) return `${plural(sections.length, "camp")}: ${plural(sessions, "session")} changed`;

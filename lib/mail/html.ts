@@ -14,8 +14,7 @@ const ENTITIES: Readonly<Record<string, string>> = {
   "'": "&#39;",
 };
 
-export const escapeHtml = (text: string): string =>
-  text.replace(/[&<>"']/g, (sign) => ENTITIES[sign] ?? sign);
+const escapeHtml = (text: string): string => text.replace(/[&<>"']/g, (sign) => ENTITIES[sign] ?? sign);
 
 type Part = string | number | Markup | null;
 

@@ -3,7 +3,7 @@ import { addCollectJobs, insertNotices, listReaders } from "@/db/queries/notices
 import { nextDigest } from "./digest-time";
 
 /** How long a burst of changes is collected from its first change on, milliseconds (2 minutes). */
-export const COLLECT_MS = 2 * 60_000;
+const COLLECT_MS = 2 * 60_000;
 
 export interface ChangeNotice {
   readonly teamId: string;
