@@ -1,6 +1,6 @@
 import { ITEM_TITLES } from "../menu";
 import type { Day, Reason, Violation } from "../types";
-import { allBreaks } from "./must-rules";
+import { allBreaks, reasonOf } from "./must-rules";
 import { liftSpanAt, placementProblem } from "./problem";
 import type { PlacedSlot, Placement, PlacementRequest, UnplacedSlot } from "./request";
 import { shouldCosts } from "./should-costs";
@@ -30,7 +30,7 @@ function reasonsFor(around: Surroundings, lift: LiftSpan, fresh: boolean): Reaso
       text: `Starts ${hours(lift.startsAt - last.endsAt)} after ${last.title}; house rule asks ${asked} h.`,
     });
   }
-  for (const { rule, text } of shouldCosts(around, lift, fresh)) reasons.push({ rule, text });
+  for (const { rule, text } of shouldCosts(around, lift, fresh)) reasons.push({ rule, text: text() });
   if (reasons.length === 0) reasons.push({ rule: "spread", text: "The day that costs the week least." });
   return reasons;
 }
@@ -42,12 +42,12 @@ function violationsOf(request: PlacementRequest, around: Surroundings): Violatio
     const fixed = request.fixed.find(({ id }) => id === lift.id);
     // What is past cannot be helped any more: only pins that still lie ahead are reported.
     if (!fixed || fixed.past) continue;
-    for (const broken of allBreaks(around, lift, fixed.minutes)) {
+    for (const broken of allBreaks(around, lift)) {
       const ids = broken.with === null ? [lift.id] : [lift.id, broken.with];
       const key = `${broken.rule}|${[...ids].sort().join("|")}`;
       if (seen.has(key)) continue;
       seen.add(key);
-      violations.push({ rule: broken.rule, ids, day: lift.day, text: broken.text });
+      violations.push({ rule: broken.rule, ids, day: lift.day, text: broken.text() });
     }
   }
   return violations.sort((a, b) => a.day - b.day || (a.rule < b.rule ? -1 : 1));
@@ -59,15 +59,10 @@ export function placeLifts(request: PlacementRequest): Placement {
   const solution = solvePlacement(problem);
   const placed: PlacedSlot[] = [];
   const unplaced: UnplacedSlot[] = [];
-  const taken = new Map<Day, string>();
-  for (const index of solution.chosen) {
-    const candidate = index === null ? undefined : problem.candidates[index];
-    if (candidate) taken.set(candidate.day, ITEM_TITLES[request.slots[candidate.item]?.item ?? "primer"]);
-  }
   request.slots.forEach((slot, index) => {
     const candidate = problem.candidates[solution.chosen[index] ?? -1];
     if (!candidate) {
-      const rules = shut.get(slot.id) ?? [];
+      const rules = shut.get(slot.id)?.() ?? [];
       const left = problem.candidates.some(({ item }) => item === index);
       unplaced.push({
         slot,
@@ -102,7 +97,7 @@ export function whyNotAt(
   if (!slot) return [];
   const around = surroundingsOf(request.input, request.fixed, (item) => ITEM_TITLES[item]);
   const lift = liftSpanAt(around, slot, day, start as Parameters<typeof liftSpanAt>[3]);
-  const broken = allBreaks(around, lift, slot.minutes);
-  if (broken.length > 0) return broken.map(({ rule, text }) => ({ rule, text }));
-  return shouldCosts(around, lift, slot.fresh).map(({ rule, text }) => ({ rule, text }));
+  const broken = allBreaks(around, lift);
+  if (broken.length > 0) return broken.map(reasonOf);
+  return shouldCosts(around, lift, slot.fresh).map(({ rule, text }) => ({ rule, text: text() }));
 }

@@ -1,10 +1,10 @@
-import { weekSpan, weekdayOf } from "../geometry";
+import { instantAt, weekSpan, weekdayOf } from "../geometry";
 import { ITEM_TITLES } from "../menu";
-import type { Candidate, Day, Minute, PlacementProblem, Reason } from "../types";
-import { dayBreak, timeBreak, type Break } from "./must-rules";
+import type { Candidate, Day, Instant, Minute, PlacementProblem, Reason } from "../types";
+import { dayBreak, timeBreak } from "./must-rules";
 import type { PlacementRequest, Slot } from "./request";
-import { shouldCosts, stayPutPrice } from "./should-costs";
-import { spanAt, surroundingsOf, type LiftSpan, type Surroundings } from "./surroundings";
+import { shouldPoints, stayPutPrice } from "./should-costs";
+import { surroundingsOf, type LiftSpan, type Surroundings } from "./surroundings";
 
 /**
  * Price of leaving a lift out: above all should costs that placing it could bring (a week's are some hundreds of points), and
@@ -18,18 +18,20 @@ export interface BuiltProblem {
   readonly problem: PlacementProblem;
   readonly around: Surroundings;
   /** By slot id: the rules that shut its candidates, most frequent first. */
-  readonly shut: ReadonlyMap<string, readonly Reason[]>;
+  readonly shut: ReadonlyMap<string, () => readonly Reason[]>;
 }
 
-/** A slot at a place. */
+/** A slot at a place. Members are named one by one: spreading an object here costs more than all rules together. */
 export function liftSpanAt(around: Surroundings, slot: Slot, day: Day, start: Minute): LiftSpan {
+  const startsAt = instantAt(around.input.zone, day, start);
   return {
-    ...spanAt(around.input, day, start, slot.minutes),
     id: slot.id,
-    item: slot.item,
     title: ITEM_TITLES[slot.item],
     day,
+    startsAt,
+    endsAt: (startsAt + slot.minutes) as Instant,
     startMinute: start,
+    item: slot.item,
     heavyLower: slot.heavyLower,
     primer: slot.primer,
   };
@@ -50,61 +52,64 @@ function startsOn(around: Surroundings, slot: Slot, day: Day): Minute[] {
   return [...starts].sort((a, b) => a - b) as Minute[];
 }
 
+/** Which rules shut a slot's candidates, how often; the first of each is told. */
 class ShutCount {
-  private readonly counts = new Map<string, { reason: Reason; count: number }>();
-  add({ rule, text }: Pick<Break, "text"> & { rule: string }, count = 1): void {
+  private readonly counts = new Map<string, { readonly text: () => string; count: number }>();
+
+  add(rule: string, text: () => string, count = 1): void {
     const known = this.counts.get(rule);
     if (known) known.count += count;
-    else this.counts.set(rule, { reason: { rule, text }, count });
+    else this.counts.set(rule, { text, count });
   }
+
   list(): Reason[] {
-    return [...this.counts.values()]
-      .sort((a, b) => b.count - a.count || (a.reason.rule < b.reason.rule ? -1 : 1))
-      .map(({ reason }) => reason);
+    return [...this.counts]
+      .sort(([a, x], [b, y]) => y.count - x.count || (a < b ? -1 : 1))
+      .map(([rule, { text }]) => ({ rule, text: text() }));
   }
 }
+
+/** A shut day counts as all its starts, about. */
+const STARTS_A_DAY = 24;
+
+const pastText = (): string => "Its days are already past.";
 
 function candidatesOf(around: Surroundings, slot: Slot, index: number, shut: ShutCount): Candidate[] {
   const found: Candidate[] = [];
   const { from, to } = weekSpan(around.input.bout.day, slot.week);
-  const basePrice = slot.base
-    ? stayPutPrice(around, liftSpanAt(around, slot, slot.base.day, slot.base.start).startsAt)
-    : 0;
+  const moving = basePrice(around, slot);
   for (let day = from; day <= to; day = (day + 1) as Day) {
-    const probe = liftSpanAt(around, slot, day, 0 as Minute);
-    const broken = dayBreak(around, probe);
-    if (broken) {
-      shut.add(broken, 24);
+    const closed = dayBreak(around, liftSpanAt(around, slot, day, 0 as Minute));
+    if (closed) {
+      shut.add(closed.rule, closed.text, STARTS_A_DAY);
       continue;
     }
     const starts = startsOn(around, slot, day);
     if (starts.length === 0)
-      shut.add({ rule: "free-hours", text: `No free hours long enough for ${slot.minutes} min.` });
+      shut.add("free-hours", () => `No free hours long enough for ${slot.minutes} min.`);
     for (const start of starts) {
       const lift = liftSpanAt(around, slot, day, start);
       if (lift.startsAt <= around.input.now) {
-        shut.add({ rule: "past", text: "Its days are already past." });
+        shut.add("past", pastText);
         continue;
       }
       const broken = timeBreak(around, lift);
       if (broken) {
-        shut.add(broken);
+        shut.add(broken.rule, broken.text);
         continue;
       }
+      const { startsAt, endsAt } = lift;
       const stays = slot.base?.day === day && slot.base.start === start;
-      const own = shouldCosts(around, lift, slot.fresh).reduce((sum, { points }) => sum + points, 0);
-      found.push({
-        item: index,
-        day,
-        start,
-        startsAt: lift.startsAt,
-        endsAt: lift.endsAt,
-        cost: own + (stays ? 0 : basePrice),
-      });
+      const cost = shouldPoints(around, lift, slot.fresh) + (stays ? 0 : moving);
+      found.push({ item: index, day, start, startsAt, endsAt, cost });
     }
   }
   return found;
 }
+
+/** What leaving the published place costs, by moving or by going unplaced alike; 0 for a new lift. */
+const basePrice = (around: Surroundings, slot: Slot): number =>
+  slot.base ? stayPutPrice(around, liftSpanAt(around, slot, slot.base.day, slot.base.start).startsAt) : 0;
 
 /** Days of a week that sport and standing lifts leave free; none where the week is partly past and had one already. */
 function freeDaysOf(around: Surroundings, week: number): Day[] {
@@ -121,11 +126,11 @@ function freeDaysOf(around: Surroundings, week: number): Day[] {
 export function placementProblem(request: PlacementRequest): BuiltProblem {
   const around = surroundingsOf(request.input, request.fixed, (item) => ITEM_TITLES[item]);
   const { rules } = request.input;
-  const shut = new Map<string, readonly Reason[]>();
+  const shut = new Map<string, () => readonly Reason[]>();
   const candidates = request.slots.flatMap((slot, index) => {
     const count = new ShutCount();
     const found = candidatesOf(around, slot, index, count);
-    shut.set(slot.id, count.list());
+    shut.set(slot.id, () => count.list());
     return found;
   });
   candidates.sort((a, b) => a.day - b.day || a.start - b.start || a.item - b.item);
@@ -135,12 +140,7 @@ export function placementProblem(request: PlacementRequest): BuiltProblem {
       key: slot.id,
       week: slot.week,
       heavy: slot.heavyLower,
-      unplaced:
-        UNPLACED +
-        IMPORTANCE_STEP * Math.max(0, MOST_ORDER - slot.order) +
-        (slot.base
-          ? stayPutPrice(around, liftSpanAt(around, slot, slot.base.day, slot.base.start).startsAt)
-          : 0),
+      unplaced: UNPLACED + IMPORTANCE_STEP * Math.max(0, MOST_ORDER - slot.order) + basePrice(around, slot),
     })),
     candidates,
     apart: [

@@ -37,13 +37,13 @@ interface DayStep {
 }
 
 interface State {
-  readonly open: number;
+  open: number;
   /** Bit g - 1: a lift stood g days ago. */
   readonly recent: number;
   readonly rested: boolean;
   readonly lastUntil: number;
   readonly heavyUntil: number;
-  readonly score: number;
+  score: number;
   readonly parent: State | null;
   /** Candidate chosen on the day that led here, or -1. */
   readonly chosen: number;
@@ -52,47 +52,39 @@ interface State {
 const least = (problem: PlacementProblem, among: "all" | "heavy"): number =>
   problem.apart.reduce((most, rule) => (rule.among === among ? Math.max(most, rule.minutes) : most), 0);
 
-/** Earliest start per day of each item's candidates; heavy lifts ask only the heavy ones. */
-function earliestStarts(problem: PlacementProblem): Map<Day, Map<number, number>> {
-  const days = new Map<Day, Map<number, number>>();
+/** Of one day: the earliest start, over all candidates and over heavy ones. */
+interface DayStarts {
+  all: number;
+  heavy: number;
+}
+
+function earliestStarts(problem: PlacementProblem): Map<Day, DayStarts> {
+  const days = new Map<Day, DayStarts>();
   for (const { day, item, startsAt } of problem.candidates) {
-    const starts = days.get(day) ?? new Map<number, number>();
-    days.set(day, starts);
-    starts.set(item, Math.min(starts.get(item) ?? Number.POSITIVE_INFINITY, startsAt));
+    let starts = days.get(day);
+    if (!starts) days.set(day, (starts = { all: Number.POSITIVE_INFINITY, heavy: Number.POSITIVE_INFINITY }));
+    if (startsAt < starts.all) starts.all = startsAt;
+    if (problem.items[item]?.heavy && startsAt < starts.heavy) starts.heavy = startsAt;
   }
   return days;
 }
 
-/** `until` where a candidate of another item on a later day starts before it, else 0. */
+/** Shortest day there is for a traveller, minutes: nine hours, eastwards across fifteen zones. */
+const SHORTEST_DAY = 540;
+
+/** `until` where a candidate on a later day starts before it, else 0: nothing then needs to remember it. */
 function keptUntil(
-  problem: PlacementProblem,
-  starts: ReadonlyMap<Day, ReadonlyMap<number, number>>,
-  candidate: Candidate,
+  starts: ReadonlyMap<Day, DayStarts>,
+  { day, startsAt }: Candidate,
   until: number,
-  heavyOnly: boolean,
+  among: keyof DayStarts,
 ): number {
-  // A day has at least 9 h even where a journey east shortens it: nothing further off can start before `until`.
-  const reach = Math.ceil((until - candidate.startsAt) / 540) + 1;
+  const reach = Math.ceil((until - startsAt) / SHORTEST_DAY) + 1;
   for (let ahead = 1; ahead <= reach; ahead++) {
-    for (const [item, first] of starts.get((candidate.day + ahead) as Day) ?? []) {
-      if (item !== candidate.item && first < until && (!heavyOnly || problem.items[item]?.heavy))
-        return until;
-    }
+    const first = starts.get((day + ahead) as Day);
+    if (first && first[among] < until) return until;
   }
   return 0;
-}
-
-/** Latest end on earlier days of other items: what can shut this candidate. */
-function canBeShut(
-  latestRelease: ReadonlyMap<Day, readonly { item: number; until: number }[]>,
-  candidate: Candidate,
-): boolean {
-  for (let back = 1; back <= 8; back++) {
-    for (const { item, until } of latestRelease.get((candidate.day - back) as Day) ?? []) {
-      if (item !== candidate.item && candidate.startsAt < until) return true;
-    }
-  }
-  return false;
 }
 
 /** Per day, the candidates worth trying: all that a time between lifts can touch, of the others only the best of each item. */
@@ -103,17 +95,26 @@ function optionsByDay(problem: PlacementProblem, bits: readonly number[]): Map<D
     (first, { startsAt }) => Math.min(first, startsAt),
     Number.POSITIVE_INFINITY,
   );
-  const releases = new Map<Day, { item: number; until: number }[]>();
-  const made = problem.candidates.map((candidate, index): Option & { day: Day; item: number } => {
-    const isHeavy = problem.items[candidate.item]?.heavy ?? false;
-    const lastUntil = keptUntil(problem, starts, candidate, candidate.endsAt + all, false);
-    const heavyUntil = isHeavy ? keptUntil(problem, starts, candidate, candidate.endsAt + heavy, true) : 0;
-    const until = Math.max(lastUntil, heavyUntil);
-    if (until > 0) {
-      const list = releases.get(candidate.day) ?? [];
-      releases.set(candidate.day, [...list, { item: candidate.item, until }]);
+  const days = new Map<Day, Option[]>();
+  // Candidates come by day, so everything that may shut one has been seen before it.
+  let latestRelease = 0;
+  let latestHeavyRelease = 0;
+  let today: Day | null = null;
+  let [releasesToday, heavyReleasesToday] = [0, 0];
+  let best = new Map<number, Option>();
+  problem.candidates.forEach((candidate, index) => {
+    if (candidate.day !== today) {
+      today = candidate.day;
+      latestRelease = Math.max(latestRelease, releasesToday);
+      latestHeavyRelease = Math.max(latestHeavyRelease, heavyReleasesToday);
+      best = new Map();
     }
-    return {
+    const isHeavy = problem.items[candidate.item]?.heavy ?? false;
+    const lastUntil = keptUntil(starts, candidate, candidate.endsAt + all, "all");
+    const heavyUntil = isHeavy ? keptUntil(starts, candidate, candidate.endsAt + heavy, "heavy") : 0;
+    releasesToday = Math.max(releasesToday, lastUntil);
+    heavyReleasesToday = Math.max(heavyReleasesToday, heavyUntil);
+    const option: Option = {
       candidate: index,
       bit: bits[candidate.item] ?? 0,
       score: candidate.cost * POINT + (candidate.startsAt - origin),
@@ -121,29 +122,27 @@ function optionsByDay(problem: PlacementProblem, bits: readonly number[]): Map<D
       startsAt: candidate.startsAt,
       lastUntil,
       heavyUntil,
-      day: candidate.day,
-      item: candidate.item,
     };
-  });
-  const days = new Map<Day, Option[]>();
-  const best = new Map<string, Option>();
-  for (const option of made) {
-    const candidate = problem.candidates[option.candidate];
-    if (!candidate) continue;
-    if (option.lastUntil > 0 || option.heavyUntil > 0 || canBeShut(releases, candidate)) {
-      days.set(option.day, [...(days.get(option.day) ?? []), option]);
-      continue;
+    let options = days.get(candidate.day);
+    if (!options) days.set(candidate.day, (options = []));
+    const touched =
+      lastUntil > 0 ||
+      heavyUntil > 0 ||
+      candidate.startsAt < latestRelease ||
+      (isHeavy && candidate.startsAt < latestHeavyRelease);
+    if (touched) {
+      options.push(option);
+      return;
     }
-    const key = `${option.item}|${option.day}`;
-    const known = best.get(key);
-    if (!known || option.score < known.score) best.set(key, option);
-  }
-  for (const option of best.values()) {
-    const day = problem.candidates[option.candidate]?.day;
-    if (day !== undefined) days.set(day, [...(days.get(day) ?? []), option]);
-  }
-  for (const options of days.values())
+    const known = best.get(candidate.item);
+    if (known && known.score <= option.score) return;
+    if (known) options.splice(options.indexOf(known), 1);
+    best.set(candidate.item, option);
+    options.push(option);
+  });
+  for (const options of days.values()) {
     options.sort((a, b) => a.bit - b.bit || a.score - b.score || a.candidate - b.candidate);
+  }
   return days;
 }
 
@@ -229,12 +228,25 @@ const forget = (state: State, floor: number): State =>
       }
     : state;
 
-const keyOf = ({ open, recent, rested, lastUntil, heavyUntil }: State): string =>
-  `${open},${recent},${rested ? 1 : 0},${lastUntil},${heavyUntil}`;
+/**
+ * Key of a state, exact in a double: times are counted from `origin`, and 20 weeks of minutes take 18 bits each; open items
+ * take 8, days 3, rest 1.
+ */
+const keyOf = (state: State, origin: number): number => {
+  const last = state.lastUntil === 0 ? 0 : state.lastUntil - origin + 1;
+  const heavy = state.heavyUntil === 0 ? 0 : state.heavyUntil - origin + 1;
+  return (
+    ((last * 2 ** 18 + heavy) * 2 ** 8 + state.open) * 2 ** 4 + state.recent * 2 + (state.rested ? 1 : 0)
+  );
+};
 
 /** Optimum and choice. Takes only the value; deterministic; never throws for a well-formed problem. */
 export function solvePlacement(problem: PlacementProblem): PlacementSolution {
   const { steps, lost } = stepsOf(problem);
+  const origin = problem.candidates.reduce(
+    (first, { startsAt }) => Math.min(first, startsAt),
+    Number.POSITIVE_INFINITY,
+  );
   const window = (1 << problem.spread.length) - 1;
   const spreadScore = Array.from({ length: window + 1 }, (_, recent) =>
     problem.spread.reduce((sum, cost, gap) => (recent & (1 << gap) ? sum + cost * POINT : sum), 0),
@@ -243,7 +255,7 @@ export function solvePlacement(problem: PlacementProblem): PlacementSolution {
     { open: 0, recent: 0, rested: false, lastUntil: 0, heavyUntil: 0, score: lost, parent: null, chosen: -1 },
   ];
   for (const step of steps) {
-    const next = new Map<string, State>();
+    const next = new Map<number, State>();
     const settle = (state: State): void => {
       let { score, open } = state;
       for (const { bit, score: price } of step.closes)
@@ -252,17 +264,27 @@ export function solvePlacement(problem: PlacementProblem): PlacementSolution {
           open &= ~bit;
         }
       if (step.noRest > 0 && !state.rested) score += step.noRest;
-      const settled = { ...state, score, open };
-      const key = keyOf(settled);
+      state.score = score;
+      state.open = open;
+      const key = keyOf(state, origin);
       const known = next.get(key);
-      if (!known || score < known.score) next.set(key, settled);
+      if (!known || score < known.score) next.set(key, state);
     };
     for (const before of layer) {
       const state = forget(before, step.floor);
       const open = state.open | step.opens;
       const rested = step.weekBegins ? false : state.rested;
       const shifted = (state.recent << 1) & window;
-      settle({ ...state, open, rested: rested || step.free, recent: shifted, parent: state, chosen: -1 });
+      settle({
+        open,
+        recent: shifted,
+        rested: rested || step.free,
+        lastUntil: state.lastUntil,
+        heavyUntil: state.heavyUntil,
+        score: state.score,
+        parent: state,
+        chosen: -1,
+      });
       for (const option of step.options) {
         if (!(open & option.bit) || option.startsAt < state.lastUntil) continue;
         if (option.heavy && option.startsAt < state.heavyUntil) continue;

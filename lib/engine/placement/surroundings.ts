@@ -1,5 +1,6 @@
-import { instantAt, weeksOutOf } from "../geometry";
+import { instantAt } from "../geometry";
 import type { Day, Instant, Item, Minute, PlanInput, SportKind } from "../types";
+import { residualLoad, type ResidualLoad } from "./residual";
 import type { FixedLift } from "./request";
 
 /** Anything that takes time, as instants. */
@@ -35,10 +36,12 @@ export interface Surroundings {
   /** Days on which nothing is lifted, and why. */
   readonly shutDays: ReadonlyMap<Day, string>;
   readonly fixed: readonly LiftSpan[];
+  readonly fixedHeavy: readonly LiftSpan[];
   readonly fixedByDay: ReadonlyMap<Day, readonly LiftSpan[]>;
+  readonly residual: ResidualLoad;
 }
 
-export function spanAt(
+function spanAt(
   input: PlanInput,
   day: Day,
   start: Minute,
@@ -108,7 +111,9 @@ export function surroundingsOf(
     hard: sport.filter(({ kind }) => kind === "hard-sparring"),
     shutDays: shutDaysOf(input),
     fixed: lifts,
+    fixedHeavy: lifts.filter(({ heavyLower }) => heavyLower),
     fixedByDay: groupByDay(lifts),
+    residual: residualLoad(sport, input.rules["fresh-first.hours"] * 60),
   };
 }
 
@@ -133,7 +138,3 @@ export function lastBefore<T extends Span>(list: readonly T[], instant: number):
   }
   return list[low - 1] ?? null;
 }
-
-export const daysOutOfLift = (input: PlanInput, lift: Pick<LiftSpan, "day">): number =>
-  input.bout.day - lift.day;
-export const weekOfDay = (input: PlanInput, day: Day): number => weeksOutOf(input.bout.day, day);
