@@ -22,10 +22,28 @@ interface StartFormProps extends StartFieldsProps {
   readonly weeksGone: number;
 }
 
-const gone = (weeks: number): string | undefined => {
-  if (weeks === 0) return undefined;
-  return weeks === 1 ? "The first week is over already." : `The first ${weeks} weeks are over already.`;
-};
+interface WeeksGoneProps {
+  readonly gone: number;
+  readonly weeks: number;
+  readonly onShorten: (weeks: number) => void;
+}
+
+/** Short notice is normal: one press takes the weeks off that nobody can train any more. */
+function WeeksGone({ gone, weeks, onShorten }: WeeksGoneProps) {
+  const left = weeks - gone;
+  return (
+    <>
+      {gone === 1 ? "The first week is over." : `The first ${gone} weeks are over.`}{" "}
+      <button
+        type="button"
+        className="rounded font-semibold text-ink underline underline-offset-2 max-sm:min-h-control"
+        onClick={() => onShorten(left)}
+      >
+        Make it {left === 1 ? "1 week" : `${left} weeks`}
+      </button>
+    </>
+  );
+}
 
 /** The inputs of the start page. Names are those of the address, so that the form also works before any script runs. */
 export function StartForm({ params, problems, onChange, zone, weeksGone }: StartFormProps) {
@@ -47,7 +65,15 @@ export function StartForm({ params, problems, onChange, zone, weeksGone }: Start
           required
         />
       </Field>
-      <Field label="Camp length" error={problems.weeks} hint={gone(weeksGone)}>
+      <Field
+        label="Camp length"
+        error={problems.weeks}
+        hint={
+          weeksGone > 0 ? (
+            <WeeksGone gone={weeksGone} weeks={params.weeks} onShorten={(weeks) => onChange({ weeks })} />
+          ) : undefined
+        }
+      >
         <Select
           name="weeks"
           choices={WEEK_CHOICES}
