@@ -4,7 +4,7 @@ import { allBreaks, reasonOf } from "./must-rules";
 import { liftSpanAt, placementProblem } from "./problem";
 import type { PlacedSlot, Placement, PlacementRequest, UnplacedSlot } from "./request";
 import { shouldCosts } from "./should-costs";
-import { solvePlacement } from "./solve";
+import { solvePlacement } from "./solver";
 import { lastBefore, nextFrom, surroundingsOf, type LiftSpan, type Surroundings } from "./surroundings";
 
 const hours = (minutes: number): string => `${Math.round(minutes / 60)} h`;
