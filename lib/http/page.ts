@@ -5,7 +5,7 @@ import type { ActiveMember } from "@/lib/auth/current-member";
 import { now } from "@/lib/clock";
 import { AppError } from "@/lib/errors";
 import { can, type Action } from "@/lib/policy";
-import type { TeamContext } from "@/lib/services/context";
+import type { PublicContext, TeamContext } from "@/lib/services/context";
 
 /**
  * What a page of a team works with: the context of services and the person who looks. Leads to the sign-in where nobody
@@ -27,3 +27,6 @@ export async function orNotFound<T>(work: Promise<T>): Promise<T> {
     throw error;
   }
 }
+
+/** What a page for anyone works with. */
+export const publicContext = (): Pick<PublicContext, "db" | "now"> => ({ db: database(), now: now() });
