@@ -57,7 +57,10 @@ export async function claimMail(tx: Tx, mailId: string): Promise<(MailRow & { st
   return row ?? null;
 }
 
-/** Records the outcome of one try at sending. */
+/**
+ * Records the outcome of one try at sending. A mail that is done with keeps no content: it may hold a link that lets its
+ * reader in, and what a camp was like is in its revisions.
+ */
 export async function updateMailAfterTry(
   tx: Tx,
   mailId: string,
@@ -66,7 +69,12 @@ export async function updateMailAfterTry(
 ): Promise<void> {
   await tx
     .update(mails)
-    .set({ status, attempts: sql`${mails.attempts} + 1`, ...(status === "sent" && { sentAt: at }) })
+    .set({
+      status,
+      attempts: sql`${mails.attempts} + 1`,
+      ...(status === "sent" && { sentAt: at }),
+      ...(status !== "waiting" && { text: "", html: "", headers: {} }),
+    })
     .where(eq(mails.id, mailId));
 }
 

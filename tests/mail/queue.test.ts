@@ -69,6 +69,26 @@ describe("a queued mail", () => {
   });
 });
 
+describe("a mail that was sent", () => {
+  it("leaves no content behind: its links may be keys", async () => {
+    const mail = letter({
+      text: "http://bellward.test/reset/secret",
+      html: "<p>http://bellward.test/reset/secret</p>",
+    });
+    await db.transaction((tx) => queueMail(tx, mail));
+    await runDueJobs(url, deps);
+    expect(await rowOf(mail.key)).toMatchObject({
+      status: "sent",
+      subject: mail.subject,
+      text: "",
+      html: "",
+      headers: {},
+    });
+    const jobs = await sql`select payload::text from graphile_worker._private_jobs`;
+    expect(JSON.stringify(jobs)).not.toContain("secret");
+  });
+});
+
 describe("a mail server that is down", () => {
   it("delays mail with a backoff and loses none: it goes out when the server is back", async () => {
     const mail = letter();
