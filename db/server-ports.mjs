@@ -1,5 +1,5 @@
 // Ports, processes and the lock that keeps two starters of one cluster apart. Plain Node, no dependency.
-import { randomInt } from "node:crypto";
+import { randomInt, randomUUID } from "node:crypto";
 import { existsSync, linkSync, readFileSync, rmSync, writeFileSync } from "node:fs";
 import { createServer } from "node:net";
 import { setTimeout as pause } from "node:timers/promises";
@@ -44,7 +44,7 @@ const LOCK_PATIENCE_MS = 180_000;
  * @returns {Promise<T>}
  */
 export async function withLock(file, work) {
-  const mine = `${file}.${process.pid}`;
+  const mine = `${file}.${randomUUID()}`;
   const until = Date.now() + LOCK_PATIENCE_MS;
   writeFileSync(mine, String(process.pid), { mode: 0o600 });
   try {

@@ -177,6 +177,9 @@ async function ensureDatabase(dir) {
  * @returns {Promise<{ url: string; port: number; started: boolean }>}
  */
 export async function startCluster({ dir = DEFAULT_DIR, fast = false, log = quiet } = {}) {
+  // Who lives and who holds a lock is read from /proc.
+  if (process.platform !== "linux")
+    throw new SetupError("a local PostgreSQL is started on Linux only; elsewhere set DATABASE_URL");
   mkdirSync(dir, { recursive: true, mode: 0o755 });
   chmodSync(dir, 0o755);
   return withLock(path.join(dir, "lock"), async () => {

@@ -4,20 +4,28 @@ import { explain, run, SetupError } from "./command.mjs";
 import { step } from "./progress.mjs";
 import { inRoot, ROOT } from "./project.mjs";
 
-const packagesOf = (file) =>
-  Object.entries(JSON.parse(readFileSync(file, "utf8")).packages ?? {}).filter(([place]) => place !== "");
+const packagesOf = (file) => JSON.parse(readFileSync(file, "utf8")).packages ?? {};
+
+/**
+ * Whether what is installed differs from what the lock file wants; both as npm's `packages` by place.
+ * @param {Record<string, { version?: string; integrity?: string; optional?: boolean; devOptional?: boolean; peer?: boolean }>} wanted
+ * @param {Record<string, { version?: string; integrity?: string }>} installed
+ */
+export function packagesDiffer(wanted, installed) {
+  return Object.entries(wanted).some(([place, asked]) => {
+    if (place === "") return false;
+    const found = installed[place];
+    // Optional ones may be for other processors and systems.
+    if (!found) return asked.optional !== true && asked.devOptional !== true && asked.peer !== true;
+    return found.version !== asked.version || found.integrity !== asked.integrity;
+  });
+}
 
 /** Whether node_modules holds what package-lock.json asks for. npm writes its own copy of the lock last, when all is there. */
 export function packagesAreCurrent() {
   const installed = inRoot("node_modules", ".package-lock.json");
   if (!existsSync(installed)) return false;
-  const there = new Map(packagesOf(installed));
-  return packagesOf(inRoot("package-lock.json")).every(([place, wanted]) => {
-    const found = there.get(place);
-    // Optional ones are for other processors and systems.
-    if (!found) return wanted.optional === true || wanted.devOptional === true || wanted.peer === true;
-    return found.version === wanted.version && found.integrity === wanted.integrity;
-  });
+  return !packagesDiffer(packagesOf(inRoot("package-lock.json")), packagesOf(installed));
 }
 
 /** Installs the packages of the lock file when they are missing or stale. */
