@@ -50,7 +50,7 @@ function Gutter({ row }: Pick<CampWeekProps, "row">) {
 
 function BoutCell({ bout }: Pick<CampWeekProps, "bout">) {
   return (
-    <div className="flex h-full flex-col justify-between gap-1 bg-ink p-1.5 text-ink-on sm:p-2">
+    <div className="flex flex-1 flex-col justify-between gap-1 p-1.5 text-ink-on sm:p-2">
       <span className="text-2xs sm:text-xs">{dayText(bout.day)}</span>
       <span className="block font-display text-bout max-sm:text-week">
         BOUT
@@ -62,57 +62,68 @@ function BoutCell({ bout }: Pick<CampWeekProps, "bout">) {
 
 const PAST = "bg-[repeating-linear-gradient(135deg,transparent_0_6px,var(--line-soft)_6px_7px)]";
 
+type DayCellProps = Omit<CampWeekProps, "row"> & WeekRow["days"][number];
+
+function DayCell({ day, entries, bout, today, open, whyId, onOpen }: DayCellProps) {
+  const isBout = day === bout.day;
+  return (
+    <div
+      role="cell"
+      className={classNames(
+        "min-w-0 border-line-soft max-sm:min-h-14 max-sm:not-nth-[2]:border-l sm:border-l",
+        isBout ? "flex flex-col bg-ink" : "px-0.5 pt-1 pb-1.5 sm:px-1.5",
+        day < today && PAST,
+      )}
+    >
+      {isBout ? (
+        <BoutCell bout={bout} />
+      ) : (
+        <span
+          className={classNames(
+            "block px-0.5 text-2xs",
+            day === today ? "font-semibold text-ink" : "text-ink-3",
+          )}
+        >
+          {dayNumber(day)}
+          {day === today ? <span className="max-sm:sr-only"> today</span> : null}
+        </span>
+      )}
+      {entries.map((entry) => (
+        <button
+          key={entry.id}
+          type="button"
+          aria-label={entryText(entry)}
+          aria-expanded={open === entry.id}
+          aria-controls={open === entry.id ? whyId : undefined}
+          onClick={() => onOpen(entry.id)}
+          className={classNames(
+            "mt-1 block rounded",
+            isBout ? "mx-1 mb-1.5 focus-visible:outline-paper" : "w-full",
+          )}
+        >
+          <SessionChip
+            look={entry.look}
+            title={entry.title}
+            past={day < today}
+            marked={open === entry.id}
+            markOnPhone
+          />
+        </button>
+      ))}
+    </div>
+  );
+}
+
 /** One camp week of `CampGrid`: its gutter and its seven days. */
-export function CampWeek({ row, bout, today, open, whyId, onOpen }: CampWeekProps) {
+export function CampWeek({ row, ...rest }: CampWeekProps) {
   return (
     <div
       role="row"
       className="grid grid-cols-7 border-t border-line sm:min-h-[76px] sm:grid-cols-[118px_repeat(7,minmax(0,1fr))]"
     >
       <Gutter row={row} />
-      {row.days.map(({ day, entries }) => (
-        <div
-          role="cell"
-          key={day}
-          className={classNames(
-            "min-w-0 border-line-soft max-sm:min-h-14 max-sm:not-nth-[2]:border-l sm:border-l",
-            day === bout.day ? "" : "px-0.5 pt-1 pb-1.5 sm:px-1.5",
-            day < today && PAST,
-          )}
-        >
-          {day === bout.day ? (
-            <BoutCell bout={bout} />
-          ) : (
-            <span
-              className={classNames(
-                "block px-0.5 text-2xs",
-                day === today ? "font-semibold text-ink" : "text-ink-3",
-              )}
-            >
-              {dayNumber(day)}
-              {day === today ? <span className="max-sm:sr-only"> today</span> : null}
-            </span>
-          )}
-          {entries.map((entry) => (
-            <button
-              key={entry.id}
-              type="button"
-              aria-label={entryText(entry)}
-              aria-expanded={open === entry.id}
-              aria-controls={open === entry.id ? whyId : undefined}
-              onClick={() => onOpen(entry.id)}
-              className="mt-1 block w-full rounded"
-            >
-              <SessionChip
-                look={entry.look}
-                title={entry.title}
-                past={day < today}
-                marked={open === entry.id}
-                markOnPhone
-              />
-            </button>
-          ))}
-        </div>
+      {row.days.map((cell) => (
+        <DayCell key={cell.day} {...cell} {...rest} />
       ))}
     </div>
   );

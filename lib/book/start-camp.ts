@@ -36,7 +36,8 @@ function weeklySport(params: StartParams): WeeklySport[] {
       start: params.hardTime,
       minutes: HARD_MINUTES,
       effort: 8,
-      until: params.hardUntil,
+      // Never on the day itself.
+      until: Math.max(1, params.hardUntil),
     },
     {
       kind: "skill",
