@@ -20,7 +20,7 @@ const envSchema = z
     APP_URL: z.url().optional(),
     /** Folder of the development mail catcher. Set: /outbox shows its mails. Unset: there is no /outbox. */
     BELLWARD_OUTBOX_DIR: z.string().min(1).optional(),
-    /** Signs mails (DKIM) when all three are set; the key is PEM, its line breaks may be written as \\n. */
+    /** Signs mails (DKIM) when all three are set; the key is PEM, its line breaks may be written as \n. */
     DKIM_DOMAIN: z.string().optional(),
     DKIM_SELECTOR: z.string().optional(),
     DKIM_KEY: z.string().optional(),

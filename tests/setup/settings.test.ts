@@ -1,3 +1,4 @@
+import { readFileSync } from "node:fs";
 import { describe, expect, it, vi } from "vitest";
 import { now } from "@/lib/clock";
 import { parseEnv } from "@/lib/env";
@@ -23,6 +24,15 @@ describe("settings", () => {
       PLAN_RATE_PER_MINUTE: 60,
     });
     expect(() => parseEnv({ ...GOOD, MAIL_FROM: "" })).toThrow(/MAIL_FROM/);
+  });
+
+  it("each has its place in .env.example", () => {
+    const schema = readFileSync("lib/env.ts", "utf8");
+    const example = readFileSync(".env.example", "utf8");
+    const names = [...schema.matchAll(/^ {4}([A-Z_]+): /gm)].map(([, name]) => name ?? "");
+    expect(names).toContain("DATABASE_URL");
+    // NODE_ENV is set by the commands, never by hand.
+    expect(names.filter((name) => name !== "NODE_ENV" && !example.includes(`\n${name}=`))).toEqual([]);
   });
 
   it("one message names everything that is wrong", () => {
