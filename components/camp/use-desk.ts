@@ -88,7 +88,7 @@ export function useDesk(view: CampView, now: Instant, selected: string | null): 
     standing,
     shown,
     preview,
-    people: held ? view.others.filter((role) => concerns(role, held.knockOn)).length : 0,
+    people: held ? view.others.filter((role) => concerns(role, held)).length : 0,
     dispatch,
     tryChange: (next) => dispatch({ type: "try", change: next, key: crypto.randomUUID() }),
     save: () => {

@@ -87,7 +87,7 @@ async function tell(
   revision: number,
 ): Promise<number> {
   const others = await othersOf(tx, ctx, camp.athlete.id);
-  const userIds = others.filter(({ role }) => concerns(role, preview.knockOn)).map(({ userId }) => userId);
+  const userIds = others.filter(({ role }) => concerns(role, preview)).map(({ userId }) => userId);
   if (userIds.length > 0) {
     const urgent = isUrgent(preview, instantOf(ctx.now));
     await queueChangeMail(tx, {
