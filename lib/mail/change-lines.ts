@@ -40,7 +40,7 @@ function placeText(zone: readonly OffsetStep[], place: Place, readerZone: string
 }
 
 const sessionUrl = (campId: string, sessionId: string): string =>
-  `${mailSettings().appUrl}/camps/${campId}#session-${encodeURIComponent(sessionId)}`;
+  `${mailSettings().appUrl}/camps/${campId}?session=${encodeURIComponent(sessionId)}`;
 
 function moveText(was: Place | null, is: Place | null, context: LineContext, gone: string): string {
   const from = was && placeText(context.zoneBefore, was, context.readerZone);

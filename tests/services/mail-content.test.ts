@@ -26,8 +26,8 @@ describe("what the mail says", () => {
     const [caught] = await mailsTo("athlete");
     const html = (caught?.mail.html || "").replaceAll("&#39;", "'");
     const links = [
-      `http://bellward.test/camps/${campId}#session-strength-a.5`,
-      `http://bellward.test/camps/${campId}#session-sat%402026-12-05`,
+      `http://bellward.test/camps/${campId}?session=strength-a.5`,
+      `http://bellward.test/camps/${campId}?session=sat%402026-12-05`,
     ];
     for (const fact of [...FACTS, ...links, "Saved by head", "Petra Holm-Aziz"]) {
       expect(caught?.mail.text).toContain(fact);

@@ -71,7 +71,7 @@ describe("a saved change", () => {
     expect(knockOn.lifts.length).toBeGreaterThan(0);
     for (const effect of knockOn.lifts) {
       expect(text).toContain(ITEM_TITLES[effect.item]);
-      expect(text).toContain(`#session-${encodeURIComponent(effect.id)}`);
+      expect(text).toContain(`?session=${encodeURIComponent(effect.id)}`);
       for (const { text: why } of effect.because) expect(text).toContain(why);
       if (effect.setsBefore !== null && effect.setsAfter !== null && effect.setsBefore !== effect.setsAfter) {
         expect(text).toContain(`${effect.setsBefore} → ${effect.setsAfter} sets`);
