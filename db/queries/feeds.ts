@@ -1,6 +1,8 @@
-import { and, asc, count, desc, eq, gt, gte, isNull, lt, or, sql } from "drizzle-orm";
-import type { Tx } from "../client";
-import { athletes, camps, feeds, memberships, sessions, teams } from "../schema";
+import { and, asc, count, desc, eq, gt, gte, isNull, or, sql } from "drizzle-orm";
+import type { Lift } from "../../lib/engine/types";
+import type { Role } from "../../lib/policy/roles";
+import type { Database, Tx } from "../client";
+import { athletes, camps, feeds, sessions } from "../schema";
 
 export type FeedRow = typeof feeds.$inferSelect;
 
@@ -12,102 +14,109 @@ export interface FeedWindow {
   readonly cancelledAfter: Date;
 }
 
-/** Camps that a feed shows. */
-const shown = ({ boutsFrom }: FeedWindow) =>
-  and(
-    eq(camps.teamId, feeds.teamId),
-    or(eq(feeds.scope, "team"), eq(camps.athleteId, feeds.athleteId)),
-    gte(camps.boutDate, boutsFrom),
-  );
+/** A feed as its address finds it, with its owner's membership as it is now. */
+export interface ReadableFeed {
+  readonly id: string;
+  readonly teamId: string;
+  readonly scope: FeedRow["scope"];
+  readonly athleteId: string | null;
+  readonly discreet: boolean;
+  readonly teamName: string;
+  readonly athleteName: string | null;
+  readonly role: Role;
+  readonly memberAthleteId: string | null;
+  /** Camps that are shown, with revision and athlete's name; null where there are none. Changes with whatever is saved. */
+  readonly state: string | null;
+  /** True where a session may have been cancelled inside the window, so that what is shown changes as the window moves. */
+  readonly recent: boolean;
+  /** True where the last reading is not noted yet. */
+  readonly unnoted: boolean;
+}
 
 /**
- * The feed behind a token that is not revoked, its owner's membership as it is now, and a fingerprint of all that the
- * calendar would show: camps with their revisions and athletes' names, and how many cancelled sessions are still shown.
- * One statement, because most readings end here.
+ * The feed behind a token that is not revoked. Most readings end with this question and nothing else, so it is one
+ * statement by the driver itself, which keeps it prepared, as the query builder does not.
  */
-export async function findFeedByToken(tx: Tx, tokenHash: string, window: FeedWindow) {
-  const state = tx
-    .select({
-      text: sql<
-        string | null
-      >`string_agg(concat(${camps.id}, ':', ${camps.revision}, ':', ${athletes.name}), ';' order by ${camps.id})`.as(
-        "state_text",
-      ),
-    })
-    .from(camps)
-    .innerJoin(athletes, eq(athletes.id, camps.athleteId))
-    .where(shown(window));
-  const cancelled = tx
-    .select({ n: count().as("cancelled_n") })
-    .from(sessions)
-    .innerJoin(camps, eq(camps.id, sessions.campId))
-    .where(
-      and(shown(window), eq(sessions.status, "cancelled"), gt(sessions.changedAt, window.cancelledAfter)),
-    );
-  const [row] = await tx
-    .select({
-      id: feeds.id,
-      teamId: feeds.teamId,
-      scope: feeds.scope,
-      athleteId: feeds.athleteId,
-      discreet: feeds.discreet,
-      lastReadAt: feeds.lastReadAt,
-      teamName: teams.name,
-      athleteName: athletes.name,
-      role: memberships.role,
-      memberAthleteId: memberships.athleteId,
-      state: sql<string | null>`(${state})`,
-      cancelled: sql<string>`(${cancelled})`,
-    })
-    .from(feeds)
-    .innerJoin(teams, eq(teams.id, feeds.teamId))
-    .leftJoin(athletes, eq(athletes.id, feeds.athleteId))
-    .innerJoin(memberships, and(eq(memberships.teamId, feeds.teamId), eq(memberships.userId, feeds.userId)))
-    .where(and(eq(feeds.tokenHash, tokenHash), isNull(feeds.revokedAt)));
+export async function findFeedByToken(
+  db: Database,
+  tokenHash: string,
+  { boutsFrom, cancelledAfter }: FeedWindow,
+  notedAfter: Date,
+): Promise<ReadableFeed | null> {
+  const [row] = await db.$client<ReadableFeed[]>`
+    select f.id, f.team_id as "teamId", f.scope, f.athlete_id as "athleteId", f.discreet,
+      t.name as "teamName", a.name as "athleteName", m.role, m.athlete_id as "memberAthleteId",
+      shown.state, coalesce(shown.recent, false) as recent,
+      (f.last_read_at is null or f.last_read_at <= ${notedAfter.toISOString()}::timestamptz) as unnoted
+    from feeds f
+    join teams t on t.id = f.team_id
+    join memberships m on m.team_id = f.team_id and m.user_id = f.user_id
+    left join athletes a on a.id = f.athlete_id
+    cross join lateral (
+      select string_agg(c.id || ':' || c.revision || ':' || ca.name, ';' order by c.id) as state,
+        bool_or(c.changed_at > ${cancelledAfter.toISOString()}::timestamptz) as recent
+      from camps c
+      join athletes ca on ca.id = c.athlete_id
+      where c.team_id = f.team_id and (f.athlete_id is null or c.athlete_id = f.athlete_id) and c.bout_date >= ${boutsFrom}::date
+    ) shown
+    where f.token_hash = ${tokenHash} and f.revoked_at is null`;
   return row ?? null;
 }
-export type ReadableFeed = NonNullable<Awaited<ReturnType<typeof findFeedByToken>>>;
 
-/** Sessions of the camps that a feed shows, in order. */
-export async function listFeedSessions(tx: Tx, teamId: string, feedId: string, window: FeedWindow) {
+/** What a calendar says of a lift. */
+const liftFacts = sql<Pick<
+  Lift,
+  "sets" | "intensity" | "effort"
+> | null>`case when ${sessions.lift} is not null then
+  jsonb_build_object('sets', ${sessions.lift}->'sets', 'intensity', ${sessions.lift}->'intensity', 'effort', ${sessions.lift}->'effort') end`;
+
+/** Sessions of the camps that a feed shows (of one athlete, or of the whole team), in order. */
+export async function listFeedSessions(
+  tx: Tx,
+  teamId: string,
+  feed: Pick<ReadableFeed, "athleteId">,
+  { boutsFrom, cancelledAfter }: FeedWindow,
+) {
   return tx
     .select({
-      session: sessions,
-      athlete: { id: athletes.id, name: athletes.name },
+      uid: sessions.uid,
+      source: sessions.source,
+      kind: sessions.kind,
+      title: sessions.title,
+      place: sessions.place,
+      day: sessions.day,
+      start: sessions.start,
+      startsAt: sessions.startsAt,
+      endsAt: sessions.endsAt,
+      effort: sessions.effort,
+      lift: liftFacts,
+      status: sessions.status,
+      sequence: sessions.sequence,
+      changedAt: sessions.changedAt,
+      athleteId: camps.athleteId,
+      athleteName: athletes.name,
       boutZone: camps.boutZone,
     })
-    .from(feeds)
-    .innerJoin(camps, shown(window))
+    .from(camps)
     .innerJoin(athletes, eq(athletes.id, camps.athleteId))
     .innerJoin(sessions, and(eq(sessions.teamId, camps.teamId), eq(sessions.campId, camps.id)))
     .where(
       and(
-        eq(feeds.teamId, teamId),
-        eq(feeds.id, feedId),
-        or(eq(sessions.status, "confirmed"), gt(sessions.changedAt, window.cancelledAfter)),
+        eq(camps.teamId, teamId),
+        feed.athleteId === null ? undefined : eq(camps.athleteId, feed.athleteId),
+        gte(camps.boutDate, boutsFrom),
+        or(eq(sessions.status, "confirmed"), gt(sessions.changedAt, cancelledAfter)),
       ),
     )
     .orderBy(asc(sessions.startsAt), asc(sessions.uid));
 }
 
-/** Notes a reading, but no more often than `unlessAfter` says: a calendar that asks each minute costs no write each minute. */
-export async function markFeedRead(
-  tx: Tx,
-  teamId: string,
-  feedId: string,
-  now: Date,
-  unlessAfter: Date,
-): Promise<void> {
+/** Notes a reading. */
+export async function markFeedRead(tx: Tx, teamId: string, feedId: string, now: Date): Promise<void> {
   await tx
     .update(feeds)
     .set({ lastReadAt: now })
-    .where(
-      and(
-        eq(feeds.teamId, teamId),
-        eq(feeds.id, feedId),
-        or(isNull(feeds.lastReadAt), lt(feeds.lastReadAt, unlessAfter)),
-      ),
-    );
+    .where(and(eq(feeds.teamId, teamId), eq(feeds.id, feedId)));
 }
 
 const ofUser = (teamId: string, userId: string) =>

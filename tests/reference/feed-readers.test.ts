@@ -36,16 +36,13 @@ function campFeed(book: CampBook) {
   const planned = sessionsOf(book, input, plan);
   const athleteId = "0b9a52c4-0000-4000-8000-000000000000";
   const rows = planned.map((session, n) => ({
-    session: {
-      ...session,
-      teamId: "",
-      campId: "",
-      uid: `0b9a52c4-0000-4000-8000-${String(n).padStart(12, "0")}`,
-      status: "confirmed" as const,
-      sequence: n % 4,
-      changedAt: CHANGED,
-    },
-    athlete: { id: athleteId, name: "Tamsin Velloso" },
+    ...session,
+    uid: `0b9a52c4-0000-4000-8000-${String(n).padStart(12, "0")}`,
+    status: "confirmed" as const,
+    sequence: n % 4,
+    changedAt: CHANGED,
+    athleteId,
+    athleteName: "Tamsin Velloso",
     boutZone: book.bout.timeZone,
   }));
   const events = eventsOf(rows, { role: "athlete", athleteId }, "athlete");
@@ -55,7 +52,7 @@ function campFeed(book: CampBook) {
     events,
     refreshedAt: CHANGED,
   });
-  return { text, events, planned: new Map(rows.map(({ session }) => [session.uid, session])) };
+  return { text, events, planned: new Map(rows.map((session) => [session.uid, session])) };
 }
 
 const expected = (event: FeedEvent): Omit<ReadEvent, "properties"> => ({

@@ -6,7 +6,7 @@ import {
   type FeedWindow,
   type ReadableFeed,
 } from "@/db/queries/feeds";
-import type { Database, Tx } from "@/db/client";
+import type { Database } from "@/db/client";
 import { buildFeed } from "@/lib/calendar/feed";
 import { notFound } from "@/lib/errors";
 import type { Member } from "@/lib/policy";
@@ -25,32 +25,31 @@ const NOTE_EVERY_MS = 3_600_000;
 /** Raise it when the same sessions are written another way: calendars then fetch them again. */
 const FORMAT = 1;
 
-const windowAt = (now: Date): FeedWindow => ({
-  boutsFrom: new Date(now.getTime() - PAST_DAYS * DAY_MS).toISOString().slice(0, 10),
-  cancelledAfter: new Date(now.getTime() - CANCELLED_DAYS * DAY_MS),
-});
+/** What is shown moves with the day (UTC), not with the minute: a tag then holds for a day at least. */
+function windowAt(now: Date): FeedWindow & { readonly day: string } {
+  const day = now.toISOString().slice(0, 10);
+  const midnight = Date.parse(day);
+  return {
+    day,
+    boutsFrom: new Date(midnight - PAST_DAYS * DAY_MS).toISOString().slice(0, 10),
+    cancelledAfter: new Date(midnight - CANCELLED_DAYS * DAY_MS),
+  };
+}
 
 const memberOf = ({ role, memberAthleteId }: ReadableFeed): Member => ({ role, athleteId: memberAthleteId });
 
-/** Strong: the same tag is the same bytes (RFC 9110 8.8.3). What is in it decides all that `build` writes. */
-function tagOf(feed: ReadableFeed): string {
-  const { id, scope, discreet, teamName, role, memberAthleteId, state, cancelled } = feed;
-  const all = JSON.stringify([
-    FORMAT,
-    id,
-    scope,
-    discreet,
-    teamName,
-    role,
-    memberAthleteId,
-    state,
-    cancelled,
-  ]);
+/**
+ * Strong: the same tag is the same bytes (RFC 9110 8.8.3). What is in it decides all that is written: the sessions follow
+ * from the camps' revisions, and from the day as long as one of them may still show a cancelled session.
+ */
+function tagOf({ unnoted: _, recent, ...feed }: ReadableFeed, day: string): string {
+  const all = JSON.stringify([FORMAT, Object.entries(feed).sort(), recent ? day : null]);
   return `"${createHash("sha256").update(all).digest("base64url").slice(0, 32)}"`;
 }
 
-async function openFeed(tx: Tx, token: string, window: FeedWindow): Promise<ReadableFeed> {
-  const feed = isToken(token) ? await findFeedByToken(tx, hashOf(token), window) : null;
+async function openFeed(db: Database, token: string, now: Date): Promise<ReadableFeed> {
+  const notedAfter = new Date(now.getTime() - NOTE_EVERY_MS);
+  const feed = isToken(token) ? await findFeedByToken(db, hashOf(token), windowAt(now), notedAfter) : null;
   if (!feed || !mayFollow(memberOf(feed), feed.athleteId)) throw notFound();
   return feed;
 }
@@ -67,36 +66,39 @@ export interface FeedReading {
  * left the team and no longer allowed all throw the same `not-found`.
  */
 export async function readFeed(db: Database, token: string, now: Date): Promise<FeedReading> {
-  const window = windowAt(now);
-  const feed = await openFeed(db, token, window);
-  const noteAfter = new Date(now.getTime() - NOTE_EVERY_MS);
-  if (feed.lastReadAt === null || feed.lastReadAt < noteAfter)
-    await markFeedRead(db, feed.teamId, feed.id, now, noteAfter);
-  return { etag: tagOf(feed), build: () => build(db, token, window) };
+  const feed = await openFeed(db, token, now);
+  if (feed.unnoted) await markFeedRead(db, feed.teamId, feed.id, now);
+  return { etag: tagOf(feed, windowAt(now).day), build: () => build(db, token, now) };
 }
 
-/** Tag and body from one snapshot, whatever is saved meanwhile. */
-async function build(
-  db: Database,
-  token: string,
-  window: FeedWindow,
-): Promise<{ etag: string; body: string }> {
-  return db.transaction(
-    async (tx) => {
-      const feed = await openFeed(tx, token, window);
-      const rows = await listFeedSessions(tx, feed.teamId, feed.id, window);
-      const events = eventsOf(rows, memberOf(feed), feed.scope);
-      const newest = Math.max(...events.map((event) => event.changedAt.getTime()));
-      const body = buildFeed({
-        name: nameOf(feed),
-        discreet: feed.discreet,
-        events,
-        refreshedAt: events.length > 0 ? new Date(newest) : null,
-      });
-      return { etag: tagOf(feed), body };
-    },
-    { isolationLevel: "repeatable read", accessMode: "read only" },
-  );
+/** How often a calendar is written anew because something was saved meanwhile. */
+const TRIES = 3;
+
+/**
+ * Tag and body of one state: nothing was saved between reading the tag and the sessions if the tag is still the same after.
+ * Where saving does not stop, the older tag is given: the next question then gets the newer state.
+ */
+async function build(db: Database, token: string, now: Date): Promise<{ etag: string; body: string }> {
+  const window = windowAt(now);
+  let feed = await openFeed(db, token, now);
+  for (let tried = 1; ; tried++) {
+    const rows = await listFeedSessions(db, feed.teamId, feed, window);
+    const etag = tagOf(feed, window.day);
+    const after = await openFeed(db, token, now);
+    if (tried === TRIES || tagOf(after, window.day) === etag) return { etag, body: bodyOf(feed, rows) };
+    feed = after;
+  }
+}
+
+function bodyOf(feed: ReadableFeed, rows: Awaited<ReturnType<typeof listFeedSessions>>): string {
+  const events = eventsOf(rows, memberOf(feed), feed.scope);
+  const newest = Math.max(...events.map((event) => event.changedAt.getTime()));
+  return buildFeed({
+    name: nameOf(feed),
+    discreet: feed.discreet,
+    events,
+    refreshedAt: events.length > 0 ? new Date(newest) : null,
+  });
 }
 
 function nameOf({ discreet, teamName, athleteName }: ReadableFeed): string {
