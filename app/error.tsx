@@ -2,7 +2,6 @@
 
 import { MessagePage } from "@/components/shell/message-page";
 import { Button } from "@/components/ui/button";
-import { LinkButton } from "@/components/ui/link-button";
 
 interface ErrorPageProps {
   readonly error: Error & { readonly digest?: string };
@@ -19,7 +18,10 @@ export default function ErrorPage({ error, reset }: ErrorPageProps) {
             <Button variant="primary" onClick={reset}>
               Try again
             </Button>
-            <LinkButton href="/">To the start page</LinkButton>
+            {/* A plain request, so that whatever broke in the running page is left behind; and every page loads this file. */}
+            <form action="/">
+              <Button type="submit">To the start page</Button>
+            </form>
           </>
         }
       >
