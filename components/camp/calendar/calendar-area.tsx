@@ -1,7 +1,7 @@
 "use client";
 
 import type FullCalendar from "@fullcalendar/react";
-import { useCallback, useMemo, useRef, useState } from "react";
+import { useCallback, useEffect, useMemo, useRef, useState } from "react";
 import { KeyHint } from "@/components/ui/key-hint";
 import { LiveRegion } from "@/components/ui/live-region";
 import { campSpan, isPreview } from "@/lib/book";
@@ -47,6 +47,9 @@ export function CalendarArea({ desk, today, mark, onOpen, onAdd, onDropped }: Ca
   const moves = entries.some((entry) => entry.movable);
 
   const { hand } = state;
+  useEffect(() => {
+    if (hand) mark.set(hand.at.day);
+  }, [hand, mark]);
   const knockOn = preview && isPreview(preview) ? preview.knockOn : null;
   const title = hand ? (store.read(hand.id)?.title ?? "") : "";
   const carried = hand?.by === "keys" && (hand.at.day !== hand.from.day || hand.at.start !== hand.from.start);
@@ -56,6 +59,8 @@ export function CalendarArea({ desk, today, mark, onOpen, onAdd, onDropped }: Ca
       <div
         ref={root}
         className="camp-grid"
+        // FullCalendar draws in the browser only: the space is kept from the start.
+        style={{ minHeight: `${32 + 97 * shown.book.weeks}px` }}
         aria-label="Calendar of the camp"
         role="group"
         onKeyDown={onKeyDown}

@@ -20,8 +20,8 @@ function update(event: EventApi, entry: CalendarEntry): boolean {
   const start = startText(entry);
   const elsewhere = event.startStr.slice(0, 10) !== start.slice(0, 10);
   if (event.startStr.slice(0, start.length) !== start || event.allDay !== entry.wholeDay) {
-    event.setStart(start);
-    if (event.allDay !== entry.wholeDay) event.setAllDay(entry.wholeDay);
+    // No end: moving the start alone would stretch the session over the days between.
+    event.setDates(start, null, { allDay: entry.wholeDay });
   }
   if (event.startEditable !== entry.movable) event.setProp("editable", entry.movable);
   return elsewhere;

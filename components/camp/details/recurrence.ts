@@ -22,9 +22,18 @@ export function weeklyRule({ weekdays, until }: Weekly, start: string, boutDate:
   }).replace("RRULE:", "");
 }
 
+/** Date of the last occurrence that a rule allows, or null for one without an end. */
+function lastDate(rrule: string, start: string): string | null {
+  const parts = RRule.parseString(rrule);
+  if (parts.until) return parts.until.toISOString().slice(0, 10);
+  if (!parts.count) return null;
+  const last = new RRule({ ...parts, dtstart: new Date(`${start}T00:00:00Z`) }).all().at(-1);
+  return last ? last.toISOString().slice(0, 10) : null;
+}
+
 /** The form's values of a rule, or null where the rule is more than the form can say. */
 export function readWeekly(rrule: string, start: string, boutDate: string): Weekly | null {
-  const { freq, byweekday, until, ...rest } = RRule.parseString(rrule);
+  const { freq, byweekday, until: _until, count: _count, ...rest } = RRule.parseString(rrule);
   const plain = Object.entries(rest).every(
     ([name, value]) => name === "wkst" || (name === "interval" && value === 1),
   );
@@ -32,7 +41,7 @@ export function readWeekly(rrule: string, start: string, boutDate: string): Week
   const days = [byweekday ?? []]
     .flat()
     .map((day) => (day instanceof RuleDay ? day.weekday + 1 : Number(day) + 1));
-  const last = until ? until.toISOString().slice(0, 10) : null;
+  const last = lastDate(rrule, start);
   const own: Weekday = weekdayOf(dayFromIso(start));
   return {
     weekdays: days.length > 0 ? days : [own],
