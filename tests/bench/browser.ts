@@ -1,0 +1,45 @@
+import { chromium, type Browser, type Page } from "@playwright/test";
+import demo from "../../db/seed/accounts.json";
+
+const ARGS = [
+  ...(process.getuid?.() === 0 ? ["--no-sandbox"] : []),
+  "--disable-gpu",
+  "--no-first-run",
+  "--disable-background-networking",
+  "--disable-component-update",
+  "--disable-sync",
+  "--disable-dev-shm-usage",
+];
+
+export const openBrowser = (): Promise<Browser> =>
+  chromium.launch({ executablePath: "/usr/bin/chromium", args: ARGS });
+
+/** Signs a demo account in; the page then holds its session. */
+export async function signIn(page: Page, url: string, role: string): Promise<void> {
+  const account = demo.accounts.find((candidate) => candidate.role === role);
+  if (!account) throw new Error(`There is no demo account for ${role}.`);
+  await page.goto(`${url}/sign-in`);
+  await page.getByLabel("E-mail").fill(account.email);
+  await page.getByLabel("Password").fill(demo.password);
+  await page.getByRole("button", { name: "Sign in" }).click();
+  await page.waitForURL((address) => !address.pathname.startsWith("/sign-in"));
+}
+
+/** Bytes of JavaScript, as sent, that a page asks for until the network is quiet. A context of its own, so nothing is cached. */
+export async function firstLoadScript(browser: Browser, address: string, storage?: string): Promise<number> {
+  const context = await browser.newContext(storage ? { storageState: JSON.parse(storage) } : {});
+  const page = await context.newPage();
+  const session = await context.newCDPSession(page);
+  await session.send("Network.enable");
+  const scripts = new Set<string>();
+  let bytes = 0;
+  session.on("Network.responseReceived", ({ requestId, type }) => {
+    if (type === "Script") scripts.add(requestId);
+  });
+  session.on("Network.loadingFinished", ({ requestId, encodedDataLength }) => {
+    if (scripts.has(requestId)) bytes += encodedDataLength;
+  });
+  await page.goto(address, { waitUntil: "networkidle" });
+  await context.close();
+  return bytes;
+}

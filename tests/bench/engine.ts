@@ -1,0 +1,52 @@
+import loadHighs from "highs";
+import { plan } from "@/lib/engine";
+import { frameOf } from "@/lib/engine/phases";
+import { layOut } from "@/lib/engine/menu";
+import { placementProblem, solvePlacement } from "@/lib/engine/placement";
+import { milpOf } from "../factories/placement-milp";
+import { benchCamp } from "./engine-cases";
+import { figures, round, timed } from "./measure";
+
+const WEEKS = [4, 8, 12, 16, 20] as const;
+const SESSIONS = 8;
+
+/** Share of the variance of `y` that a straight line through the points explains. */
+function straightness(x: readonly number[], y: readonly number[]): number {
+  const mean = (list: readonly number[]) => list.reduce((sum, value) => sum + value, 0) / list.length;
+  const [mx, my] = [mean(x), mean(y)];
+  const sxy = x.reduce((sum, value, index) => sum + (value - mx) * ((y[index] ?? 0) - my), 0);
+  const sxx = x.reduce((sum, value) => sum + (value - mx) ** 2, 0);
+  const syy = y.reduce((sum, value) => sum + (value - my) ** 2, 0);
+  return sxy ** 2 / (sxx * syy);
+}
+
+/** Plans from scratch: time by length of the camp, and the placement beside HiGHS on the same value. */
+export async function benchEngine() {
+  const medians = WEEKS.map((weeks) => {
+    const input = benchCamp(weeks, SESSIONS);
+    return { weeks, ...figures(timed(100, 40, () => plan(input))) };
+  });
+  const input = benchCamp(12, SESSIONS);
+  const layout = layOut(frameOf(input), undefined);
+  const { problem } = placementProblem({ input, slots: layout.slots, fixed: layout.fixed });
+  const highs = await loadHighs();
+  const milp = milpOf(problem);
+  const theirs = figures(timed(3, 1, () => void highs.solve(milp)));
+  const ours = figures(timed(200, 50, () => void solvePlacement(problem)));
+  const cost = Math.round(highs.solve(milp).ObjectiveValue);
+  return {
+    "plan from scratch, ms": Object.fromEntries(
+      medians.map(({ weeks, median, p95 }) => [`${weeks} weeks`, { median: round(median), p95: round(p95) }]),
+    ),
+    "straight line through 4 to 20 weeks, r²": round(
+      straightness(
+        [...WEEKS],
+        medians.map(({ median }) => median),
+      ),
+    ),
+    "placement of 12 weeks, ms": round(ours.median),
+    "the same by HiGHS, ms": round(theirs.median),
+    "times faster than HiGHS": Math.round(theirs.median / ours.median),
+    "same optimum": cost === solvePlacement(problem).cost,
+  };
+}
