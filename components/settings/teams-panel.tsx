@@ -1,5 +1,6 @@
 "use client";
 
+import { enter } from "@/components/account/enter";
 import { useSwitchTeam } from "@/lib/query/account";
 import { Button } from "@/components/ui/button";
 import { Notice } from "@/components/ui/notice";
@@ -11,8 +12,7 @@ import type { AccountView } from "@/lib/schemas/account";
 export function TeamsPanel({ teams }: Pick<AccountView, "teams">) {
   const change = useSwitchTeam();
   // Everything on the page belongs to the other team: a full load.
-  const goTo = (id: string): void =>
-    change.mutate(id, { onSuccess: () => window.location.assign(`${window.location.origin}/board`) });
+  const goTo = (id: string): void => change.mutate(id, { onSuccess: () => enter("/board") });
   return (
     <Panel title="Your teams">
       <ul className="divide-y divide-line-soft">
