@@ -12,7 +12,11 @@ export function PublicShell({ children }: { readonly children: ReactNode }) {
     <div className="mx-auto flex min-h-dvh max-w-page flex-col px-4 md:px-10">
       <SkipLink />
       <header className="flex items-center gap-5 py-3 md:gap-7">
-        <Link href="/" aria-label="Bellward, start page" className="mr-auto rounded">
+        <Link
+          href="/"
+          aria-label="Bellward, start page"
+          className="mr-auto flex min-h-11 items-center rounded"
+        >
           <Wordmark />
         </Link>
         <nav aria-label="Main" className="flex gap-5 md:gap-7">

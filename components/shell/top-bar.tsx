@@ -44,7 +44,7 @@ export function TopBar({ nav, team, person, role }: TopBarProps) {
         >
           <Bars />
         </button>
-        <Link href="/board" aria-label="Bellward, first page" className="rounded">
+        <Link href="/board" aria-label="Bellward, first page" className="flex min-h-11 items-center rounded">
           <Wordmark onBar />
         </Link>
         <nav aria-label="Main" className="hidden gap-5 text-sm lg:flex">

@@ -53,7 +53,7 @@ export function ToggleGroup<T extends string | number>(props: ToggleGroupProps<T
             checked={value.includes(toggle.value)}
             onChange={(event) => flip(toggle.value, event.target.checked)}
             aria-label={toggle.spoken}
-            className="absolute inset-0 cursor-pointer opacity-0"
+            className="absolute -inset-px cursor-pointer opacity-0"
           />
           <span aria-hidden={toggle.spoken ? true : undefined}>{toggle.label}</span>
         </label>
