@@ -211,7 +211,7 @@ const arbTimetable: fc.Arbitrary<readonly Weekly[]> = fc.oneof(
   {
     weight: 1,
     arbitrary: arbMinute(600, 1200).map((start) =>
-      [1, 2, 3, 4, 5, 6, 7].map((weekday) => ({
+      [1, 2, 3, 4, 5, 6, 7].map((weekday): Weekly => ({
         kind: "hard-sparring",
         weekday,
         start,
@@ -284,6 +284,8 @@ export interface ArbOptions {
   readonly holds?: boolean;
   /** Default house rules only. */
   readonly defaultRules?: boolean;
+  /** The camp lies wholly ahead. */
+  readonly ahead?: boolean;
 }
 
 /** Valid input of every kind: awkward days, zones, free hours, timetables, pins, holds and house rules. */
@@ -299,7 +301,9 @@ export const arbPlanInput = (options: ArbOptions = {}): fc.Arbitrary<PlanInput> 
           zone: arbZone(boutDay),
           boutStart: arbMinute(600, 1425),
           // Days from now to the camp's first day; negative is a camp that is under way, up to the bout's own morning.
-          ahead: fc.oneof(fc.integer({ min: 0, max: 20 }), fc.integer({ min: 1 - 7 * weeks, max: 0 })),
+          ahead: options.ahead
+            ? fc.integer({ min: 1, max: 20 })
+            : fc.oneof(fc.integer({ min: 0, max: 20 }), fc.integer({ min: 1 - 7 * weeks, max: 0 })),
           nowMinute: arbMinute(0, 585),
           weighIn: fc.oneof(
             fc.constant(null),

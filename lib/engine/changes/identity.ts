@@ -31,12 +31,16 @@ function sameWeek(
   return matched;
 }
 
+/** Days from a slot's week beyond which a lift is another lift: dropped and added says it better than a leap of weeks. */
+const FARTHEST = 7;
+
 /** The bout has moved: the nearest session of the same item, nearest pair first, the earlier day on a tie. */
 function nearest(wanted: readonly SlotKey[], open: readonly Lift[], input: PlanInput): Map<SlotKey, Lift> {
   const pairs = wanted.flatMap((slot) =>
     open
       .filter((lift) => lift.item === slot.item)
-      .map((lift) => ({ slot, lift, far: distance(lift.day, input.bout.day, slot.week) })),
+      .map((lift) => ({ slot, lift, far: distance(lift.day, input.bout.day, slot.week) }))
+      .filter(({ far }) => far[0] <= FARTHEST),
   );
   pairs.sort(
     (a, b) =>
