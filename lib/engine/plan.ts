@@ -6,7 +6,7 @@ import { inputProblems, PlanInputError } from "./input";
 import { dayLoads, formOf, sportLoads, weekSummaries } from "./load";
 import { intensityOf, itemSpec, layOut } from "./menu";
 import { frameOf, phaseOfDay, type CampFrame } from "./phases";
-import { placeLifts, whyNotAt } from "./placement";
+import { placeLifts } from "./placement";
 import type { Base, Day, Item, Lift, Minute, Plan, PlanInput, Reason } from "./types";
 
 /** A lift with its place, before its sets. */
@@ -101,8 +101,6 @@ export function plan(input: PlanInput, base?: Base): Plan {
       rules,
     ),
     cost: placement.cost,
-    causes: base
-      ? causesOf(frame, base, layout, lifts, (id, day, start) => whyNotAt(request, id, day, start))
-      : [],
+    causes: base ? causesOf(frame, base, layout, lifts, placement.whyNot) : [],
   };
 }

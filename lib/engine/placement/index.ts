@@ -1,4 +1,4 @@
-export { placeLifts, whyNotAt } from "./place-lifts";
+export { placeLifts } from "./place-lifts";
 export { placementProblem } from "./problem";
 export { solvePlacement } from "./solver";
 export type * from "./request";

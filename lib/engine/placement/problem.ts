@@ -1,146 +1,55 @@
-import { instantAt, weekSpan, weekdayOf } from "../geometry";
-import { ITEM_TITLES } from "../menu";
-import type { Candidate, Day, Instant, Minute, PlacementProblem, Reason } from "../types";
-import { dayBreak, timeBreak } from "./must-rules";
+import { weekSpan } from "../geometry";
+import { stayPutPrice } from "../rules/should-rules";
+import type { Day, PlacementProblem, Reason } from "../types";
+import { candidatesOf, wantedOf } from "./candidates";
 import type { PlacementRequest, Slot } from "./request";
-import { shouldPoints, stayPutPrice } from "./should-costs";
-import { surroundingsOf, type LiftSpan, type Surroundings } from "./surroundings";
+import { surroundingsOf, type Surroundings } from "./surroundings";
 
 /**
- * Price of leaving a lift out: above all should costs that placing it could bring (a week's are some hundreds of points), and
- * more for the more important, so that the least important is left out first.
+ * Price of leaving a lift out, by its importance in the week: the first of a week at `STEP` x `STEPS`, the next a step less.
+ *
+ * A step is above all that should rules can take from a week: four lifts at `MOST_OWN_COST` (4 000) each, their six pairs
+ * at no more than the largest spread prices (200 each), the free day (500) and four moves at the largest price (1 000)
+ * come to 21 700. So no lift is left out to save points, and never the more important for the less. Two lifts at the
+ * fourth's price are above one at the first's: as many as possible are placed first.
+ * Four lifts unplaced come to 780 000, which is below the price of moving a lift inside the locked hours.
  */
-const UNPLACED = 20_000;
-const IMPORTANCE_STEP = 1_000;
-const MOST_ORDER = 8;
+const STEP = 30_000;
+const STEPS = 8;
 
+/** A request as a value for the solver, with what was worked out on the way to it. */
 export interface BuiltProblem {
   readonly problem: PlacementProblem;
   readonly around: Surroundings;
   /** By slot id: the rules that shut its candidates, most frequent first. */
-  readonly shut: ReadonlyMap<string, () => readonly Reason[]>;
+  readonly shut: ReadonlyMap<string, readonly Reason[]>;
 }
 
-/** A slot at a place. Members are named one by one: spreading an object here costs more than all rules together. */
-export function liftSpanAt(around: Surroundings, slot: Slot, day: Day, start: Minute): LiftSpan {
-  const startsAt = instantAt(around.input.zone, day, start);
-  return {
-    id: slot.id,
-    title: ITEM_TITLES[slot.item],
-    day,
-    startsAt,
-    endsAt: (startsAt + slot.minutes) as Instant,
-    startMinute: start,
-    item: slot.item,
-    heavyLower: slot.heavyLower,
-    primer: slot.primer,
-  };
+const unplacedPrice = (around: Surroundings, { order, base }: Slot): number =>
+  // Leaving it out takes it from its published place as much as moving it does.
+  STEP * Math.max(1, STEPS - order) + stayPutPrice(around, base);
+
+/** Days of a camp week without sport and without lifts that stand. The bout's own day is no rest, rest and travel days are. */
+function freeDaysOf({ input, sport, fixed }: Surroundings, week: number): readonly Day[] {
+  const { from, to } = weekSpan(input.bout.day, week);
+  return Array.from({ length: to - from + 1 }, (_, index) => (from + index) as Day).filter(
+    (day) => day !== input.bout.day && sport.on(day).length === 0 && fixed.on(day).length === 0,
+  );
 }
 
-/** Starts to try on a day: the grid of each window of free hours, and the published start where it fits. */
-function startsOn(around: Surroundings, slot: Slot, day: Day): Minute[] {
-  const step = around.input.rules["start-step.minutes"];
-  const weekday = weekdayOf(day);
-  const starts = new Set<number>();
-  for (const free of around.input.athlete.freeHours) {
-    if (free.weekday !== weekday) continue;
-    for (let start: number = free.from; start + slot.minutes <= free.to; start += step) starts.add(start);
-    const base = slot.base;
-    if (base?.day === day && base.start >= free.from && base.start + slot.minutes <= free.to)
-      starts.add(base.start);
-  }
-  return [...starts].sort((a, b) => a - b) as Minute[];
-}
-
-/** Which rules shut a slot's candidates, how often; the first of each is told. */
-class ShutCount {
-  private readonly counts = new Map<string, { readonly text: () => string; count: number }>();
-
-  add(rule: string, text: () => string, count = 1): void {
-    const known = this.counts.get(rule);
-    if (known) known.count += count;
-    else this.counts.set(rule, { text, count });
-  }
-
-  list(): Reason[] {
-    return [...this.counts]
-      .sort(([a, x], [b, y]) => y.count - x.count || (a < b ? -1 : 1))
-      .map(([rule, { text }]) => ({ rule, text: text() }));
-  }
-}
-
-/** A shut day counts as all its starts, about. */
-const STARTS_A_DAY = 24;
-
-const pastText = (): string => "Its days are already past.";
-
-function candidatesOf(around: Surroundings, slot: Slot, index: number, shut: ShutCount): Candidate[] {
-  const found: Candidate[] = [];
-  const { from, to } = weekSpan(around.input.bout.day, slot.week);
-  const moving = basePrice(around, slot);
-  for (let day = from; day <= to; day = (day + 1) as Day) {
-    const closed = dayBreak(around, liftSpanAt(around, slot, day, 0 as Minute));
-    if (closed) {
-      shut.add(closed.rule, closed.text, STARTS_A_DAY);
-      continue;
-    }
-    const starts = startsOn(around, slot, day);
-    if (starts.length === 0)
-      shut.add("free-hours", () => `No free hours long enough for ${slot.minutes} min.`);
-    for (const start of starts) {
-      const lift = liftSpanAt(around, slot, day, start);
-      if (lift.startsAt <= around.input.now) {
-        shut.add("past", pastText);
-        continue;
-      }
-      const broken = timeBreak(around, lift);
-      if (broken) {
-        shut.add(broken.rule, broken.text);
-        continue;
-      }
-      const { startsAt, endsAt } = lift;
-      const stays = slot.base?.day === day && slot.base.start === start;
-      const cost = shouldPoints(around, lift, slot.fresh) + (stays ? 0 : moving);
-      found.push({ item: index, day, start, startsAt, endsAt, cost });
-    }
-  }
-  return found;
-}
-
-/** What leaving the published place costs, by moving or by going unplaced alike; 0 for a new lift. */
-const basePrice = (around: Surroundings, slot: Slot): number =>
-  slot.base ? stayPutPrice(around, liftSpanAt(around, slot, slot.base.day, slot.base.start).startsAt) : 0;
-
-/** Days of a week that sport and standing lifts leave free; none where the week is partly past and had one already. */
-function freeDaysOf(around: Surroundings, week: number): Day[] {
-  const { from, to } = weekSpan(around.input.bout.day, week);
-  const days: Day[] = [];
-  for (let day = from; day <= to; day = (day + 1) as Day) {
-    if (day === around.input.bout.day) continue;
-    if (!around.sportByDay.has(day) && !around.fixedByDay.has(day)) days.push(day);
-  }
-  return days;
-}
-
-/** The placement of a request as a value that any solver can take. */
+/** The placement of a request as a value that any solver can take. Items are the slots, in their order. */
 export function placementProblem(request: PlacementRequest): BuiltProblem {
-  const around = surroundingsOf(request.input, request.fixed, (item) => ITEM_TITLES[item]);
+  const around = surroundingsOf(request);
   const { rules } = request.input;
-  const shut = new Map<string, () => readonly Reason[]>();
-  const candidates = request.slots.flatMap((slot, index) => {
-    const count = new ShutCount();
-    const found = candidatesOf(around, slot, index, count);
-    shut.set(slot.id, () => count.list());
-    return found;
-  });
-  candidates.sort((a, b) => a.day - b.day || a.start - b.start || a.item - b.item);
+  const wanted = wantedOf(request.slots);
+  const candidates = candidatesOf(around, wanted);
   const weeks = [...new Set(request.slots.map(({ week }) => week))];
   const problem: PlacementProblem = {
     items: request.slots.map((slot) => ({
       key: slot.id,
       week: slot.week,
       heavy: slot.heavyLower,
-      unplaced: UNPLACED + IMPORTANCE_STEP * Math.max(0, MOST_ORDER - slot.order) + basePrice(around, slot),
+      unplaced: unplacedPrice(around, slot),
     })),
     candidates,
     apart: [
@@ -152,5 +61,7 @@ export function placementProblem(request: PlacementRequest): BuiltProblem {
       .map((week) => ({ week, freeDays: freeDaysOf(around, week), noRestCost: rules["rest-day.price"] }))
       .filter(({ freeDays }) => freeDays.length > 0),
   };
+  const shut = new Map<string, readonly Reason[]>();
+  for (const { slot, lift, shut: count } of wanted) shut.set(slot.id, count.reasons(lift, rules));
   return { problem, around, shut };
 }

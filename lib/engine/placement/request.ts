@@ -58,4 +58,6 @@ export interface Placement {
   readonly unplaced: readonly UnplacedSlot[];
   readonly violations: readonly Violation[];
   readonly cost: number;
+  /** What keeps a slot, by its id, from a place: rules it would break, the lift that has the day, or what it would pay. */
+  readonly whyNot: (id: string, day: Day, start: Minute) => readonly Reason[];
 }

@@ -1,4 +1,4 @@
-import type { Span } from "./surroundings";
+import type { Span } from "./spans";
 
 /** Load that is still there at an instant, AU. */
 export type ResidualLoad = (startsAt: number) => number;

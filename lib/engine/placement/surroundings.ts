@@ -1,140 +1,123 @@
-import { instantAt } from "../geometry";
-import type { Day, Instant, Item, Minute, PlanInput, SportKind } from "../types";
+import { DAY_MINUTES, instantAt, offsetAt } from "../geometry";
+import { ITEM_TITLES } from "../menu/items";
+import type { Day, Instant, Minute, PlanInput, SportKind } from "../types";
+import type { FixedLift, PlacementRequest, Slot } from "./request";
 import { residualLoad, type ResidualLoad } from "./residual";
-import type { FixedLift } from "./request";
-
-/** Anything that takes time, as instants. */
-export interface Span {
-  readonly id: string;
-  readonly title: string;
-  readonly day: Day;
-  readonly startsAt: Instant;
-  readonly endsAt: Instant;
-}
+import { shutDaysOf, type ShutDay } from "./shut-days";
+import { Spans, type Span } from "./spans";
 
 export interface SportSpan extends Span {
   readonly kind: SportKind;
+  /** AU: as done where that is known, else effort x minutes. */
   readonly load: number;
 }
 
-/** A lift somewhere: a candidate, or one that stands. */
-export interface LiftSpan extends Span {
-  /** Wall-clock start, minutes since midnight. */
-  readonly startMinute: number;
-  readonly item: Item;
+/** All that a rule asks about a lift, wherever it stands. */
+export interface Lifting {
+  readonly id: string;
+  readonly title: string;
+  readonly minutes: number;
   readonly heavyLower: boolean;
   readonly primer: boolean;
+  readonly fresh: boolean;
+  readonly base: Slot["base"];
 }
 
-/** What lies around the lifts: prepared once a plan. */
+/** A lift that stands: pinned, or past. */
+export interface StandingLift extends Span, Lifting {
+  readonly start: Minute;
+  readonly pinned: boolean;
+  readonly past: boolean;
+}
+
+/** What lies around the lifts: prepared once a plan, asked for every candidate. */
 export interface Surroundings {
   readonly input: PlanInput;
-  /** Sport that takes time, by start. Rest is not a session; travel shuts its day. */
-  readonly sport: readonly SportSpan[];
-  readonly sportByDay: ReadonlyMap<Day, readonly SportSpan[]>;
-  readonly hard: readonly SportSpan[];
-  /** Days on which nothing is lifted, and why. */
-  readonly shutDays: ReadonlyMap<Day, string>;
-  readonly fixed: readonly LiftSpan[];
-  readonly fixedHeavy: readonly LiftSpan[];
-  readonly fixedByDay: ReadonlyMap<Day, readonly LiftSpan[]>;
+  /** Sport that takes time. Rest is no session, and travel shuts its day. */
+  readonly sport: Spans<SportSpan>;
+  readonly hard: Spans<SportSpan>;
+  readonly fixed: Spans<StandingLift>;
+  readonly fixedHeavy: Spans<StandingLift>;
+  readonly shutDays: ReadonlyMap<Day, ShutDay>;
   readonly residual: ResidualLoad;
 }
 
-function spanAt(
+export const liftingOf = (slot: Slot): Lifting => ({
+  id: slot.id,
+  title: ITEM_TITLES[slot.item],
+  minutes: slot.minutes,
+  heavyLower: slot.heavyLower,
+  primer: slot.primer,
+  fresh: slot.fresh,
+  base: slot.base,
+});
+
+/** The one offset of a whole civil day and of a session that runs on from it; null on a day with a step. */
+function offsetOn({ zone }: PlanInput, day: Day): number | null {
+  if (zone.length > 1) {
+    const from = day * DAY_MINUTES;
+    for (const step of zone) if (step.from > from && step.from < from + DAY_MINUTES) return null;
+  }
+  return offsetAt(zone, day * DAY_MINUTES);
+}
+
+/** Instants of a day's wall-clock readings, for many readings of the same day. */
+export function clockOf(input: PlanInput, day: Day): (minute: number) => Instant {
+  const offset = offsetOn(input, day);
+  if (offset === null) return (minute) => instantAt(input.zone, day, minute as Minute);
+  const midnight = day * DAY_MINUTES - offset;
+  return (minute) => (midnight + minute) as Instant;
+}
+
+/** Earliest and latest instant that a reading of the day can mean. */
+export function boundsOf(input: PlanInput, day: Day): readonly [number, number] {
+  const offset = offsetOn(input, day);
+  const from = day * DAY_MINUTES;
+  if (offset !== null) return [from - offset, from + DAY_MINUTES - offset];
+  const offsets = input.zone.map((step) => step.offset);
+  return [from - Math.max(...offsets), from + DAY_MINUTES - Math.min(...offsets)];
+}
+
+function spanOf(
   input: PlanInput,
   day: Day,
   start: Minute,
   minutes: number,
-): { startsAt: Instant; endsAt: Instant } {
+): Pick<Span, "startsAt" | "endsAt"> {
   const startsAt = instantAt(input.zone, day, start);
   return { startsAt, endsAt: (startsAt + minutes) as Instant };
 }
 
-function groupByDay<T extends { readonly day: Day }>(list: readonly T[]): Map<Day, T[]> {
-  const days = new Map<Day, T[]>();
-  for (const value of list) {
-    const known = days.get(value.day);
-    if (known) known.push(value);
-    else days.set(value.day, [value]);
-  }
-  return days;
-}
-
-function shutDaysOf({ bout, weighIn, sport, holds, weeks }: PlanInput): Map<Day, string> {
-  const days = new Map<Day, string>();
-  const shut = (day: Day, why: string): void => {
-    if (!days.has(day)) days.set(day, why);
+function standing(input: PlanInput, lift: FixedLift): StandingLift {
+  const { id, item, day, start, minutes, heavyLower, primer, pinned, past } = lift;
+  return {
+    ...{ id, title: ITEM_TITLES[item], day, start, minutes, heavyLower, primer, pinned, past },
+    ...spanOf(input, day, start, minutes),
+    fresh: false,
+    base: null,
   };
-  shut(bout.day, "the bout day");
-  if (weighIn) shut(weighIn.day, "the weigh-in day");
-  const first = (bout.day - weeks * 7 + 1) as Day;
-  for (const hold of holds) {
-    const last = Math.min(hold.to ?? bout.day, bout.day);
-    for (let day = Math.max(hold.from, first); day <= last; day++) shut(day as Day, "a day on hold");
-  }
-  for (const { kind, day } of sport) {
-    if (kind === "rest") shut(day, "a rest day");
-    if (kind === "travel") shut(day, "a travel day");
-  }
-  return days;
 }
 
-export function surroundingsOf(
-  input: PlanInput,
-  fixed: readonly FixedLift[],
-  titleOf: (item: Item) => string,
-): Surroundings {
+export function surroundingsOf({ input, fixed }: PlacementRequest): Surroundings {
   const sport = input.sport
     .filter(({ kind }) => kind !== "rest" && kind !== "travel")
     .map((session): SportSpan => ({
-      ...spanAt(input, session.day, session.start, session.minutes),
       id: session.id,
       title: session.title,
       day: session.day,
+      ...spanOf(input, session.day, session.start, session.minutes),
       kind: session.kind,
       load: session.doneLoad ?? session.effort * session.minutes,
-    }))
-    .sort((a, b) => a.startsAt - b.startsAt || (a.id < b.id ? -1 : 1));
-  const lifts = fixed
-    .map((lift): LiftSpan => ({
-      ...spanAt(input, lift.day, lift.start, lift.minutes),
-      ...lift,
-      startMinute: lift.start,
-      title: titleOf(lift.item),
-    }))
-    .sort((a, b) => a.startsAt - b.startsAt || (a.id < b.id ? -1 : 1));
+    }));
+  const lifts = fixed.map((lift) => standing(input, lift));
+  const spans = new Spans(sport);
   return {
     input,
-    sport,
-    sportByDay: groupByDay(sport),
-    hard: sport.filter(({ kind }) => kind === "hard-sparring"),
+    sport: spans,
+    hard: new Spans(sport.filter(({ kind }) => kind === "hard-sparring")),
+    fixed: new Spans(lifts),
+    fixedHeavy: new Spans(lifts.filter(({ heavyLower }) => heavyLower)),
     shutDays: shutDaysOf(input),
-    fixed: lifts,
-    fixedHeavy: lifts.filter(({ heavyLower }) => heavyLower),
-    fixedByDay: groupByDay(lifts),
-    residual: residualLoad(sport, input.rules["fresh-first.hours"] * 60),
+    residual: residualLoad(spans.list, input.rules["fresh-first.hours"] * 60),
   };
-}
-
-/** First of a sorted list that starts at or after an instant. */
-export function nextFrom<T extends Span>(list: readonly T[], instant: number): T | null {
-  let [low, high] = [0, list.length];
-  while (low < high) {
-    const middle = (low + high) >> 1;
-    if ((list[middle]?.startsAt ?? 0) < instant) low = middle + 1;
-    else high = middle;
-  }
-  return list[low] ?? null;
-}
-
-/** Latest end at or before an instant, among sessions that start before it. */
-export function lastBefore<T extends Span>(list: readonly T[], instant: number): T | null {
-  let [low, high] = [0, list.length];
-  while (low < high) {
-    const middle = (low + high) >> 1;
-    if ((list[middle]?.startsAt ?? 0) < instant) low = middle + 1;
-    else high = middle;
-  }
-  return list[low - 1] ?? null;
 }
