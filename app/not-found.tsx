@@ -11,8 +11,8 @@ export default function NotFound() {
         title="There is nothing at this address"
         actions={
           <>
-            <LinkButton href="/board" variant="primary">
-              To the board
+            <LinkButton href="/camps" variant="primary">
+              To the camps
             </LinkButton>
             <LinkButton href="/">To the start page</LinkButton>
           </>

@@ -44,7 +44,11 @@ export function TopBar({ nav, team, person, role }: TopBarProps) {
         >
           <Bars />
         </button>
-        <Link href="/board" aria-label="Bellward, first page" className="flex min-h-11 items-center rounded">
+        <Link
+          href={nav[0]?.href ?? "/settings"}
+          aria-label="Bellward, first page"
+          className="flex min-h-11 items-center rounded"
+        >
           <Wordmark onBar />
         </Link>
         <nav aria-label="Main" className="hidden gap-5 text-sm lg:flex">
