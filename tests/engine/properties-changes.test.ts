@@ -19,7 +19,7 @@ const EMPTY = { lifts: [], sport: [], weeks: [], violations: [], bout: null };
 // Thousands of camps on a shared machine: generous, and never what decides.
 const TIME = { timeout: 180_000 };
 
-describe("a change", () => {
+describe("a change", TIME, () => {
   it("that is none has no knock-on, also once the plan that stands was itself planned on another (200 inputs)", () => {
     fc.assert(
       fc.property(arbPlanInput({ maxWeeks: 10 }), arbAddition, (input, { share, start }) => {

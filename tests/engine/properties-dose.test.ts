@@ -13,7 +13,7 @@ const pinned = (input: PlanInput, lifts: readonly Lift[]): PlanInput => ({
 // Thousands of camps on a shared machine: generous, and never what decides.
 const TIME = { timeout: 180_000 };
 
-describe("dose", () => {
+describe("dose", TIME, () => {
   it("with lifts pinned, a hard sparring day more raises no sets of its week and lowers those within a day of it (400 inputs)", () => {
     let within = 0;
     fc.assert(

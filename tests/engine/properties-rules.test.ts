@@ -9,7 +9,7 @@ const baseOf = (made: Plan): Base => ({ boutDay: made.bout.day, lifts: made.lift
 // Thousands of camps on a shared machine: generous, and never what decides.
 const TIME = { timeout: 180_000 };
 
-describe("for every valid input", () => {
+describe("for every valid input", TIME, () => {
   it("nothing unpinned breaks a must rule, and every rule that a pin breaks is reported (400 inputs)", () => {
     fc.assert(
       fc.property(arbPlanInput(), (input) => {
