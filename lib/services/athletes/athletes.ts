@@ -1,3 +1,4 @@
+import { isDeepStrictEqual } from "node:util";
 import {
   findAthlete,
   insertAthlete,
@@ -103,7 +104,7 @@ export async function editAthlete(
     if (!row) throw notFound();
     await updateAthlete(tx, ctx.teamId, row.id, body);
     const changed = Object.entries(body).filter(
-      ([key, value]) => JSON.stringify(row[key as keyof AthleteForm]) !== JSON.stringify(value),
+      ([key, value]) => !isDeepStrictEqual(row[key as keyof AthleteForm], value),
     );
     await writeAudit(tx, ctx, "athlete.update", row.id, { fields: changed.map(([key]) => key) });
   });

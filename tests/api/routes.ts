@@ -1,0 +1,207 @@
+import { randomUUID } from "node:crypto";
+import type { Action } from "@/lib/policy";
+import { campForm } from "../factories/camp-book";
+import type { Call } from "./client";
+
+/** What a row may name of the team that a test made, or of a foreign one. */
+export interface Scene {
+  readonly athleteId: string;
+  readonly campId: string;
+  readonly holdId: string;
+  readonly inviteId: string;
+  readonly membershipId: string;
+  readonly entryId: string;
+  readonly feedId: string;
+}
+
+export interface RouteRow {
+  readonly path: string;
+  readonly method: "GET" | "POST" | "PUT" | "PATCH" | "DELETE";
+  /** What the table must allow; null where the service decides by what is asked. */
+  readonly may: Action | null;
+  /** A good body; undefined where there is none. */
+  readonly body?: (scene: Scene) => unknown;
+  /** Parameters of the path, of things that belong to `scene`. */
+  readonly params?: (scene: Scene) => Record<string, string>;
+}
+
+export const SESSION = {
+  kind: "skill",
+  title: "Pads",
+  start: "2026-12-07T18:00",
+  minutes: 60,
+  effort: 4,
+  place: "",
+  rrule: "FREQ=WEEKLY;BYDAY=MO",
+  exdate: [],
+} as const;
+
+export const PROFILE = {
+  name: "Ilse Marrow",
+  sport: "Boxing",
+  dateOfBirth: null,
+  limitations: "",
+  trainingAge: "novice",
+  strikingBase: "boxing",
+  liftsPerWeek: 2,
+  freeHours: [{ weekday: 1, from: "10:00", to: "24:00" }],
+} as const;
+
+const CHANGE = {
+  change: { kind: "bout.off" },
+  baseRevision: 1,
+  idempotencyKey: "5d1f0a52-6f0e-4b57-9a55-0c7f3a1f7b99",
+};
+const ACCOUNT = { name: "New Name", units: "lb", timeZone: "Europe/Zagreb", mailChoice: "daily" };
+
+/** Every route for members of a team. */
+export const TEAM_ROUTES: readonly RouteRow[] = [
+  { path: "account", method: "GET", may: "account.own" },
+  { path: "account", method: "PUT", may: "account.own", body: () => ACCOUNT },
+  {
+    path: "account/password",
+    method: "POST",
+    may: "account.own",
+    body: () => ({ current: "wrong", password: "a-new-password" }),
+  },
+  { path: "account/team", method: "POST", may: "account.own", body: () => ({ teamId: randomUUID() }) },
+  { path: "team", method: "GET", may: "account.own" },
+  {
+    path: "team",
+    method: "PUT",
+    may: "team.manage",
+    body: () => ({ name: "North Pier Gym", timeZone: "Europe/Zagreb" }),
+  },
+  { path: "people", method: "GET", may: "team.people" },
+  {
+    path: "people/[id]",
+    method: "PATCH",
+    may: "team.manage",
+    body: () => ({ role: "strength", athleteId: null }),
+    params: ({ membershipId }) => ({ id: membershipId }),
+  },
+  {
+    path: "people/[id]",
+    method: "DELETE",
+    may: "team.manage",
+    params: ({ membershipId }) => ({ id: membershipId }),
+  },
+  {
+    path: "invites",
+    method: "POST",
+    may: "team.manage",
+    body: () => ({ email: `${randomUUID()}@new.example`, role: "skills", athleteId: null }),
+  },
+  {
+    path: "invites/[id]",
+    method: "DELETE",
+    may: "team.manage",
+    params: ({ inviteId }) => ({ id: inviteId }),
+  },
+  { path: "athletes", method: "GET", may: "athletes.read" },
+  { path: "athletes", method: "POST", may: "athletes.write", body: () => PROFILE },
+  {
+    path: "athletes/[id]",
+    method: "GET",
+    may: "athletes.read",
+    params: ({ athleteId }) => ({ id: athleteId }),
+  },
+  {
+    path: "athletes/[id]",
+    method: "PUT",
+    may: "athletes.write",
+    body: () => PROFILE,
+    params: ({ athleteId }) => ({ id: athleteId }),
+  },
+  {
+    path: "athletes/[id]/holds",
+    method: "POST",
+    may: "holds.write",
+    body: () => ({ from: "2026-12-05", to: null, reason: "Knock to the head on Friday." }),
+    params: ({ athleteId }) => ({ id: athleteId }),
+  },
+  {
+    path: "holds/[id]/lift",
+    method: "POST",
+    may: "holds.write",
+    params: ({ holdId }) => ({ id: holdId }),
+  },
+  { path: "house-rules", method: "GET", may: "rules.read" },
+  {
+    path: "house-rules",
+    method: "PUT",
+    may: "rules.write",
+    body: () => ({ overrides: { "clash.gap": 60 } }),
+  },
+  { path: "timetable", method: "GET", may: "timetable.read" },
+  { path: "timetable", method: "POST", may: "timetable.write", body: () => SESSION },
+  {
+    path: "timetable/[id]",
+    method: "PUT",
+    may: "timetable.write",
+    body: () => SESSION,
+    params: ({ entryId }) => ({ id: entryId }),
+  },
+  {
+    path: "timetable/[id]",
+    method: "DELETE",
+    may: "timetable.write",
+    params: ({ entryId }) => ({ id: entryId }),
+  },
+  { path: "camps", method: "GET", may: null },
+  {
+    path: "camps",
+    method: "POST",
+    may: "camps.create",
+    body: ({ athleteId }) => campForm({ athlete: { id: athleteId } }),
+  },
+  {
+    path: "camps/from-start",
+    method: "POST",
+    may: "camps.create",
+    body: () => ({ camp: "bout=2027-01-09&at=20:00&zone=Europe/Lisbon&weeks=6" }),
+  },
+  { path: "camps/[id]", method: "GET", may: "camps.read", params: ({ campId }) => ({ id: campId }) },
+  {
+    path: "camps/[id]/changes",
+    method: "GET",
+    may: "camps.history",
+    params: ({ campId }) => ({ id: campId }),
+  },
+  {
+    path: "camps/[id]/changes",
+    method: "POST",
+    may: "camps.bout",
+    body: () => CHANGE,
+    params: ({ campId }) => ({ id: campId }),
+  },
+  { path: "feeds", method: "GET", may: "account.own" },
+  {
+    path: "feeds",
+    method: "POST",
+    may: null,
+    body: ({ athleteId }) => ({ scope: "athlete", athleteId, discreet: false }),
+  },
+  { path: "feeds/[id]", method: "POST", may: "account.own", params: ({ feedId }) => ({ id: feedId }) },
+  { path: "feeds/[id]", method: "DELETE", may: "account.own", params: ({ feedId }) => ({ id: feedId }) },
+];
+
+/** Routes that anyone may call; each has its own tests. */
+export const OPEN_ROUTES = [
+  "auth/[...nextauth]",
+  "health",
+  "invites/accept",
+  "live",
+  "plan",
+  "reset",
+  "reset/confirm",
+  "sign-up",
+  "unsubscribe/[token]",
+];
+
+/** The call that a row describes, about what belongs to `scene`. */
+export const callOf = ({ method, body, params }: RouteRow, scene: Scene): Call => ({
+  method,
+  ...(body && { body: body(scene) }),
+  ...(params && { params: params(scene) }),
+});

@@ -1,0 +1,61 @@
+import { randomUUID } from "node:crypto";
+import { eq } from "drizzle-orm";
+import { feeds, holds, invites, memberships, timetableEntries } from "@/db/schema";
+import type { Database } from "@/db/client";
+import type { Role } from "@/lib/policy";
+import { createCamp } from "@/lib/services/camps/create";
+import { campForm } from "../factories/camp-book";
+import { teamWithEveryRole } from "../factories/team";
+import { cookieOf } from "./client";
+import { SESSION, type Scene } from "./routes";
+
+const only = <T>([row]: readonly T[]): T => {
+  if (row === undefined) throw new Error("no row");
+  return row;
+};
+
+/** A team with one of everything that a route can name, and a cookie for each role. */
+export async function sceneOf(db: Database, now: Date) {
+  const team = await teamWithEveryRole(db, now);
+  const teamId = team.team.id;
+  const athleteId = team.athlete.id;
+  const head = team.as("head");
+  const { id: campId } = await createCamp(head, { body: campForm({ athlete: { id: athleteId } }) });
+  const hold = only(
+    await db
+      .insert(holds)
+      .values({ teamId, athleteId, fromDay: "2026-12-20", toDay: "2026-12-21", reason: "Check-up." })
+      .returning(),
+  );
+  const invite = only(
+    await db
+      .insert(invites)
+      .values({
+        teamId,
+        email: `${randomUUID()}@asked.example`,
+        role: "skills",
+        tokenHash: randomUUID(),
+        expiresAt: new Date(now.getTime() + 86_400_000),
+      })
+      .returning(),
+  );
+  const members = await db.select().from(memberships).where(eq(memberships.teamId, teamId));
+  const entryId = randomUUID();
+  await db.insert(timetableEntries).values({ ...SESSION, exdate: [], id: entryId, teamId, series: entryId });
+  const feed = only(
+    await db
+      .insert(feeds)
+      .values({ teamId, userId: head.userId, scope: "team", tokenHash: randomUUID() })
+      .returning(),
+  );
+  const scene: Scene = {
+    athleteId,
+    campId,
+    holdId: hold.id,
+    inviteId: invite.id,
+    membershipId: only(members.filter((row) => row.role === "skills")).id,
+    entryId,
+    feedId: feed.id,
+  };
+  return { ...team, teamId, scene, cookie: (role: Role) => cookieOf(team.as(role).userId) };
+}
