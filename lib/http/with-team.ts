@@ -15,6 +15,8 @@ export interface ServiceInput<B> {
   readonly body: B;
   readonly params: Params;
   readonly search: URLSearchParams;
+  /** Aborted when the caller leaves. */
+  readonly signal: AbortSignal;
 }
 
 interface Declaration<B> {
@@ -59,7 +61,8 @@ export function withTeam<B, R>(service: Service<B, R>, declaration: Declaration<
       const ctx = await contextOf(request);
       mustAllow(ctx, declaration.may);
       const body = declaration.body ? await readBody(request, declaration.body) : (undefined as B);
-      const input = { body, params: await params, search: new URL(request.url).searchParams };
+      const { signal } = request;
+      const input = { body, params: await params, search: new URL(request.url).searchParams, signal };
       return answer(await service(ctx, input), declaration.status);
     } catch (error) {
       return problemResponse(error);

@@ -1,6 +1,8 @@
 import { listenCampChanges, type CampChanged } from "@/db/listen";
 import { env } from "@/lib/env";
 import { logger } from "@/lib/logger";
+import type { TeamContext } from "@/lib/services/context";
+import { loadCamp } from "./load";
 
 type Listener = (change: CampChanged) => void;
 
@@ -35,26 +37,46 @@ export function followCamp(campId: string, listener: Listener): () => void {
   };
 }
 
-/** Server-sent events of a camp: one `data: {"revision": n}` a revision, and a comment every 20 s so that proxies keep the line open. */
-export function campEvents(
-  campId: string,
-  revision: number,
-  signal: AbortSignal,
-): ReadableStream<Uint8Array> {
+/** Proxies close a line on which nothing is said. */
+const BEAT_MS = 20_000;
+
+/** One `data: {"revision": n}` a revision, from the present one on, and a comment now and then that keeps the line open. */
+function eventStream(campId: string, revision: number, signal: AbortSignal): ReadableStream<Uint8Array> {
   const encoder = new TextEncoder();
+  let stop = (): void => undefined;
   return new ReadableStream({
     start(controller) {
       const send = (text: string) => controller.enqueue(encoder.encode(text));
       send(`retry: 2000\ndata: ${JSON.stringify({ revision })}\n\n`);
-      const stop = followCamp(campId, (change) =>
+      const unfollow = followCamp(campId, (change) =>
         send(`data: ${JSON.stringify({ revision: change.revision })}\n\n`),
       );
-      const beat = setInterval(() => send(": still here\n\n"), 20_000);
-      signal.addEventListener("abort", () => {
+      const beat = setInterval(() => send(": still here\n\n"), BEAT_MS);
+      stop = () => {
         clearInterval(beat);
+        unfollow();
+      };
+      signal.addEventListener("abort", () => {
         stop();
         controller.close();
       });
+    },
+    cancel: () => stop(),
+  });
+}
+
+/** Server-sent events of a camp that the member may see. */
+export async function campEvents(
+  ctx: TeamContext,
+  { params, signal }: { params: Record<string, string>; signal: AbortSignal },
+): Promise<Response> {
+  const { row } = await loadCamp(ctx.db, ctx, params.id ?? "");
+  return new Response(eventStream(row.id, row.revision, signal), {
+    headers: {
+      "content-type": "text/event-stream; charset=utf-8",
+      "cache-control": "no-store, no-transform",
+      // nginx would hold events back.
+      "x-accel-buffering": "no",
     },
   });
 }
