@@ -6,6 +6,7 @@ import {
   inputProblems,
   isoFromDay,
   plan,
+  weekdayOf,
   withOverrides,
   type Day,
   type Instant,
@@ -37,6 +38,22 @@ describe("an ordinary camp of 8 weeks", () => {
     expect(items(3)).toEqual(["power-a", "power-b", "strength-keep"]);
     expect(items(1)).toEqual(["power-a", "strength-keep", "trunk-and-kick"]);
     expect(items(0)).toEqual(["power-short", "primer"]);
+  });
+
+  it("the lifts of a week lie where hard sparring takes least of them, the main one on the freshest day", () => {
+    const days = (weeksOut: number) =>
+      camp.lifts
+        .filter((lift) => lift.week === weeksOut)
+        .map(
+          (lift) =>
+            `${lift.item} ${["", "Mon", "Tue", "Wed", "Thu", "Fri", "Sat", "Sun"][weekdayOf(lift.day)]}`,
+        );
+    // Hard sparring on Tuesday evening and Saturday noon.
+    for (const week of [7, 6, 5, 4])
+      expect(days(week)).toEqual(["strength-a Sun", "strength-b Wed", "trunk-and-kick Thu"]);
+    for (const week of [3, 2])
+      expect(days(week)).toEqual(["power-a Sun", "strength-keep Wed", "power-b Thu"]);
+    expect(days(0)).toEqual(["power-short Mon", "primer Thu"]);
   });
 
   it("sets climb over three weeks, fall in the lighter one, and halve over the taper", () => {

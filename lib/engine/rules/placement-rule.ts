@@ -14,6 +14,7 @@ export const PLACEMENT_RULE_IDS = [
   "rest-day",
   "sport-gap",
   "heavy-before-hard-48",
+  "full-dose",
   "fresh-first",
   "spread",
   "hard-days-hard",

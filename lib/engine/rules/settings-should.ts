@@ -45,6 +45,14 @@ export const SHOULD_SETTINGS = {
     [0, 500, 5],
     "Wanted, but not at the price of losing the heavy day.",
   ),
+  "full-dose.price": setting(
+    "should",
+    "Each tenth of a lift's sets that hard sparring takes",
+    8,
+    "points",
+    [0, 100, 1],
+    "A lift is worth most where it can be done in full.",
+  ),
   "fresh-first.price": setting(
     "should",
     "Each 100 AU of residual load before strength A or power A",

@@ -1,3 +1,4 @@
+import { afterFactor, beforeFactor } from "../dose/sparring";
 import { instantAt } from "../geometry";
 import { boundsOf, type Lifting, type Surroundings } from "../placement/surroundings";
 import type { Day } from "../types";
@@ -68,6 +69,34 @@ const heavyBeforeHard48: ShouldRule = {
         const next = hard.nextFrom(startsAt + lift.minutes);
         return `Ends ${hoursText(gapAfter(startsAt))} before ${next?.title ?? "hard sparring"}; house rule would like ${asked} h.`;
       },
+    };
+  },
+};
+
+const fullDose: ShouldRule = {
+  id: "full-dose",
+  title: "Lifts where hard sparring takes least of them",
+  kind: "should",
+  keys: ["full-dose.price"],
+  pricing: ({ input, hard }, lift, day) => {
+    const { rules } = input;
+    const price = rules["full-dose.price"];
+    if (price === 0) return null;
+    const [first, last] = boundsOf(input, day);
+    const reach = { before: 60 * rules["before.far"], after: 60 * rules["after.far"] };
+    if (hard.within(first - reach.after, last + lift.minutes + reach.before).length === 0) return null;
+    // The dose's own factors, so that a place costs by the sets that it will take.
+    const share = (startsAt: number): number => {
+      const next = hard.nextFrom(startsAt);
+      const before = next ? Math.max(0, next.startsAt - startsAt - lift.minutes) / 60 : Infinity;
+      const previous = hard.lastBefore(startsAt);
+      const after = previous ? Math.max(0, startsAt - previous.endsAt) / 60 : Infinity;
+      return beforeFactor(before, rules) * afterFactor(after, rules);
+    };
+    return {
+      points: (startsAt) => Math.round(10 * price * (1 - share(startsAt))),
+      text: (startsAt) =>
+        `Hard sparring near it takes ${Math.round(100 * (1 - share(startsAt)))} % of its sets.`,
     };
   },
 };
@@ -184,6 +213,7 @@ export const SHOULD_RULES: readonly ShouldRule[] = [
   restDay,
   sportGap,
   heavyBeforeHard48,
+  fullDose,
   freshFirst,
   spread,
   hardDaysHard,
