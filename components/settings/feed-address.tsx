@@ -9,7 +9,7 @@ import { LiveRegion } from "@/components/ui/live-region";
 import { Notice } from "@/components/ui/notice";
 import { TextInput } from "@/components/ui/text-input";
 import { QrCode } from "./qr-code";
-import { webcalOf } from "./feed-words";
+import { schemeOf, webcalOf } from "./feed-words";
 
 /** A new address in every form a device takes. It is shown here and never again. */
 export function FeedAddress({
@@ -41,24 +41,34 @@ export function FeedAddress({
         </figure>
         <div className="flex min-w-52 flex-1 flex-col items-start gap-2">
           <a href={webcal} className={buttonLook({ variant: "primary" })}>
-            Open in this device&rsquo;s calendar
+            Open in the calendar
           </a>
           <Button onClick={() => void copy()}>Copy the address</Button>
+          {copied ? (
+            <p aria-hidden="true" className="text-sm font-semibold">
+              {copied}
+            </p>
+          ) : null}
           <a href={address} download="bellward.ics" className={buttonLook({ variant: "plain" })}>
             Download once
           </a>
           <p className="text-xs text-ink-2">A download does not follow changes; the subscription does.</p>
         </div>
       </div>
-      <Field label="Address" hint="For calendars that ask for one: add a calendar by URL." className="mt-4">
+      <Field
+        label={`${schemeOf(address)} address`}
+        hint="For calendars that ask for one: add a calendar by URL."
+        className="mt-4"
+      >
         <TextInput readOnly value={address} onFocus={(event) => event.target.select()} />
       </Field>
-      <Field label="Address for calendar apps" className="mt-3">
+      <Field
+        label="webcal address"
+        hint="The same, under the name that calendar apps answer to."
+        className="mt-3"
+      >
         <TextInput readOnly value={webcal} onFocus={(event) => event.target.select()} />
       </Field>
-      <p aria-hidden="true" className="mt-2 min-h-5 text-sm">
-        {copied}
-      </p>
       <LiveRegion>{copied}</LiveRegion>
       <Actions>
         <Button onClick={onClose}>Done</Button>

@@ -67,7 +67,7 @@ export function FeedForm({ role, athletes, onMade, onClose }: FeedFormProps) {
       ) : null}
       <Checkbox
         label="Discreet"
-        hint="Titles say Training, Sport or Bout and nothing else. For a screen that others see."
+        hint="Titles say Training, Sport, Bout or Appointment and nothing else. For a screen that others see."
         checked={discreet}
         onChange={(event) => setDiscreet(event.target.checked)}
       />

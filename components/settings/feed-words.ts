@@ -25,3 +25,6 @@ export function feedFacts({ discreet, createdAt, lastReadAt }: FeedView): string
 
 /** The same address under the scheme that calendars register for. */
 export const webcalOf = (address: string): string => address.replace(/^https?:/, "webcal:");
+
+/** "https", or "http" on one's own machine. */
+export const schemeOf = (address: string): string => address.slice(0, address.indexOf(":"));
