@@ -44,6 +44,7 @@ const BEAT_MS = 20_000;
 function eventStream(campId: string, revision: number, signal: AbortSignal): ReadableStream<Uint8Array> {
   const encoder = new TextEncoder();
   let stop = (): void => undefined;
+  let cancelled = false;
   return new ReadableStream({
     start(controller) {
       const send = (text: string) => controller.enqueue(encoder.encode(text));
@@ -56,12 +57,16 @@ function eventStream(campId: string, revision: number, signal: AbortSignal): Rea
         clearInterval(beat);
         unfollow();
       };
+      // The reader may have cancelled before the request is told to be over.
       signal.addEventListener("abort", () => {
         stop();
-        controller.close();
+        if (!cancelled) controller.close();
       });
     },
-    cancel: () => stop(),
+    cancel: () => {
+      cancelled = true;
+      stop();
+    },
   });
 }
 
