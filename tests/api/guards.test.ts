@@ -16,11 +16,11 @@ const API = path.resolve(import.meta.dirname, "../../app/api");
 const name = ({ method, path: route }: RouteRow) => `${method} /api/${route}`;
 
 const handlerOf = async ({ method, path: route }: RouteRow) => {
-  const module = (await import(path.join(API, route, "route.ts"))) as Record<
+  const exported = (await import(path.join(API, route, "route.ts"))) as Record<
     string,
     Parameters<typeof call>[0]
   >;
-  const handler = module[method];
+  const handler = exported[method];
   if (!handler) throw new Error(`no ${method} in ${route}`);
   return handler;
 };
