@@ -110,7 +110,11 @@ describe.each(TEAM_ROUTES.map((row) => [name(row), row] as const))("%s", (_, row
       const allowed = ROLES.find((role) => may === null || can({ role, athleteId: null }, may));
       const cookie = await own.cookie(allowed ?? "head");
       const raw = JSON.stringify({ x: "y".repeat(256 * 1024) });
-      for (const headers of [{}, { "content-length": "10" }, { "content-length": "999999" }]) {
+      for (const headers of [
+        {} as Record<string, string>,
+        { "content-length": "10" },
+        { "content-length": "999999" },
+      ]) {
         const response = await call(handler, { method: row.method, cookie, raw, headers });
         expect(response.status).toBe(413);
         await problemOf(response);
