@@ -57,25 +57,27 @@ export function optionsByDay(
   });
 
   /** The best of those that no rule ties to another day, and those that one does. */
-  const sift = ({ item, members }: Group, day: number): { loose: Option | null; tied: readonly number[] } => {
+  const sift = (group: Group, day: number): { loose: Option | null; tied: readonly number[] } => {
+    const { item, members } = group;
+    const touching = reaches.filter((reach) => reach.touches(group, day));
     let [best, bestCost, bestStart] = [-1, Number.POSITIVE_INFINITY, Number.POSITIVE_INFINITY];
     const tied: number[] = [];
     for (const index of members) {
-      let isTied = false;
-      for (const reach of reaches) isTied ||= reach.touches(index, item, day);
-      if (isTied) tied.push(index);
-      else {
-        const cost = problem.candidates[index]?.cost ?? 0;
-        const start = starts[index] ?? 0;
-        if (cost < bestCost || (cost === bestCost && start < bestStart))
-          [best, bestCost, bestStart] = [index, cost, start];
+      if (touching.some((reach) => reach.touchesAt(index, item, day))) {
+        tied.push(index);
+        continue;
       }
+      const cost = problem.candidates[index]?.cost ?? 0;
+      const start = starts[index] ?? 0;
+      if (cost > bestCost || (cost === bestCost && start >= bestStart)) continue;
+      [best, bestCost, bestStart] = [index, cost, start];
     }
     return { loose: best < 0 ? null : optionAt(best, item, NO_BANS), tied };
   };
 
   const worthTrying = (group: Group, day: number): readonly Option[] => {
     const { loose, tied } = sift(group, day);
+    if (tied.length === 0) return loose ? [loose] : [];
     const left = tied
       .map((index) => optionAt(index, group.item, NO_BANS))
       .filter((option) => loose === null || byScore(option, loose) < 0)

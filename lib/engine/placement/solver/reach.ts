@@ -1,5 +1,6 @@
 import type { PlacementProblem } from "../../types";
 import type { Ban } from "./bans";
+import { Extremes } from "./extremes";
 import type { Group, Timeline } from "./timeline";
 
 const [NEVER, ALWAYS] = [Number.POSITIVE_INFINITY, Number.NEGATIVE_INFINITY];
@@ -20,12 +21,13 @@ export class Reach {
   readonly #groups: readonly (readonly Group[])[];
   readonly #starts: Float64Array;
   readonly #ends: Float64Array;
-  // Over the days from this one on, and over those before it.
-  readonly #earliestStart: Float64Array;
-  readonly #earliestEnd: Float64Array;
-  readonly #latestStart: Float64Array;
-  readonly #latestEnd: Float64Array;
   readonly #concerns: readonly boolean[];
+  // From a day on.
+  readonly #firstStart: Extremes;
+  readonly #firstEnd: Extremes;
+  // Over the days before one, turned round: the least of the negative is the largest.
+  readonly #lastStart: Extremes;
+  readonly #lastEnd: Extremes;
 
   /** Keeps `minutes` between lifts: all of them, or heavy ones. */
   constructor(
@@ -38,45 +40,36 @@ export class Reach {
     this.#groups = timeline.groups.map((day) => day.filter(({ item }) => this.#concerns[item]));
     this.#starts = timeline.starts;
     this.#ends = timeline.ends;
-    const { days } = timeline;
-    this.#earliestStart = new Float64Array(days + 1).fill(NEVER);
-    this.#earliestEnd = new Float64Array(days + 1).fill(NEVER);
-    this.#latestStart = new Float64Array(days + 1).fill(ALWAYS);
-    this.#latestEnd = new Float64Array(days + 1).fill(ALWAYS);
-    const all = { earliest: [NEVER, NEVER], latest: [ALWAYS, ALWAYS] };
-    for (let day = days - 1; day >= 0; day--) {
-      for (const { members } of this.#groups[day] ?? []) this.#widen(members, all.earliest, Math.min);
-      [this.#earliestStart[day], this.#earliestEnd[day]] = [
-        all.earliest[0] ?? NEVER,
-        all.earliest[1] ?? NEVER,
-      ];
-    }
-    for (let day = 0; day < days; day++) {
-      for (const { members } of this.#groups[day] ?? []) this.#widen(members, all.latest, Math.max);
-      this.#latestStart[day + 1] = all.latest[0] ?? ALWAYS;
-      this.#latestEnd[day + 1] = all.latest[1] ?? ALWAYS;
-    }
-  }
-
-  #widen(members: readonly number[], known: number[], pick: (a: number, b: number) => number): void {
-    for (const index of members) {
-      known[0] = pick(known[0] ?? 0, this.#starts[index] ?? 0);
-      known[1] = pick(known[1] ?? 0, this.#ends[index] ?? 0);
-    }
+    const backwards = [...this.#groups].reverse();
+    this.#firstStart = new Extremes(this.#groups, ({ firstStart }) => firstStart);
+    this.#firstEnd = new Extremes(this.#groups, ({ firstEnd }) => firstEnd);
+    this.#lastStart = new Extremes(backwards, ({ lastStart }) => -lastStart);
+    this.#lastEnd = new Extremes(backwards, ({ lastEnd }) => -lastEnd);
   }
 
   /** Earliest start from `day` on, of the candidates that the rule is about. */
   earliest(day: number): number {
-    return this.#earliestStart[day] ?? NEVER;
+    return this.#firstStart.from(day);
   }
 
-  /** False where nothing of another day comes near enough to a candidate of `item` on `day`. */
-  touches(index: number, item: number, day: number): boolean {
+  /** Latest end of other items before `day`. */
+  #endBefore(item: number, day: number): number {
+    return -this.#lastEnd.without(item, this.#groups.length - day);
+  }
+
+  /** False where no other item comes near enough, on another day, to any candidate of the group. */
+  touches({ item, firstStart, lastEnd }: Group, day: number): boolean {
+    if (!this.#concerns[item]) return false;
+    const ahead = this.#firstStart.without(item, day + 1);
+    return lastEnd + this.minutes > ahead || this.#endBefore(item, day) + this.minutes > firstStart;
+  }
+
+  /** The same for one candidate of the group. */
+  touchesAt(index: number, item: number, day: number): boolean {
     if (!this.#concerns[item]) return false;
     const [start, end] = [this.#starts[index] ?? 0, this.#ends[index] ?? 0];
-    return (
-      end + this.minutes > this.earliest(day + 1) || (this.#latestEnd[day] ?? ALWAYS) + this.minutes > start
-    );
+    const ahead = this.#firstStart.without(item, day + 1);
+    return end + this.minutes > ahead || this.#endBefore(item, day) + this.minutes > start;
   }
 
   /** What a candidate forbids on later days, in the weakest form that forbids the same; null for nothing. */
@@ -85,13 +78,13 @@ export class Reach {
     const until = (this.#ends[index] ?? 0) + this.minutes;
     const from = (this.#starts[index] ?? 0) - this.minutes;
     let last = ALWAYS;
-    for (let later = day + 1; this.earliest(later) < until; later++) {
+    for (let later = day + 1; this.#firstStart.without(item, later) < until; later++) {
       for (const group of this.#groups[later] ?? []) {
         if (group.item !== item) last = Math.max(last, this.#lastForbidden(group, until, from));
       }
     }
     if (last === ALWAYS) return null;
-    const spares = (this.#earliestEnd[day + 1] ?? NEVER) <= from;
+    const spares = this.#firstEnd.without(item, day + 1) <= from;
     return { heavyOnly: this.heavyOnly, until: last + 1, from: spares ? from : ALWAYS };
   }
 
@@ -103,9 +96,9 @@ export class Reach {
     if (!this.#concerns[item]) return NEVER;
     const [start, end] = [this.#starts[index] ?? 0, this.#ends[index] ?? 0];
     // Something of an earlier day lies after it: days do not order instants here, so nothing can be compared.
-    if ((this.#latestStart[day] ?? ALWAYS) - this.minutes >= end) return Number.NaN;
+    if (-this.#lastStart.without(item, this.#groups.length - day) - this.minutes >= end) return Number.NaN;
     let least = NEVER;
-    for (let earlier = day; (this.#latestEnd[earlier] ?? ALWAYS) + this.minutes > start; earlier--) {
+    for (let earlier = day; this.#endBefore(item, earlier) + this.minutes > start; earlier--) {
       for (const group of this.#groups[earlier - 1] ?? []) {
         if (group.item !== item) least = Math.min(least, this.#leastRelease(group, start));
       }

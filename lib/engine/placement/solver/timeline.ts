@@ -7,6 +7,10 @@ export interface Group {
   readonly members: readonly number[];
   /** Ends grow with starts, as they do when all members are equally long: a search may then halve. */
   readonly endsSorted: boolean;
+  readonly firstStart: number;
+  readonly lastStart: number;
+  readonly firstEnd: number;
+  readonly lastEnd: number;
 }
 
 /** The days of a problem, 0 from the first on which anything can be chosen or has to be free. */
@@ -21,17 +25,33 @@ export interface Timeline {
   readonly origin: number;
 }
 
-const isSorted = (members: readonly number[], values: Float64Array): boolean => {
-  for (let n = 1; n < members.length; n++) {
-    if ((values[members[n - 1] ?? 0] ?? 0) > (values[members[n] ?? 0] ?? 0)) return false;
-  }
-  return true;
-};
-
 function groupOf(item: number, members: number[], starts: Float64Array, ends: Float64Array): Group {
+  const isSorted = (values: Float64Array): boolean => {
+    for (let n = 1; n < members.length; n++) {
+      if ((values[members[n - 1] ?? 0] ?? 0) > (values[members[n] ?? 0] ?? 0)) return false;
+    }
+    return true;
+  };
   // On a day of travel east the order on the clock is not the order of instants.
-  if (!isSorted(members, starts)) members.sort((a, b) => (starts[a] ?? 0) - (starts[b] ?? 0) || a - b);
-  return { item, members, endsSorted: isSorted(members, ends) };
+  if (!isSorted(starts)) members.sort((a, b) => (starts[a] ?? 0) - (starts[b] ?? 0) || a - b);
+  const [first, last] = [members[0] ?? 0, members[members.length - 1] ?? 0];
+  let [firstEnd, lastEnd] = [ends[first] ?? 0, ends[last] ?? 0];
+  const endsSorted = isSorted(ends);
+  if (!endsSorted) {
+    for (const index of members) {
+      firstEnd = Math.min(firstEnd, ends[index] ?? 0);
+      lastEnd = Math.max(lastEnd, ends[index] ?? 0);
+    }
+  }
+  return {
+    item,
+    members,
+    endsSorted,
+    firstStart: starts[first] ?? 0,
+    lastStart: starts[last] ?? 0,
+    firstEnd,
+    lastEnd,
+  };
 }
 
 /** Candidates by day and item. */
