@@ -8,8 +8,9 @@ const url = `http://127.0.0.1:${port}`;
 export default defineConfig({
   testDir: "tests/e2e",
   outputDir: "test-results",
-  timeout: 60_000,
-  expect: { timeout: 10_000 },
+  // Seconds on a quiet machine; room for a busy one.
+  timeout: 180_000,
+  expect: { timeout: 30_000 },
   forbidOnly: true,
   retries: 0,
   workers: 2,

@@ -1,0 +1,138 @@
+import AxeBuilder from "@axe-core/playwright";
+import { expect, test, type Page } from "@playwright/test";
+import type { CampSummary } from "@/lib/schemas/camp";
+import { demoPage } from "./session";
+
+// axe-core finds what a machine can find of WCAG 2.2 A and AA and of good practice; what it cannot is tested by keyboard elsewhere.
+
+test.describe.configure({ mode: "parallel" });
+
+const WIDTHS = [
+  { width: 1440, height: 900 },
+  { width: 390, height: 844 },
+] as const;
+const SCHEMES = ["light", "dark"] as const;
+
+/** Fonts drawn, nothing moving: contrast is measured on what stays. */
+async function settled(page: Page): Promise<void> {
+  await page.waitForLoadState("load");
+  await page.evaluate(async () => {
+    await document.fonts.ready;
+    await Promise.all(document.getAnimations().map((animation) => animation.finished.catch(() => null)));
+  });
+}
+
+/** What axe finds, as "rule: element". The mail in its frame runs no script, so axe cannot look into it. */
+async function findings(page: Page): Promise<string[]> {
+  await settled(page);
+  const { violations } = await new AxeBuilder({ page }).exclude("iframe").analyze();
+  return violations.flatMap(({ id, nodes }) =>
+    nodes.map(
+      ({ target, failureSummary, html }) => `${id}: ${target.join(" ")}\n${html}\n${failureSummary ?? ""}`,
+    ),
+  );
+}
+
+async function findNothing(page: Page, what: string): Promise<void> {
+  for (const colorScheme of SCHEMES) {
+    await page.emulateMedia({ colorScheme, reducedMotion: "reduce" });
+    const { width } = page.viewportSize() ?? { width: 0 };
+    expect.soft(await findings(page), `${what}, ${colorScheme}, ${width} px`).toEqual([]);
+  }
+}
+
+let camp: CampSummary;
+test.beforeAll(async ({ browser }) => {
+  const page = await demoPage(browser, "head");
+  const { camps } = (await (await page.request.get("/api/camps")).json()) as { camps: CampSummary[] };
+  const own = camps.find(({ athlete }) => athlete.name === "Tamsin Velloso");
+  if (!own) throw new Error("The demo has no camp of Tamsin Velloso.");
+  camp = own;
+  await page.context().close();
+});
+
+const pathOf = (path: string): string => path.replace("CAMP", camp.id).replace("ATHLETE", camp.athlete.id);
+
+const PUBLIC = [
+  "/",
+  "/how",
+  "/sign-in",
+  "/sign-up",
+  "/reset",
+  "/outbox",
+  "/no-such-page",
+  "/reset/no-such-token",
+];
+const OF_THE_TEAM = [
+  "/board",
+  "/camps",
+  "/camps/new",
+  "/camps/CAMP",
+  "/camps/CAMP/changes",
+  "/camps/no-such-camp",
+  "/athletes",
+  "/athletes/new",
+  "/athletes/ATHLETE",
+  "/timetable",
+  "/house-rules",
+  "/settings",
+];
+
+for (const viewport of WIDTHS) {
+  for (const path of PUBLIC) {
+    test(`axe finds nothing on ${path} at ${viewport.width} px, light and dark`, async ({ page }) => {
+      await page.setViewportSize(viewport);
+      await page.goto(path);
+      await findNothing(page, path);
+    });
+  }
+
+  for (const path of OF_THE_TEAM) {
+    test(`axe finds nothing on ${path} at ${viewport.width} px, light and dark`, async ({ browser }) => {
+      const page = await demoPage(browser, "head", { viewport });
+      await page.goto(pathOf(path));
+      await expect(page.getByRole("heading", { level: 1 })).toBeVisible();
+      await findNothing(page, path);
+      await page.context().close();
+    });
+  }
+
+  test(`axe finds nothing in the windows over the pages at ${viewport.width} px, light and dark`, async ({
+    browser,
+  }) => {
+    const page = await demoPage(browser, "head", { viewport });
+    const shows = async (path: string, button: string): Promise<void> => {
+      await page.goto(pathOf(path));
+      await page.getByRole("button", { name: button }).first().click();
+      await expect(page.getByRole("dialog")).toBeVisible();
+      await findNothing(page, `${path}: ${button}`);
+    };
+    await shows("/settings", "Invite someone");
+    await shows("/settings", "Subscribe");
+    await shows("/timetable", "Add a session");
+    await shows("/camps/CAMP", "Change the bout");
+    await shows("/camps/CAMP", "Add a session");
+    await page.context().close();
+  });
+
+  test(`axe finds nothing while a session is open at ${viewport.width} px, light and dark`, async ({
+    browser,
+    page: start,
+  }) => {
+    await start.setViewportSize(viewport);
+    await start.goto("/");
+    await start.getByText("More: weigh-in, free hours, other sessions").click();
+    await start
+      .getByRole("button", { name: /, \d+ sets$/ })
+      .first()
+      .click();
+    await findNothing(start, "start page, a session open");
+
+    const page = await demoPage(browser, "head", { viewport });
+    await page.goto(pathOf("/camps/CAMP"));
+    await page.locator("button[data-session]").last().click();
+    await expect(page.getByRole("article")).toBeVisible();
+    await findNothing(page, "camp, a session open");
+    await page.context().close();
+  });
+}
