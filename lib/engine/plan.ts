@@ -4,9 +4,9 @@ import { doseCamp, sessionMinutes, type Dose } from "./dose";
 import { campStart } from "./geometry";
 import { inputProblems, PlanInputError } from "./input";
 import { dayLoads, formOf, sportLoads, weekSummaries } from "./load";
-import { intensityOf, itemSpec, layOut } from "./menu";
+import { intensityOf, itemSpec, layOut, type Layout } from "./menu";
 import { frameOf, phaseOfDay, type CampFrame } from "./phases";
-import { placeLifts } from "./placement";
+import { placeLifts, type Placement } from "./placement";
 import type { Base, Day, Item, Lift, Minute, Plan, PlanInput, Reason } from "./types";
 
 /** A lift with its place, before its sets. */
@@ -25,21 +25,48 @@ interface Standing {
 
 const PINNED: readonly Reason[] = [{ rule: "pin", text: "Pinned by the coach." }];
 
-function liftOf(frame: CampFrame, { minutes: _reserved, ...standing }: Standing, dose: Dose): Lift {
-  const { sets: baseSets, floor: floorSets, effort, heavyLower, explosive } = itemSpec(standing.item);
+/** Written out field by field: this runs for every lift of every preview. */
+function liftOf(frame: CampFrame, standing: Standing, { sets, factors }: Dose): Lift {
+  const { id, item, week, day, start, pinned, past, reasons } = standing;
+  const { sets: baseSets, floor: floorSets, effort, heavyLower, explosive } = itemSpec(item);
   return {
-    ...standing,
-    phase: phaseOfDay(frame.spans, standing.day),
-    minutes: sessionMinutes(dose.sets, frame.input.rules),
-    sets: dose.sets,
+    id,
+    item,
+    week,
+    phase: phaseOfDay(frame.spans, day),
+    day,
+    start,
+    minutes: sessionMinutes(sets, frame.input.rules),
+    sets,
     baseSets,
     floorSets,
-    intensity: intensityOf(standing.item, frame.weekOf(standing.week, standing.day), frame.weeks),
+    intensity: intensityOf(item, frame.weekOf(week, day), frame.weeks),
     effort,
     heavyLower,
     explosive,
-    factors: dose.factors,
+    pinned,
+    past,
+    factors,
+    reasons,
   };
+}
+
+/** Pins as they stand, then what was placed. */
+function standingLifts(layout: Layout, placement: Placement): readonly Standing[] {
+  const pins = new Set(layout.pins.map((pin) => pin.id));
+  const standing: Standing[] = [];
+  for (const { id, item, week, day, start, minutes, past } of layout.fixed) {
+    if (pins.has(id)) {
+      standing.push({ id, item, week, day, start, minutes, pinned: true, past, reasons: PINNED });
+    }
+  }
+  for (const { slot, day, start, reasons: all } of placement.placed) {
+    const { id, item, week, minutes } = slot;
+    // A lift reads the same whatever the plan was measured against; `causes` tells what the base did.
+    const reasons = all.filter((reason) => reason.rule !== "stay-put");
+    standing.push({ id, item, week, day, start, minutes, pinned: false, past: false, reasons });
+  }
+  return standing;
 }
 
 /**
@@ -57,23 +84,7 @@ export function plan(input: PlanInput, base?: Base): Plan {
   const request = { input, slots: layout.slots, fixed: layout.fixed };
   const placement = placeLifts(request);
 
-  const pins = new Set(layout.pins.map((pin) => pin.id));
-  const standing: readonly Standing[] = [
-    ...layout.fixed
-      .filter((lift) => pins.has(lift.id))
-      .map(({ id, item, week, day, start, minutes, past }) => ({
-        ...{ id, item, week, day, start, minutes, past },
-        pinned: true,
-        reasons: PINNED,
-      })),
-    ...placement.placed.map(({ slot: { id, item, week, minutes }, day, start, reasons }) => ({
-      ...{ id, item, week, day, start, minutes },
-      pinned: false,
-      past: false,
-      // A lift reads the same whatever the plan was measured against; `causes` tells what the base did.
-      reasons: reasons.filter((reason) => reason.rule !== "stay-put"),
-    })),
-  ];
+  const standing = standingLifts(layout, placement);
   const { doses, caps } = doseCamp(frame, standing, layout.past, sportLoads(frame));
   const planned = standing.flatMap((lift): Lift[] => {
     const dose = doses.get(lift.id);

@@ -11,8 +11,12 @@ function effectOf(before: SportSession, after: SportSession): SportEffect | null
     before.title !== after.title;
   if (!moved && !edited) return null;
   return {
-    ...{ id: after.id, title: after.title, sport: after.kind, kind: moved ? "moved" : "edited" },
-    ...{ from: placeOf(before), to: placeOf(after) },
+    id: after.id,
+    title: after.title,
+    sport: after.kind,
+    kind: moved ? "moved" : "edited",
+    from: placeOf(before),
+    to: placeOf(after),
   };
 }
 
