@@ -3,7 +3,7 @@ export * from "./types";
 export * from "./geometry";
 export * from "./phases";
 export { ITEM_TITLES, itemSpec, type ItemSpec } from "./menu";
-export { meanOfDecay, sessionMinutes, tauFor, taperFactor } from "./dose";
+export { sessionMinutes } from "./dose";
 export * from "./load";
 export { inputProblems, PlanInputError } from "./input";
 export { plan } from "./plan";
