@@ -1,10 +1,10 @@
-import { weekSpan, weekdayOf } from "../geometry";
+import { weekSpan } from "../geometry";
 import type { Candidate, Day, Instant, Minute } from "../types";
-import { startsByWeekday, type StartsByWeekday } from "./free-starts";
+import type { CampDay } from "./camp-day";
 import type { Slot } from "./request";
 import { ShutCount } from "./shut-count";
 import { SlotDay } from "./slot-day";
-import { clockOf, liftingOf, type Lifting, type Surroundings } from "./surroundings";
+import { liftingOf, type Lifting, type Surroundings } from "./surroundings";
 
 /** A slot with its index among the items of the problem, and what shuts its starts. */
 export interface Wanted {
@@ -30,37 +30,39 @@ function startsOf(grid: readonly number[], open: readonly Open[]): readonly numb
   return extra.length === 0 ? grid : [...new Set([...grid, ...extra])].sort((a, b) => a - b);
 }
 
-function openOn(around: Surroundings, day: Day, wanted: readonly Wanted[], starts: number): Open[] {
+/** The slots that a day is not wholly shut to; of the others is counted what shut it. */
+function openOn(
+  around: Surroundings,
+  day: CampDay,
+  wanted: readonly Wanted[],
+  grid: readonly number[],
+): readonly Open[] {
   const open: Open[] = [];
   for (const one of wanted) {
     const { slot, lift, shut } = one;
     const rules = new SlotDay(around, lift, day);
-    const published = slot.base?.day === day ? slot.base.start : -1;
-    if (rules.shutBy.size === 0 && (starts > 0 || published >= 0)) {
+    const published = slot.base?.day === day.day ? slot.base.start : -1;
+    const shutBy = rules.shutBy();
+    if (shutBy.length === 0 && (grid.length > 0 || published >= 0)) {
       open.push({ ...one, rules, published });
       continue;
     }
     // A whole day counts with all its starts, and with one where it has no free hours anyway.
-    const lost = Math.max(1, starts);
+    const lost = Math.max(1, grid.length);
     shut.tried(lost);
-    for (const rule of rules.shutBy) shut.add(rule, lost);
-    if (rules.shutBy.size === 0) shut.add("free-hours", lost);
+    for (const rule of shutBy) shut.add(rule, lost);
+    if (shutBy.length === 0) shut.add("free-hours", lost);
   }
   return open;
 }
 
-function addDay(
-  around: Surroundings,
-  day: Day,
-  wanted: readonly Wanted[],
-  grid: readonly number[],
-  found: Candidate[],
-): void {
-  const open = openOn(around, day, wanted, grid.length);
+function addDay(around: Surroundings, day: CampDay, wanted: readonly Wanted[], found: Candidate[]): void {
+  const grid = around.free.grid(day.weekday);
+  const open = openOn(around, day, wanted, grid);
+  if (open.length === 0) return;
   const starts = startsOf(grid, open);
-  const readings = clockOf(around.input, day);
   for (const start of starts as readonly Minute[]) {
-    const startsAt = readings(start);
+    const startsAt = day.at(start);
     const isPast = startsAt <= around.input.now;
     const onGrid = starts === grid || grid.includes(start);
     for (const { item, lift, rules, published, shut } of open) {
@@ -71,7 +73,7 @@ function addDay(
       else if (!rules.isOpen(startsAt, start)) rules.countShut(startsAt, start, shut);
       else {
         const endsAt = (startsAt + lift.minutes) as Instant;
-        found.push({ item, day, start, startsAt, endsAt, cost: rules.points(startsAt, start) });
+        found.push({ item, day: day.day, start, startsAt, endsAt, cost: rules.points(startsAt, start) });
       }
     }
   }
@@ -80,7 +82,6 @@ function addDay(
 /** Legal places by day, start and item, with what each costs by itself; counts in `shut` what the rules shut. */
 export function candidatesOf(around: Surroundings, wanted: readonly Wanted[]): readonly Candidate[] {
   const { bout } = around.input;
-  const grids: StartsByWeekday = startsByWeekday(around.input);
   const found: Candidate[] = [];
   // Farthest week first: that is the order of days.
   const weeks = [...new Set(wanted.map(({ slot }) => slot.week))].sort((a, b) => b - a);
@@ -88,7 +89,7 @@ export function candidatesOf(around: Surroundings, wanted: readonly Wanted[]): r
     const ofWeek = wanted.filter(({ slot }) => slot.week === week);
     const { from, to } = weekSpan(bout.day, week);
     for (let day = from; day <= to; day = (day + 1) as Day) {
-      addDay(around, day, ofWeek, grids.get(weekdayOf(day)) ?? [], found);
+      addDay(around, around.dayOf(day), ofWeek, found);
     }
   }
   return found;

@@ -3,7 +3,7 @@ import { hoursText } from "../rules/wording";
 import type { Candidate, Day, Instant, Minute, PlacementProblem, Reason } from "../types";
 import type { Slot } from "./request";
 import { SlotDay } from "./slot-day";
-import { clockOf, liftingOf, type Lifting, type Surroundings } from "./surroundings";
+import { liftingOf, type Lifting, type Surroundings } from "./surroundings";
 
 /** Sparring further off than this says nothing of a place, minutes: every rule on it ends before. */
 const FAR = 96 * 60;
@@ -42,7 +42,7 @@ export function reasonsFor(
 ): readonly Reason[] {
   const lift = liftingOf(slot);
   const reasons = sparringReasons(around, lift, startsAt);
-  for (const { rule, text } of new SlotDay(around, lift, day).payments(startsAt, start))
+  for (const { rule, text } of new SlotDay(around, lift, around.dayOf(day)).payments(startsAt, start))
     reasons.push({ rule, text });
   if (reasons.length === 0) reasons.push({ rule: "spread", text: "Where the week costs least." });
   return reasons;
@@ -56,8 +56,8 @@ export function whyNot(
   start: Minute,
   others: readonly { readonly slot: Slot; readonly day: Day }[],
 ): readonly Reason[] {
-  const rules = new SlotDay(around, liftingOf(slot), day);
-  const startsAt = clockOf(around.input, day)(start);
+  const rules = new SlotDay(around, liftingOf(slot), around.dayOf(day));
+  const startsAt = around.dayOf(day).at(start);
   const breaks = rules.breaks(startsAt, start);
   if (breaks.length > 0) return breaks.map(({ rule, text }) => ({ rule, text }));
   const payments = rules.payments(startsAt, start).map(({ rule, text }) => ({ rule, text }));

@@ -1,7 +1,8 @@
 import { MUST_RULES } from "../rules/must-rules";
 import type { PlacementRuleId, Pricing, Shut } from "../rules/placement-rule";
 import { SHOULD_RULES } from "../rules/should-rules";
-import type { Day, Minute } from "../types";
+import type { Minute } from "../types";
+import type { CampDay } from "./camp-day";
 import type { ShutCount } from "./shut-count";
 import type { Lifting, Surroundings } from "./surroundings";
 
@@ -33,67 +34,81 @@ const shutsAt = ({ from, to, onClock }: Shut, startsAt: number, start: Minute): 
 const isWholeDay = ({ from, to }: Shut): boolean =>
   from === Number.NEGATIVE_INFINITY && to === Number.POSITIVE_INFINITY;
 
+interface Priced {
+  readonly rule: PlacementRuleId;
+  readonly pricing: Pricing;
+}
+
 /** What the rules say of one lift on one day: worked out once, asked for every start. */
 export class SlotDay {
-  readonly #shuts: { readonly rule: PlacementRuleId; readonly shut: Shut }[] = [];
-  readonly #pricings: { readonly rule: PlacementRuleId; readonly pricing: Pricing }[] = [];
-  #moving: Pricing | null = null;
-  /** Rules that shut the whole day. */
-  readonly shutBy = new Set<PlacementRuleId>();
+  readonly #shuts: Shut[] = [];
+  #prices: { readonly own: readonly Priced[]; readonly moving: Pricing | null } | null = null;
 
   constructor(
-    around: Surroundings,
+    private readonly around: Surroundings,
     readonly lift: Lifting,
-    day: Day,
+    readonly day: CampDay,
   ) {
     for (const rule of MUST_RULES) {
-      for (const shut of rule.shuts(around, lift, day)) {
-        this.#shuts.push({ rule: rule.id, shut });
-        if (isWholeDay(shut)) this.shutBy.add(rule.id);
-      }
-    }
-    for (const rule of SHOULD_RULES) {
-      const pricing = rule.pricing(around, lift, day);
-      if (!pricing) continue;
-      if (rule.id === "stay-put") this.#moving = pricing;
-      else this.#pricings.push({ rule: rule.id, pricing });
+      for (const shut of rule.shuts(around, lift, day)) this.#shuts.push(shut);
     }
   }
 
+  /** Rules that shut the whole day. */
+  shutBy(): readonly PlacementRuleId[] {
+    return [...new Set(this.#shuts.filter(isWholeDay).map(({ rule }) => rule))];
+  }
+
   isOpen(startsAt: number, start: Minute): boolean {
-    for (const { shut } of this.#shuts) if (shutsAt(shut, startsAt, start)) return false;
+    for (const shut of this.#shuts) if (shutsAt(shut, startsAt, start)) return false;
     return true;
   }
 
   /** Counts the rules that shut a start, each once. */
   countShut(startsAt: number, start: Minute, count: ShutCount): void {
     let counted: PlacementRuleId | null = null;
-    for (const { rule, shut } of this.#shuts) {
+    for (const shut of this.#shuts) {
       // Shuts of a rule follow one another.
-      if (rule === counted || !shutsAt(shut, startsAt, start)) continue;
-      counted = rule;
-      count.add(rule, 1);
+      if (shut.rule === counted || !shutsAt(shut, startsAt, start)) continue;
+      counted = shut.rule;
+      count.add(counted, 1);
     }
   }
 
   /** What a start costs by itself, whole points. */
   points(startsAt: number, start: Minute): number {
-    let own = 0;
-    for (const { pricing } of this.#pricings) own += pricing.points(startsAt, start);
-    return Math.min(own, MOST_OWN_COST) + (this.#moving?.points(startsAt, start) ?? 0);
+    const { own, moving } = this.#priced();
+    let points = 0;
+    for (const { pricing } of own) points += pricing.points(startsAt, start);
+    return Math.min(points, MOST_OWN_COST) + (moving?.points(startsAt, start) ?? 0);
   }
 
   breaks(startsAt: number, start: Minute): readonly Break[] {
     return this.#shuts
-      .filter(({ shut }) => shutsAt(shut, startsAt, start))
-      .map(({ rule, shut }) => ({ rule, ids: shut.ids, text: shut.text(startsAt, start) }));
+      .filter((shut) => shutsAt(shut, startsAt, start))
+      .map(({ rule, ids, text }) => ({ rule, ids, text: text(startsAt, start) }));
   }
 
   /** What a start pays, but for moving. */
   payments(startsAt: number, start: Minute): readonly Payment[] {
-    return this.#pricings.flatMap(({ rule, pricing }) => {
+    return this.#priced().own.flatMap(({ rule, pricing }) => {
       const points = pricing.points(startsAt, start);
       return points > 0 ? [{ rule, points, text: pricing.text(startsAt, start) }] : [];
     });
+  }
+
+  /** Prices are asked for only where a start is open. */
+  #priced(): { readonly own: readonly Priced[]; readonly moving: Pricing | null } {
+    if (this.#prices) return this.#prices;
+    const own: Priced[] = [];
+    let moving: Pricing | null = null;
+    for (const { id, pricing: pricingOf } of SHOULD_RULES) {
+      const pricing = pricingOf(this.around, this.lift, this.day);
+      if (!pricing) continue;
+      if (id === "stay-put") moving = pricing;
+      else own.push({ rule: id, pricing });
+    }
+    this.#prices = { own, moving };
+    return this.#prices;
   }
 }

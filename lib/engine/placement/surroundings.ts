@@ -1,6 +1,8 @@
-import { DAY_MINUTES, instantAt, offsetAt } from "../geometry";
+import { instantAt } from "../geometry";
 import { ITEM_TITLES } from "../menu/items";
 import type { Day, Instant, Minute, PlanInput, SportKind } from "../types";
+import { CampDay } from "./camp-day";
+import { FreeStarts } from "./free-starts";
 import type { FixedLift, PlacementRequest, Slot } from "./request";
 import { residualLoad, type ResidualLoad } from "./residual";
 import { shutDaysOf, type ShutDay } from "./shut-days";
@@ -39,6 +41,8 @@ export interface Surroundings {
   readonly fixed: Spans<StandingLift>;
   readonly fixedHeavy: Spans<StandingLift>;
   readonly shutDays: ReadonlyMap<Day, ShutDay>;
+  readonly free: FreeStarts;
+  readonly dayOf: (day: Day) => CampDay;
   readonly residual: ResidualLoad;
 }
 
@@ -51,32 +55,6 @@ export const liftingOf = (slot: Slot): Lifting => ({
   fresh: slot.fresh,
   base: slot.base,
 });
-
-/** The one offset of a whole civil day and of a session that runs on from it; null on a day with a step. */
-function offsetOn({ zone }: PlanInput, day: Day): number | null {
-  if (zone.length > 1) {
-    const from = day * DAY_MINUTES;
-    for (const step of zone) if (step.from > from && step.from < from + DAY_MINUTES) return null;
-  }
-  return offsetAt(zone, day * DAY_MINUTES);
-}
-
-/** Instants of a day's wall-clock readings, for many readings of the same day. */
-export function clockOf(input: PlanInput, day: Day): (minute: number) => Instant {
-  const offset = offsetOn(input, day);
-  if (offset === null) return (minute) => instantAt(input.zone, day, minute as Minute);
-  const midnight = day * DAY_MINUTES - offset;
-  return (minute) => (midnight + minute) as Instant;
-}
-
-/** Earliest and latest instant that a reading of the day can mean. */
-export function boundsOf(input: PlanInput, day: Day): readonly [number, number] {
-  const offset = offsetOn(input, day);
-  const from = day * DAY_MINUTES;
-  if (offset !== null) return [from - offset, from + DAY_MINUTES - offset];
-  const offsets = input.zone.map((step) => step.offset);
-  return [from - Math.max(...offsets), from + DAY_MINUTES - Math.min(...offsets)];
-}
 
 function spanOf(
   input: PlanInput,
@@ -111,6 +89,7 @@ export function surroundingsOf({ input, fixed }: PlacementRequest): Surroundings
     }));
   const lifts = fixed.map((lift) => standing(input, lift));
   const spans = new Spans(sport);
+  const days = new Map<Day, CampDay>();
   return {
     input,
     sport: spans,
@@ -118,6 +97,12 @@ export function surroundingsOf({ input, fixed }: PlacementRequest): Surroundings
     fixed: new Spans(lifts),
     fixedHeavy: new Spans(lifts.filter(({ heavyLower }) => heavyLower)),
     shutDays: shutDaysOf(input),
+    free: new FreeStarts(input),
+    dayOf: (day) => {
+      const known = days.get(day) ?? new CampDay(input, day);
+      days.set(day, known);
+      return known;
+    },
     residual: residualLoad(spans.list, input.rules["fresh-first.hours"] * 60),
   };
 }

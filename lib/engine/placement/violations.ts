@@ -16,7 +16,10 @@ function isAhead({ input, sport, fixed }: Surroundings, ids: readonly string[]):
 export function violationsOf(around: Surroundings): readonly Violation[] {
   const found = new Map<string, Violation>();
   const see = (lift: StandingLift): void => {
-    for (const { rule, ids, text } of new SlotDay(around, lift, lift.day).breaks(lift.startsAt, lift.start)) {
+    for (const { rule, ids, text } of new SlotDay(around, lift, around.dayOf(lift.day)).breaks(
+      lift.startsAt,
+      lift.start,
+    )) {
       if (lift.past && !lift.pinned && !isAhead(around, ids)) continue;
       const all = [lift.id, ...ids];
       // Two lifts that break a rule with one another are told once, by the earlier.

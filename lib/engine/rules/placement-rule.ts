@@ -1,5 +1,6 @@
+import type { CampDay } from "../placement/camp-day";
 import type { Lifting, Surroundings } from "../placement/surroundings";
-import type { Day, Minute } from "../types";
+import type { Minute } from "../types";
 import type { HouseRules, RuleKey } from "./house-rules";
 
 export const PLACEMENT_RULE_IDS = [
@@ -31,6 +32,7 @@ interface Rule {
 
 /** Starts on a day that a must rule shuts to a lift: `from` inclusive, `to` not. */
 export interface Shut {
+  readonly rule: PlacementRuleId;
   readonly from: number;
   readonly to: number;
   /** True where the two are minutes since local midnight; else they are instants. */
@@ -45,7 +47,7 @@ export interface Shut {
 export interface MustRule extends Rule {
   readonly kind: "must";
   /** What sport, the calendar and the lifts that stand shut on a day. */
-  readonly shuts: (around: Surroundings, lift: Lifting, day: Day) => readonly Shut[];
+  readonly shuts: (around: Surroundings, lift: Lifting, day: CampDay) => readonly Shut[];
   /** What it keeps from happening, without a full stop, for the starts that it shut. */
   readonly keepsFrom: (rules: HouseRules, lift: Lifting) => string;
 }
@@ -60,7 +62,7 @@ export interface Pricing {
 export interface ShouldRule extends Rule {
   readonly kind: "should";
   /** What a lift pays by its own place; null where no start of the day pays. */
-  readonly pricing: (around: Surroundings, lift: Lifting, day: Day) => Pricing | null;
+  readonly pricing: (around: Surroundings, lift: Lifting, day: CampDay) => Pricing | null;
 }
 
 export type PlacementRule = MustRule | ShouldRule;

@@ -1,6 +1,6 @@
 import { afterFactor, beforeFactor } from "../dose/sparring";
 import { instantAt } from "../geometry";
-import { boundsOf, type Lifting, type Surroundings } from "../placement/surroundings";
+import type { Lifting, Surroundings } from "../placement/surroundings";
 import type { Day } from "../types";
 import type { ShouldRule } from "./placement-rule";
 import { hoursText } from "./wording";
@@ -21,7 +21,7 @@ const sportGap: ShouldRule = {
   title: "Hours between a lift and other training of the day",
   kind: "should",
   keys: ["sport-gap.hours", "sport-gap.price"],
-  pricing: ({ input, sport }, lift, day) => {
+  pricing: ({ input, sport }, lift, { day }) => {
     const sessions = sport.on(day);
     const [asked, price] = [input.rules["sport-gap.hours"], input.rules["sport-gap.price"]];
     if (sessions.length === 0 || price === 0) return null;
@@ -51,13 +51,12 @@ const heavyBeforeHard48: ShouldRule = {
   title: "Heavy legs two days before hard sparring",
   kind: "should",
   keys: ["heavy-before-hard-48.hours", "heavy-before-hard-48.price"],
-  pricing: ({ input, hard }, lift, day) => {
+  pricing: ({ input, hard }, lift, { first, last }) => {
     const [asked, price] = [
       input.rules["heavy-before-hard-48.hours"],
       input.rules["heavy-before-hard-48.price"],
     ];
     if (!lift.heavyLower || price === 0) return null;
-    const [first, last] = boundsOf(input, day);
     if (hard.within(first, last + lift.minutes + asked * 60).length === 0) return null;
     const gapAfter = (startsAt: number): number => {
       const next = hard.nextFrom(startsAt + lift.minutes);
@@ -78,11 +77,10 @@ const fullDose: ShouldRule = {
   title: "Lifts where hard sparring takes least of them",
   kind: "should",
   keys: ["full-dose.price"],
-  pricing: ({ input, hard }, lift, day) => {
+  pricing: ({ input, hard }, lift, { first, last }) => {
     const { rules } = input;
     const price = rules["full-dose.price"];
     if (price === 0) return null;
-    const [first, last] = boundsOf(input, day);
     const reach = { before: 60 * rules["before.far"], after: 60 * rules["after.far"] };
     if (hard.within(first - reach.after, last + lift.minutes + reach.before).length === 0) return null;
     // The dose's own factors, so that a place costs by the sets that it will take.
@@ -144,7 +142,7 @@ const spread: ShouldRule = {
   kind: "should",
   keys: ["spread.next-day", "spread.second-day"],
   // Against lifts that stand; between lifts that are being placed the problem carries it in `spread`.
-  pricing: (around, lift, day) => {
+  pricing: (around, lift, { day }) => {
     if (around.fixed.list.length === 0) return null;
     const { points, titles } = standingNear(around, lift, day);
     if (points === 0) return null;
@@ -161,7 +159,7 @@ const hardDaysHard: ShouldRule = {
   title: "Lift on hard days, after the sparring",
   kind: "should",
   keys: ["hard-days-hard.on", "hard-days-hard.price"],
-  pricing: ({ input, hard }, _lift, day) => {
+  pricing: ({ input, hard }, _lift, { day }) => {
     const price = input.rules["hard-days-hard.price"];
     if (input.rules["hard-days-hard.on"] < 1 || price === 0) return null;
     const ends = hard.on(day).map(({ endsAt }) => endsAt);
@@ -198,7 +196,7 @@ const stayPut: ShouldRule = {
   title: "Published sessions stay",
   kind: "should",
   keys: ["stay-put.far", "stay-put.near", "stay-put.locked.hours"],
-  pricing: (around, { base }, day) => {
+  pricing: (around, { base }, { day }) => {
     const price = stayPutPrice(around, base);
     if (!base || price === 0) return null;
     return {
