@@ -1,6 +1,6 @@
 import { EmptyState } from "@/components/ui/empty-state";
 import { LinkButton } from "@/components/ui/link-button";
-import { dayFromIso } from "@/lib/engine";
+import { dayFromIso } from "@/lib/engine/geometry";
 import type { Day } from "@/lib/engine/types";
 import type { CampSummary } from "@/lib/schemas/camp";
 import { BoardRow } from "./board-row";

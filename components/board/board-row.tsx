@@ -3,7 +3,7 @@ import { daysOutText } from "@/components/camp/bout-line";
 import { KindMark } from "@/components/session/kind-mark";
 import { PHASE_LOOKS, SPORT_LOOKS, WEIGH_IN_LOOK, liftLook, type WorkLook } from "@/components/session/kinds";
 import { classNames } from "@/components/ui/class-names";
-import { dayFromIso, isoFromDay } from "@/lib/engine";
+import { dayFromIso, isoFromDay } from "@/lib/engine/geometry";
 import { ITEMS, SPORT_KINDS, type Day } from "@/lib/engine/types";
 import { dayText, longDayText } from "@/lib/format/civil";
 import type { CampSummary } from "@/lib/schemas/camp";

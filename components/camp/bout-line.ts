@@ -1,4 +1,4 @@
-import { dayFromIso } from "@/lib/engine";
+import { dayFromIso } from "@/lib/engine/geometry";
 import type { Day } from "@/lib/engine/types";
 import { dayText, longDayText } from "@/lib/format/civil";
 import type { CampBook } from "@/lib/schemas/camp-book";

@@ -1,6 +1,6 @@
 import { Button } from "@/components/ui/button";
 import { LinkButton } from "@/components/ui/link-button";
-import { dayFromIso } from "@/lib/engine";
+import { dayFromIso } from "@/lib/engine/geometry";
 import type { Day } from "@/lib/engine/types";
 import type { CampBook } from "@/lib/schemas/camp-book";
 import type { CampView } from "@/lib/schemas/camp";

@@ -3,7 +3,7 @@
 import dynamic from "next/dynamic";
 import { useCallback, useEffect, useRef, useState } from "react";
 import { Notice } from "@/components/ui/notice";
-import { isoFromDay } from "@/lib/engine";
+import { isoFromDay } from "@/lib/engine/geometry";
 import type { Day, Instant } from "@/lib/engine/types";
 import { useCamp } from "@/lib/query/camps";
 import { useCampLive } from "@/lib/query/use-camp-live";
@@ -17,7 +17,6 @@ import { Ropes } from "./ropes/ropes";
 import { todayOf } from "./today";
 import { useDesk } from "./use-desk";
 import { useNow } from "./use-now";
-import { useWarmEngine } from "./use-warm-engine";
 import { WeekTable } from "./week-table";
 
 // Forms and their validator are fetched when they are opened: most visits only look.
@@ -46,7 +45,6 @@ export function CampPage({ initial, now: serverNow, selected }: CampPageProps) {
   const { data: view, isError, error } = useCamp(initial, told);
   const now = useNow(serverNow);
   const desk = useDesk(view, now, selected);
-  useWarmEngine(desk.standing, now, view.may.includes("sport.write"));
   const [mark] = useState(createDayMark);
   const [dialog, setDialog] = useState<OpenDialog | null>(null);
   const heading = useRef<HTMLHeadingElement>(null);

@@ -1,5 +1,5 @@
 import { Notice } from "@/components/ui/notice";
-import { dayFromIso, isoFromDay } from "@/lib/engine";
+import { dayFromIso, isoFromDay } from "@/lib/engine/geometry";
 import type { Day } from "@/lib/engine/types";
 import { dayText } from "@/lib/format/civil";
 import type { CampBook } from "@/lib/schemas/camp-book";

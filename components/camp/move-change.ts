@@ -1,4 +1,4 @@
-import { hhmm, isoFromDay } from "@/lib/engine";
+import { hhmm, isoFromDay } from "@/lib/engine/geometry";
 import type { Day, Minute } from "@/lib/engine/types";
 import type { LiveChange } from "./desk-state";
 import type { Picture } from "./picture";

@@ -1,5 +1,6 @@
-import { isPreview, planInputOf, type Preview, type PreviewResult } from "@/lib/book";
-import { instantAt } from "@/lib/engine";
+import { zoneOf } from "@/lib/book/camp-zone";
+import { isPreview, type Preview, type PreviewResult } from "@/lib/book/preview-result";
+import { instantAt } from "@/lib/engine/geometry";
 import type { Day, Instant, Minute, OffsetStep, Plan, SportSession } from "@/lib/engine/types";
 import type { CampBook } from "@/lib/schemas/camp-book";
 import type { CampView } from "@/lib/schemas/camp";
@@ -12,11 +13,11 @@ export interface Picture {
   readonly zone: readonly OffsetStep[];
 }
 
-export const pictureOf = (view: CampView, now: Instant): Picture => ({
+export const pictureOf = (view: CampView): Picture => ({
   book: view.book,
   plan: view.plan,
   sport: view.sport,
-  zone: planInputOf(view.book, now).zone,
+  zone: zoneOf(view.book, view.sport),
 });
 
 export const pictureOfPreview = ({ book, plan, input }: Preview): Picture => ({

@@ -1,15 +1,16 @@
 "use client";
 
 import { useQueryClient } from "@tanstack/react-query";
-import { useEffect, useMemo, useReducer, type Dispatch } from "react";
+import { useCallback, useEffect, useMemo, useReducer, type Dispatch } from "react";
 import { showToast } from "@/components/ui/toasts";
-import { isPreview, previewChange, type PreviewResult } from "@/lib/book";
+import { isPreview, type PreviewResult } from "@/lib/book/preview-result";
 import type { Instant } from "@/lib/engine/types";
-import { concerns } from "@/lib/policy";
+import { concerns, type Action } from "@/lib/policy";
 import { changesQuery } from "@/lib/query/camps";
 import type { CampView } from "@/lib/schemas/camp";
 import { deskStep, emptyDesk, type DeskState, type DeskStep, type LiveChange } from "./desk-state";
 import { pictureOf, shownPicture, type Picture } from "./picture";
+import { usePlanner } from "./use-planner";
 import { usePutBack } from "./use-put-back";
 import { useSave } from "./use-save";
 
@@ -25,16 +26,12 @@ export interface Desk {
   readonly people: number;
   readonly dispatch: Dispatch<DeskStep>;
   readonly tryChange: (change: LiveChange) => void;
+  /** Fetches the planner, which most visits never need; does nothing for readers who may change nothing. */
+  readonly wantPlanner: () => void;
   readonly save: () => void;
 }
 
-/** Runs the engine and leaves a mark in the browser's performance timeline, where the bench reads how long it took. */
-function timedPreview(standing: Picture, change: LiveChange, now: Instant): PreviewResult {
-  const start = performance.now();
-  const result = previewChange(standing, change, now);
-  performance.measure("bellward.preview", { start, end: performance.now() });
-  return result;
-}
+const WRITES: readonly Action[] = ["sport.write", "lifts.write", "camps.bout"];
 
 /** Tells the reader what others saved: in the rail while a change is being tried, in a corner of the page otherwise. */
 function useNews(view: CampView, state: DeskState, dispatch: Desk["dispatch"]): void {
@@ -69,11 +66,14 @@ function useNews(view: CampView, state: DeskState, dispatch: Desk["dispatch"]): 
 /** The state of the camp page. `selected` is the session whose details are open at first. */
 export function useDesk(view: CampView, now: Instant, selected: string | null): Desk {
   const [state, dispatch] = useReducer(deskStep, emptyDesk(view.revision, selected));
-  const standing = useMemo(() => pictureOf(view, now), [view, now]);
+  const standing = useMemo(() => pictureOf(view), [view]);
   const change = state.pending?.change ?? null;
+  const writes = WRITES.some((action) => view.may.includes(action));
+  const { planner, want } = usePlanner(standing, now);
+  const wantPlanner = useCallback(() => (writes ? want() : undefined), [writes, want]);
   const preview = useMemo(
-    () => (change ? timedPreview(standing, change, now) : null),
-    [standing, change, now],
+    () => (change && planner ? planner.previewChange(standing, change, now) : null),
+    [planner, standing, change, now],
   );
   const shown = useMemo(() => shownPicture(standing, preview), [standing, preview]);
   const putBack = usePutBack(view.id, dispatch);
@@ -90,7 +90,11 @@ export function useDesk(view: CampView, now: Instant, selected: string | null): 
     preview,
     people: held ? view.others.filter((role) => concerns(role, held)).length : 0,
     dispatch,
-    tryChange: (next) => dispatch({ type: "try", change: next, key: crypto.randomUUID() }),
+    tryChange: (next) => {
+      want();
+      dispatch({ type: "try", change: next, key: crypto.randomUUID() });
+    },
+    wantPlanner,
     save: () => {
       if (state.pending && held && !state.saving)
         saving.mutate({ pending: state.pending, preview: held, view });

@@ -3,7 +3,7 @@
 import { useMutation, useQueryClient } from "@tanstack/react-query";
 import type { Dispatch } from "react";
 import { showToast } from "@/components/ui/toasts";
-import type { Preview } from "@/lib/book";
+import type { Preview } from "@/lib/book/preview-result";
 import { campQuery, saveChange, staleProblem } from "@/lib/query/camps";
 import type { CampView, SaveAnswer } from "@/lib/schemas/camp";
 import type { DeskStep, Pending } from "./desk-state";

@@ -1,4 +1,4 @@
-import { dayFromIso, hhmm, isoFromDay, minuteFromHhmm } from "@/lib/engine";
+import { dayFromIso, hhmm, isoFromDay, minuteFromHhmm } from "@/lib/engine/geometry";
 import type { Day, KnockOn, LiftEffect, SportEffect } from "@/lib/engine/types";
 import { dayText, momentText } from "@/lib/format/civil";
 import { ITEM_LOOKS } from "@/components/session/kinds";

@@ -1,4 +1,4 @@
-import { hhmm } from "@/lib/engine";
+import { hhmm } from "@/lib/engine/geometry";
 import type { Day, Lift, Minute, Plan, SportSession, WeekSummary } from "@/lib/engine/types";
 import { SPORT_LOOKS, WEIGH_IN_LOOK, liftLook, type WorkLook } from "./kinds";
 

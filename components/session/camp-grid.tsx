@@ -1,7 +1,7 @@
 "use client";
 
 import { Fragment, useId, useMemo, useState } from "react";
-import { isoFromDay } from "@/lib/engine";
+import { isoFromDay } from "@/lib/engine/geometry";
 import type { Day, Minute, Plan, SportSession } from "@/lib/engine/types";
 import { weekRows } from "./camp-days";
 import { CampWeek } from "./camp-week";

@@ -1,5 +1,5 @@
 import { classNames } from "@/components/ui/class-names";
-import { hhmm, isoFromDay } from "@/lib/engine";
+import { hhmm, isoFromDay } from "@/lib/engine/geometry";
 import type { Day, Plan } from "@/lib/engine/types";
 import { dayText } from "@/lib/format/civil";
 import { hoursText, type CellEntry, type WeekRow } from "./camp-days";

@@ -5,7 +5,7 @@ import type { FieldError } from "@/lib/errors";
 import type { CampBook, SportEntry } from "@/lib/schemas/camp-book";
 import type { Change, SportValues } from "@/lib/schemas/change";
 import type { BookEdit } from "./edit";
-import { campSpan } from "./plan-book";
+import { campSpan } from "./camp-span";
 import { dropSport, editSport, findOccurrence } from "./sport-edits";
 
 export type EditResult = { readonly edit: BookEdit } | { readonly problems: readonly FieldError[] };

@@ -1,14 +1,5 @@
 import { expandEntries } from "@/lib/calendar/recurrence";
-import { offsetSteps } from "@/lib/calendar/zones";
-import {
-  dayFromIso,
-  instantAt,
-  isoFromDay,
-  minuteFromHhmm,
-  plan,
-  weekSpan,
-  withOverrides,
-} from "@/lib/engine";
+import { dayFromIso, instantAt, isoFromDay, minuteFromHhmm, plan, withOverrides } from "@/lib/engine";
 import type {
   Base,
   Day,
@@ -21,20 +12,13 @@ import type {
   Weekday,
 } from "@/lib/engine/types";
 import type { BookPin, CampBook } from "@/lib/schemas/camp-book";
+import { campSpan } from "./camp-span";
+import { zoneOf } from "./camp-zone";
 
 /** A camp book with what the engine made of it. */
 export interface PlannedCamp {
   readonly input: PlanInput;
   readonly plan: Plan;
-}
-
-/** First and last day of the camp: whole weeks that end with the bout. */
-export function campSpan(book: { readonly bout: { readonly date: string }; readonly weeks: number }): {
-  from: Day;
-  to: Day;
-} {
-  const boutDay = dayFromIso(book.bout.date);
-  return { from: weekSpan(boutDay, book.weeks - 1).from, to: boutDay };
 }
 
 const CONTACT: ReadonlySet<SportKind> = new Set(["hard-sparring", "technical-sparring"]);
@@ -52,17 +36,6 @@ export function sportOf(book: CampBook): SportSession[] {
   );
 }
 
-/**
- * First day that is lived in the venue's zone: the day after the last travel before the bout; without travel, the day
- * of the weigh-in, else the bout's own.
- */
-function venueFrom(book: CampBook, sport: readonly SportSession[]): Day {
-  const boutDay = dayFromIso(book.bout.date);
-  const travel = sport.filter((session) => session.kind === "travel" && session.day < boutDay).at(-1);
-  if (travel) return (travel.day + 1) as Day;
-  return book.weighIn ? dayFromIso(book.weighIn.date) : boutDay;
-}
-
 const pinOf = (pin: BookPin): Pin => ({
   id: pin.liftId,
   slot: { item: pin.item, week: pin.week },
@@ -73,16 +46,9 @@ const pinOf = (pin: BookPin): Pin => ({
 /** The engine's input for a book, as of `now`. */
 export function planInputOf(book: CampBook, now: Instant): PlanInput {
   const sport = sportOf(book);
-  const { from, to } = campSpan(book);
   return {
     now,
-    zone: offsetSteps({
-      homeZone: book.homeZone,
-      venueZone: book.bout.timeZone,
-      from: (from - 7) as Day,
-      to: (to + 2) as Day,
-      venueFrom: venueFrom(book, sport),
-    }),
+    zone: zoneOf(book, sport),
     bout: { day: dayFromIso(book.bout.date), start: minuteFromHhmm(book.bout.time) },
     weeks: book.weeks,
     weighIn: book.weighIn && { day: dayFromIso(book.weighIn.date), start: minuteFromHhmm(book.weighIn.time) },

@@ -1,31 +1,19 @@
 import { RecurrenceError } from "@/lib/calendar/recurrence";
 import { PlanInputError, instantAt, knockOn } from "@/lib/engine";
-import type { Base, Instant, KnockOn, Plan, PlanInput, SportSession } from "@/lib/engine/types";
-import type { FieldError } from "@/lib/errors";
+import type { Base, Instant, Plan, PlanInput, SportSession } from "@/lib/engine/types";
 import type { CampBook } from "@/lib/schemas/camp-book";
 import type { Change } from "@/lib/schemas/change";
 import { applyEdit, type BookEdit } from "./edit";
 import { editFor } from "./edit-for";
-import { baseOf, campSpan, planBook, planInputOf } from "./plan-book";
+import { campSpan } from "./camp-span";
+import { baseOf, planBook, planInputOf } from "./plan-book";
+import type { PreviewResult } from "./preview-result";
 
 /** A camp as saved: the book, and the plan that stands. */
 export interface StandingCamp {
   readonly book: CampBook;
   readonly plan: Plan;
 }
-
-/** What a change would make of a camp; nothing is saved. */
-export interface Preview {
-  readonly edit: BookEdit;
-  readonly book: CampBook;
-  readonly input: PlanInput;
-  readonly plan: Plan;
-  readonly knockOn: KnockOn;
-}
-
-export type PreviewResult = Preview | { readonly problems: readonly FieldError[] };
-
-export const isPreview = (result: PreviewResult): result is Preview => "plan" in result;
 
 const signature = (session: SportSession): string =>
   [session.id, session.kind, session.day, session.start, session.minutes, session.title].join("|");

@@ -1,4 +1,4 @@
-import { hhmm, isoFromDay } from "@/lib/engine";
+import { hhmm, isoFromDay } from "@/lib/engine/geometry";
 import type { Day, Minute } from "@/lib/engine/types";
 
 const short = new Intl.DateTimeFormat("en-GB", {

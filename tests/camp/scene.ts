@@ -27,7 +27,7 @@ export function campView(book: CampBook = campBook()): CampView {
   };
 }
 
-export const standing = (book?: CampBook): Picture => pictureOf(campView(book), NOW);
+export const standing = (book?: CampBook): Picture => pictureOf(campView(book));
 
 export function preview(picture: Picture, change: LiveChange): Preview {
   const result = previewChange(picture, change, NOW);

@@ -4,7 +4,8 @@ import type FullCalendar from "@fullcalendar/react";
 import { useCallback, useEffect, useMemo, useRef, useState } from "react";
 import { KeyHint } from "@/components/ui/key-hint";
 import { LiveRegion } from "@/components/ui/live-region";
-import { campSpan, isPreview } from "@/lib/book";
+import { campSpan } from "@/lib/book/camp-span";
+import { isPreview } from "@/lib/book/preview-result";
 import type { Day } from "@/lib/engine/types";
 import type { DayMark } from "../day-mark";
 import { ShownContext } from "../shown-context";
@@ -64,6 +65,10 @@ export function CalendarArea({ desk, today, mark, onOpen, onAdd, onDropped }: Ca
         aria-label="Calendar of the camp"
         role="group"
         onKeyDown={onKeyDown}
+        // The planner is fetched before it is needed: whoever points at a session may be about to carry it.
+        onFocus={desk.wantPlanner}
+        onPointerEnter={desk.wantPlanner}
+        onTouchStart={desk.wantPlanner}
         onKeyUp={(event) => {
           // Space is a key of the calendar; without this it would also press the session it is on.
           if (event.key === " " && event.target instanceof HTMLButtonElement) event.preventDefault();

@@ -5,7 +5,7 @@ import dayGridPlugin from "@fullcalendar/daygrid";
 import interactionPlugin from "@fullcalendar/interaction";
 import FullCalendar from "@fullcalendar/react";
 import { memo, useEffect, useMemo, useRef, useState, type RefObject } from "react";
-import { dayFromIso, isoFromDay, weekdayOf } from "@/lib/engine";
+import { dayFromIso, isoFromDay, weekdayOf } from "@/lib/engine/geometry";
 import type { Day } from "@/lib/engine/types";
 import "./calendar.css";
 import { DayHead } from "./day-head";

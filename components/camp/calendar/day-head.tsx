@@ -1,6 +1,6 @@
 "use client";
 
-import { dayFromIso, isoFromDay } from "@/lib/engine";
+import { dayFromIso, isoFromDay } from "@/lib/engine/geometry";
 import type { Day } from "@/lib/engine/types";
 import { dayText, longDayText } from "@/lib/format/civil";
 import type { CampBook } from "@/lib/schemas/camp-book";

@@ -1,5 +1,5 @@
-import { isPreview, type PreviewResult } from "@/lib/book";
-import { dayFromIso, hhmm, minuteFromHhmm } from "@/lib/engine";
+import { isPreview, type PreviewResult } from "@/lib/book/preview-result";
+import { dayFromIso, hhmm, minuteFromHhmm } from "@/lib/engine/geometry";
 import type {
   Day,
   Instant,

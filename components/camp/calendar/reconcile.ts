@@ -1,5 +1,5 @@
 import type { CalendarApi, EventApi, EventInput } from "@fullcalendar/core";
-import { hhmm, isoFromDay } from "@/lib/engine";
+import { hhmm, isoFromDay } from "@/lib/engine/geometry";
 import type { CalendarEntry } from "./entry";
 
 const startText = (entry: CalendarEntry): string => {

@@ -1,7 +1,7 @@
 "use client";
 
 import { useEffect, useMemo, useRef, type RefObject } from "react";
-import { dayFromIso } from "@/lib/engine";
+import { dayFromIso } from "@/lib/engine/geometry";
 import type { Day, Minute } from "@/lib/engine/types";
 import type { Hand } from "../desk-state";
 import { moveChange, type Place } from "../move-change";

@@ -1,7 +1,7 @@
 "use client";
 
 import { useEffect, type PointerEvent, type RefObject } from "react";
-import { dayFromIso, isoFromDay } from "@/lib/engine";
+import { dayFromIso, isoFromDay } from "@/lib/engine/geometry";
 import type { DayMark } from "../day-mark";
 
 const POINTED = "camp-pointed";

@@ -4,7 +4,7 @@ import type { FormEvent } from "react";
 import { Button } from "@/components/ui/button";
 import { Field } from "@/components/ui/field";
 import { DateInput, TimeInput } from "@/components/ui/text-input";
-import { dayFromIso, hhmm, isoFromDay, minuteFromHhmm } from "@/lib/engine";
+import { dayFromIso, hhmm, isoFromDay, minuteFromHhmm } from "@/lib/engine/geometry";
 import type { Day } from "@/lib/engine/types";
 import type { Place } from "../move-change";
 
@@ -35,7 +35,7 @@ export function MoveForm({ at, from, to, onMove }: MoveFormProps) {
           max={isoFromDay(to)}
         />
       </Field>
-      <Field label="Time" className="w-28">
+      <Field label="Time" className="w-36">
         <TimeInput name="start" required defaultValue={hhmm(at.start)} />
       </Field>
       <Button type="submit">Try it</Button>

@@ -1,4 +1,4 @@
-import { campSpan } from "@/lib/book";
+import { campSpan } from "@/lib/book/camp-span";
 import type { Day } from "@/lib/engine/types";
 import { todayOf } from "../today";
 import type { Desk } from "../use-desk";

@@ -1,5 +1,5 @@
 import { RRule, Weekday as RuleDay } from "rrule";
-import { dayFromIso, isoFromDay, weekdayOf } from "@/lib/engine";
+import { dayFromIso, isoFromDay, weekdayOf } from "@/lib/engine/geometry";
 import type { Day, Weekday } from "@/lib/engine/types";
 
 /** A weekly recurrence as the form has it. */

@@ -1,6 +1,6 @@
 "use client";
 
-import { dayFromIso, minuteFromHhmm } from "@/lib/engine";
+import { dayFromIso, minuteFromHhmm } from "@/lib/engine/geometry";
 import { WEIGH_IN_LOOK } from "@/components/session/kinds";
 import { momentText } from "@/lib/format/civil";
 import type { Desk } from "../use-desk";

@@ -6,7 +6,7 @@ import { Button } from "@/components/ui/button";
 import { findOccurrence } from "@/lib/book/sport-edits";
 import type { SportSession } from "@/lib/engine/types";
 import { dayText } from "@/lib/format/civil";
-import { campSpan } from "@/lib/book";
+import { campSpan } from "@/lib/book/camp-span";
 import { moveChange } from "../move-change";
 import { isPastAt } from "../picture";
 import type { Desk } from "../use-desk";

@@ -5,7 +5,7 @@ import { ZoneSelect } from "@/components/start/zone-select";
 import { Checkbox } from "@/components/ui/checkbox";
 import { Field } from "@/components/ui/field";
 import { DateInput, NumberInput, TextInput, TimeInput } from "@/components/ui/text-input";
-import { dayFromIso, isoFromDay } from "@/lib/engine";
+import { dayFromIso, isoFromDay } from "@/lib/engine/geometry";
 import type { Day } from "@/lib/engine/types";
 import type { Bout, CampBook } from "@/lib/schemas/camp-book";
 import { civilDate } from "@/lib/schemas/civil";

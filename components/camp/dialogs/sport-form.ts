@@ -1,5 +1,5 @@
 import { z } from "zod";
-import { dayFromIso, weekdayOf } from "@/lib/engine";
+import { dayFromIso, weekdayOf } from "@/lib/engine/geometry";
 import type { SportEntry } from "@/lib/schemas/camp-book";
 import { changeScope, sportValuesSchema, type SportValues } from "@/lib/schemas/change";
 import { civilDate } from "@/lib/schemas/civil";

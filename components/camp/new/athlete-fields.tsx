@@ -62,7 +62,7 @@ function FreeHours() {
   );
 }
 
-/** Who fights, and what the planner has to know of them. */
+/** Who fights: someone of the team, with what is known of them, or someone new. */
 export function AthleteFields({ athletes }: { readonly athletes: readonly AthleteChoice[] }) {
   const { register, control, setValue } = useFormContext<Draft>();
   const problem = useProblem<Draft>();
@@ -72,8 +72,8 @@ export function AthleteFields({ athletes }: { readonly athletes: readonly Athlet
     if (facts) setValue("facts", { ...facts, freeHours: [...facts.freeHours] }, { shouldDirty: true });
   };
   return (
-    <div className="grid gap-3.5 sm:grid-cols-2">
-      <Field label="Athlete" className="sm:col-span-2">
+    <div className="grid gap-3.5">
+      <Field label="Athlete">
         <Select
           {...register("athleteId", {
             onChange: (event: { target: { value: string } }) => takeFacts(event.target.value),
@@ -88,10 +88,20 @@ export function AthleteFields({ athletes }: { readonly athletes: readonly Athlet
         </Select>
       </Field>
       {athleteId === "" ? (
-        <Field label="Name" error={problem("athleteName")} className="sm:col-span-2" required>
+        <Field label="Name" error={problem("athleteName")} required>
           <TextInput autoComplete="off" {...register("athleteName")} />
         </Field>
       ) : null}
+    </div>
+  );
+}
+
+/** What the planner has to know of the athlete, as of this camp. */
+export function LiftingFields() {
+  const { register } = useFormContext<Draft>();
+  const problem = useProblem<Draft>();
+  return (
+    <div className="grid gap-3.5 sm:grid-cols-2">
       <Field label="Striking base" error={problem("facts.strikingBase")} className="sm:col-span-2">
         <Select choices={BASE_CHOICES} {...register("facts.strikingBase")} />
       </Field>

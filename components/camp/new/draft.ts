@@ -1,6 +1,6 @@
 import { readWeekly, weeklyRule } from "../details/recurrence";
-import { campSpan } from "@/lib/book";
-import { dayFromIso, isoFromDay, weekdayOf } from "@/lib/engine";
+import { campSpan } from "@/lib/book/camp-span";
+import { dayFromIso, isoFromDay, weekdayOf } from "@/lib/engine/geometry";
 import type { Day, SportKind } from "@/lib/engine/types";
 import type { CampForm } from "@/lib/schemas/camp";
 import type { AthleteFacts, Bout, CampBook, SportEntry } from "@/lib/schemas/camp-book";

@@ -1,9 +1,9 @@
 import { startCampForm } from "@/lib/book/start-camp";
-import { isoFromDay, weekdayOf } from "@/lib/engine";
+import { isoFromDay, weekdayOf } from "@/lib/engine/geometry";
 import type { Day } from "@/lib/engine/types";
 import type { AthleteFacts } from "@/lib/schemas/camp-book";
 import { START_DEFAULTS, readStartParams } from "@/lib/schemas/start-params";
-import { draftSport, type Draft, type SportRow } from "./draft";
+import { draftSport, type Draft, type DraftSport, type SportRow } from "./draft";
 
 interface Beginning {
   /** Inputs of the start page, as its address holds them. */
@@ -30,6 +30,9 @@ const FACTS: AthleteFacts = {
   strikingBase: "whipping-round-kicks",
   freeHours: [1, 2, 3, 4, 5, 6, 7].map((weekday) => ({ weekday, from: "10:00", to: "20:00" })),
 };
+
+const byWeek = (a: DraftSport, b: DraftSport): number =>
+  Math.min(...a.weekdays) - Math.min(...b.weekdays) || a.time.localeCompare(b.time);
 
 function draftOfLink(link: string, { zone, today, athlete }: Beginning): Draft | null {
   const params = readStartParams(new URLSearchParams(link), { ...START_DEFAULTS, date: firstBout(today) });
@@ -70,6 +73,6 @@ export function freshDraft(beginning: Beginning): Draft {
     weeks: WEEKS,
     weighIn: null,
     facts: athlete?.facts ?? FACTS,
-    sport: timetable.map((row) => draftSport(row, null)),
+    sport: timetable.map((row) => draftSport(row, null)).sort(byWeek),
   };
 }

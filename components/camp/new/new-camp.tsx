@@ -17,7 +17,7 @@ import { ProblemError, type Problem } from "@/lib/query/send";
 import type { CampBook } from "@/lib/schemas/camp-book";
 import { BoutFields } from "../dialogs/bout-fields";
 import { todayOf } from "../today";
-import { AthleteFields, type AthleteChoice } from "./athlete-fields";
+import { AthleteFields, LiftingFields, type AthleteChoice } from "./athlete-fields";
 import { formOfDraft, type Draft } from "./draft";
 import { draftSchema } from "./draft-schema";
 import { FormPart } from "./form-part";
@@ -104,6 +104,9 @@ export function NewCamp({ initial, athletes, rules, now }: NewCampProps) {
           </FormPart>
           <FormPart title="The sport’s week">
             <SportRows />
+          </FormPart>
+          <FormPart title="Lifting">
+            <LiftingFields />
           </FormPart>
           {problem ? (
             <Notice tone="caution" className="mt-4">

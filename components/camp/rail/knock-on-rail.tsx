@@ -3,7 +3,7 @@
 import type { RefObject } from "react";
 import { Button } from "@/components/ui/button";
 import { Notice } from "@/components/ui/notice";
-import { isPreview } from "@/lib/book";
+import { isPreview } from "@/lib/book/preview-result";
 import type { LiveChange, Pending } from "../desk-state";
 import { subjectOf } from "../move-change";
 import type { Desk } from "../use-desk";
@@ -47,6 +47,11 @@ export function KnockOnRail({ desk, pending, heading }: KnockOnRailProps) {
           <p className="mt-1 text-xs text-ink-2">Not saved yet. {respondText(held.knockOn, subject)}</p>
         ) : null}
       </div>
+      {preview === null ? (
+        <p role="status" className="px-4 pb-3 text-sm text-ink-2">
+          Working out what it knocks on …
+        </p>
+      ) : null}
       <MissedChanges missed={state.missed} zone={desk.view.book.homeZone} />
       {state.refusal ? (
         <Notice role="alert" tone="error" title="Not saved" className="mx-4 mb-3">

@@ -1,12 +1,20 @@
 "use client";
 
+import dynamic from "next/dynamic";
 import type { ReactNode, RefObject } from "react";
 import { classNames } from "@/components/ui/class-names";
 import { KindLegend, legendOf } from "@/components/session/kind-legend";
-import { SessionDetails } from "../details/session-details";
 import type { Desk } from "../use-desk";
 import { CampRemarks } from "./camp-remarks";
-import { KnockOnRail } from "./knock-on-rail";
+
+// Fetched when a session is opened or a change is tried.
+const KnockOnRail = dynamic(() => import("./knock-on-rail").then((module) => module.KnockOnRail), {
+  ssr: false,
+});
+const SessionDetails = dynamic(
+  () => import("../details/session-details").then((module) => module.SessionDetails),
+  { ssr: false },
+);
 
 interface RailProps {
   readonly desk: Desk;

@@ -1,5 +1,4 @@
 import { line } from "d3-shape";
-import { HOUSE_RULES, tauFor, taperFactor } from "@/lib/engine";
 import type { Day, Plan } from "@/lib/engine/types";
 import { ROPE_WIDTH } from "./lane";
 
@@ -19,23 +18,32 @@ const path = line<readonly [number, number]>()
   .x((point) => point[0])
   .y((point) => point[1]);
 
-/** Share of the sets that the taper leaves, as a line over the days: 1 until it begins. `top` and `foot` bound it. */
-export function taperPath(
-  plan: Plan,
-  days: RopeDays,
-  cut: number | undefined,
-  top: number,
-  foot: number,
-): string | null {
-  const taper = plan.phases.find((span) => span.phase === "taper");
+/** Share of the sets left on day `t` of the taper: `exp(-t / tau)`, the engine's own curve. */
+const shareLeft = (t: number, tau: number): number => (t < 1 ? 1 : Math.exp(-t / tau));
+
+/** The taper's time constant, read off any lift in it: its factor is the share left on its day. Null without such a lift. */
+function tauOf({ lifts, phases }: Plan): number | null {
+  const taper = phases.find((span) => span.phase === "taper");
   if (!taper) return null;
-  const tau = tauFor(cut ?? HOUSE_RULES["taper.cut"].value, taper.to - taper.from + 1);
+  for (const lift of lifts) {
+    const share = lift.factors.find((factor) => factor.name === "taper")?.value ?? 1;
+    if (lift.day >= taper.from && share > 0 && share < 1)
+      return -(lift.day - taper.from + 1) / Math.log(share);
+  }
+  return null;
+}
+
+/** Share of the sets that the taper leaves, as a line over the days: 1 until it begins. `top` and `foot` bound it. */
+export function taperPath(plan: Plan, days: RopeDays, top: number, foot: number): string | null {
+  const taper = plan.phases.find((span) => span.phase === "taper");
+  const tau = tauOf(plan);
+  if (!taper || tau === null) return null;
   const y = (share: number): number => foot - share * (foot - top);
   const points: [number, number][] = [[0, y(1)]];
   for (let day = taper.from; day <= taper.to; day++) {
-    points.push([dayX(days, day), y(taperFactor(day - taper.from, tau))]);
+    points.push([dayX(days, day), y(shareLeft(day - taper.from, tau))]);
   }
-  points.push([ROPE_WIDTH, y(taperFactor(taper.to - taper.from + 1, tau))]);
+  points.push([ROPE_WIDTH, y(shareLeft(taper.to - taper.from + 1, tau))]);
   return path(points);
 }
 

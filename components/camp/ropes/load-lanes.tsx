@@ -86,13 +86,13 @@ export function SportLane({ picture, days, detail }: LoadLaneProps) {
 
 /** Working sets a day, and what share of them the taper leaves. */
 export function LiftingLane({ picture, days, detail }: LoadLaneProps) {
-  const { plan, book } = picture;
+  const { plan } = picture;
   const bars = plan.lifts.map((lift) => ({
     day: lift.day,
     value: detail ? lift.sets : 1,
     className: classNames(liftLook(lift.item, lift.phase).fill),
   }));
-  const taper = detail ? taperPath(plan, days, book.rules["taper.cut"], TOP, FOOT) : null;
+  const taper = detail ? taperPath(plan, days, TOP, FOOT) : null;
   return (
     <Lane title="Lifting" unit={detail ? "working sets" : "sessions"} height={HEIGHT}>
       <WeekLines days={days} />

@@ -3,7 +3,7 @@
 import { memo } from "react";
 import type { Action } from "@/lib/policy";
 import type { Day } from "@/lib/engine/types";
-import { campSpan } from "@/lib/book";
+import { campSpan } from "@/lib/book/camp-span";
 import type { DayMark } from "../day-mark";
 import type { Picture } from "../picture";
 import { DayPointer } from "./day-pointer";
