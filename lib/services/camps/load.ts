@@ -7,6 +7,7 @@ import type { StandingCamp } from "@/lib/book";
 import { notFound } from "@/lib/errors";
 import { can } from "@/lib/policy";
 import type { TeamContext } from "@/lib/services/context";
+import { isId } from "@/lib/services/ids";
 
 export interface LoadedCamp extends StandingCamp {
   readonly row: CampRow;
@@ -21,7 +22,7 @@ export async function loadCamp(
   campId: string,
   options: { lock?: boolean } = {},
 ): Promise<LoadedCamp> {
-  const row = await (options.lock ? lockCamp : findCamp)(tx, ctx.teamId, campId);
+  const row = isId(campId) ? await (options.lock ? lockCamp : findCamp)(tx, ctx.teamId, campId) : null;
   if (!row || !can(ctx.member, "camps.read", row.athleteId)) throw notFound();
   const parts = await loadCampParts(tx, row);
   return {
