@@ -27,7 +27,7 @@ export function FreeHoursInput() {
         {fields.map((field, index) => (
           <li
             key={field.id}
-            className="grid grid-cols-[minmax(0,1fr)_minmax(0,7rem)_minmax(0,5.5rem)_auto] items-start gap-1.5"
+            className="grid grid-cols-[minmax(0,1fr)_8.25rem_4.75rem_auto] items-start gap-1.5"
           >
             <Field label={`Weekday, line ${index + 1}`} hideLabel>
               <Select

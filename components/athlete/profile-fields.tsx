@@ -34,8 +34,8 @@ export function ProfileFields({ minor }: { readonly minor: boolean }) {
         <Select choices={BASE_CHOICES} {...register("strikingBase")} />
       </Field>
       <Field
-        label="Has been lifting"
-        hint="Novice: under a year. Advanced: years, and strong."
+        label="Training age"
+        hint="Of lifting: a novice has under a year, the advanced are strong already."
         error={errors.trainingAge?.message}
       >
         <Select choices={AGE_CHOICES} {...register("trainingAge")} />

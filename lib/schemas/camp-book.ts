@@ -25,8 +25,8 @@ export const sportEntrySchema = z.object({
   kind: sportKind,
   title: z.string().trim().min(1, "Give the session a name.").max(300),
   start: civilDateTime,
-  minutes: z.int().min(1, "At least 1 minute.").max(1440, "At most 24 hours."),
-  effort: z.number().min(0, "0 to 10.").max(10, "0 to 10."),
+  minutes: z.int("Give whole minutes.").min(1, "At least 1 minute.").max(1440, "At most 24 hours."),
+  effort: z.number("0 to 10.").min(0, "0 to 10.").max(10, "0 to 10."),
   place: z.string().trim().max(200),
   /** RFC 5545 RRULE value without the name, or null for a single session. */
   rrule: z.string().max(500).nullable(),

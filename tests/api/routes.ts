@@ -163,6 +163,12 @@ export const TEAM_ROUTES: readonly RouteRow[] = [
   },
   { path: "camps/[id]", method: "GET", may: "camps.read", params: ({ campId }) => ({ id: campId }) },
   {
+    path: "camps/[id]/events",
+    method: "GET",
+    may: "camps.read",
+    params: ({ campId }) => ({ id: campId }),
+  },
+  {
     path: "camps/[id]/changes",
     method: "GET",
     may: "camps.history",

@@ -42,8 +42,10 @@ export function reasonsFor(
 ): readonly Reason[] {
   const lift = liftingOf(slot);
   const reasons = sparringReasons(around, lift, startsAt);
-  for (const { rule, text } of new SlotDay(around, lift, around.dayOf(day)).payments(startsAt, start))
-    reasons.push({ rule, text });
+  for (const { rule, text } of new SlotDay(around, lift, around.dayOf(day)).payments(startsAt, start)) {
+    // Spread is paid here only against lifts that stand; as days pass more of them do, and the words would change with them.
+    if (rule !== "spread") reasons.push({ rule, text });
+  }
   if (reasons.length === 0) reasons.push({ rule: "spread", text: "Where the week costs least." });
   return reasons;
 }
