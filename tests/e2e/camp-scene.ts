@@ -10,7 +10,7 @@ import type { Day } from "@/lib/engine/types";
 import type { Role } from "@/lib/policy";
 import type { CampForm, CampView } from "@/lib/schemas/camp";
 import type { Change } from "@/lib/schemas/change";
-import demo from "../../db/seed/accounts.json";
+import demo from "../../db/seed/accounts.json" with { type: "json" };
 
 /** Signs a demo account in without the form; the context's pages then hold its session. */
 export async function signInAs(context: BrowserContext, role: Role): Promise<void> {
