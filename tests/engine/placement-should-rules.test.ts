@@ -136,10 +136,12 @@ describe("rest-day: a week keeps one day without training where the timetable le
 
   it("two lifts leave one of two free days alone", () => {
     const input = emptyCamp({ sport: busy }, { ...rules, "sport-gap.price": 6 });
+    const athlete = { ...input.athlete, freeHours: freeHours("10:00", "11:00") };
     const slots = items.map((item, order) => slotIn(input, "2026-12-02", item, { order }));
-    const { placed, cost } = placeLifts(request(input, { slots }));
+    const { placed, cost } = placeLifts(request({ ...input, athlete }, { slots }));
     expect(placed.filter((lift) => lift.day >= day("2026-12-04"))).toHaveLength(1);
-    expect(cost).toBe(0);
+    // The other lies 2 h after a session, 4 h short: cheaper than a week without a free day.
+    expect(cost).toBe(24);
   });
 
   it("where each other day costs more than 60 points, both are taken and the week is paid for", () => {
@@ -297,7 +299,7 @@ describe("reasons of a placed lift", () => {
 
   it("why a lift is not where it was: the rule that shuts the place, the lift that has the day, or what it would pay", () => {
     const sport = [session("hard-sparring", "2026-12-01 10:00", { title: "Hard rounds" }), session("skill", "2026-12-04 18:00", { title: "Pads" })];
-    const input = emptyCamp({ sport }, { "sport-gap.price": 6 });
+    const input = emptyCamp({ sport }, { "sport-gap.price": 6, "stay-put.far": 8 });
     const slots = [
       slotIn(input, "2026-12-02", "strength-a", { base: published("2026-12-02 12:00") }),
       slotIn(input, "2026-12-02", "strength-b", { order: 1 }),
