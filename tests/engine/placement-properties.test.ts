@@ -23,7 +23,9 @@ describe("for every camp", () => {
       fc.record({
         input: fc.constant(input),
         sport: fc.shuffledSubarray([...input.sport], { minLength: input.sport.length }),
-        freeHours: fc.shuffledSubarray([...input.athlete.freeHours], { minLength: input.athlete.freeHours.length }),
+        freeHours: fc.shuffledSubarray([...input.athlete.freeHours], {
+          minLength: input.athlete.freeHours.length,
+        }),
         holds: fc.shuffledSubarray([...input.holds], { minLength: input.holds.length }),
       }),
     );
@@ -44,21 +46,28 @@ describe("for every camp", () => {
   it("placing what is placed changes nothing, also after a change moved some of it (200 camps)", () => {
     let moved = 0;
     fc.assert(
-      fc.property(arbPlanInput({ maxWeeks: 8, pins: false }), arbPlanInput({ maxWeeks: 8 }), (input, other) => {
-        const first = plan(input);
-        const shift = input.bout.day - other.bout.day;
-        const changed: PlanInput = {
-          ...input,
-          sport: other.sport.map((session) => ({ ...session, day: (session.day + shift) as typeof session.day })),
-        };
-        const second = plan(changed, baseOf(first));
-        const places = (made: Plan) => made.lifts.map(({ id, day, start }) => ({ id, day, start }));
-        if (JSON.stringify(places(second)) !== JSON.stringify(places(first))) moved += 1;
-        const again = placeLifts(requestOf(changed, baseOf(second)));
-        const before = new Map(second.lifts.map((lift) => [lift.id, lift]));
-        for (const { slot, day, start } of again.placed) expect({ day, start }).toEqual(slot.base);
-        expect(again.unplaced.map(({ slot }) => slot.id).filter((id) => before.has(id))).toEqual([]);
-      }),
+      fc.property(
+        arbPlanInput({ maxWeeks: 8, pins: false }),
+        arbPlanInput({ maxWeeks: 8 }),
+        (input, other) => {
+          const first = plan(input);
+          const shift = input.bout.day - other.bout.day;
+          const changed: PlanInput = {
+            ...input,
+            sport: other.sport.map((session) => ({
+              ...session,
+              day: (session.day + shift) as typeof session.day,
+            })),
+          };
+          const second = plan(changed, baseOf(first));
+          const places = (made: Plan) => made.lifts.map(({ id, day, start }) => ({ id, day, start }));
+          if (JSON.stringify(places(second)) !== JSON.stringify(places(first))) moved += 1;
+          const again = placeLifts(requestOf(changed, baseOf(second)));
+          const before = new Map(second.lifts.map((lift) => [lift.id, lift]));
+          for (const { slot, day, start } of again.placed) expect({ day, start }).toEqual(slot.base);
+          expect(again.unplaced.map(({ slot }) => slot.id).filter((id) => before.has(id))).toEqual([]);
+        },
+      ),
       { numRuns: 200, seed: 402 },
     );
     expect(moved).toBeGreaterThan(40);

@@ -1,7 +1,15 @@
 import { describe, expect, it } from "vitest";
 import type { Day, Instant, PlanInput } from "@/lib/engine";
 import { placeLifts, placementProblem, type FixedLift, type Slot } from "@/lib/engine/placement";
-import { emptyCamp, pinnedLift, published, request, session, slotIn, type LiftAt } from "../factories/placement-request";
+import {
+  emptyCamp,
+  pinnedLift,
+  published,
+  request,
+  session,
+  slotIn,
+  type LiftAt,
+} from "../factories/placement-request";
 import { day, freeHours } from "../factories/plan-input";
 
 type Rules = Readonly<Record<string, number>>;
@@ -9,7 +17,12 @@ type Rules = Readonly<Record<string, number>>;
 /** Points that a lift pays for a place by itself; null where the place is shut. */
 function pointsAt(
   { item, at, minutes = 60 }: LiftAt,
-  { rules = {}, fixed = () => [], slot = {}, ...over }: Partial<PlanInput> & {
+  {
+    rules = {},
+    fixed = () => [],
+    slot = {},
+    ...over
+  }: Omit<Partial<PlanInput>, "rules"> & {
     rules?: Rules;
     fixed?: (input: PlanInput) => readonly FixedLift[];
     slot?: Partial<Slot>;
@@ -20,7 +33,9 @@ function pointsAt(
   const wanted = slotIn(input, date, item, { minutes, ...slot });
   const { problem } = placementProblem(request(input, { slots: [wanted], fixed: fixed(input) }));
   const place = published(at);
-  return problem.candidates.find(({ day: on, start }) => on === place.day && start === place.start)?.cost ?? null;
+  return (
+    problem.candidates.find(({ day: on, start }) => on === place.day && start === place.start)?.cost ?? null
+  );
 }
 
 describe("sport-gap: 6 h to other sessions of the day, 6 points an hour short", () => {
@@ -43,7 +58,9 @@ describe("sport-gap: 6 h to other sessions of the day, 6 points an hour short", 
 
   it("two sessions are paid for each", () => {
     const both = [...sport, session("skill", "2026-12-02 07:00")];
-    expect(pointsAt({ at: "2026-12-02 12:00" }, { rules: { ...rules, "sessions-a-day": 3 }, sport: both })).toBe(6 + 12);
+    expect(
+      pointsAt({ at: "2026-12-02 12:00" }, { rules: { ...rules, "sessions-a-day": 3 }, sport: both }),
+    ).toBe(6 + 12);
   });
 });
 
@@ -56,7 +73,9 @@ describe("heavy-before-hard-48: heavy legs 48 h rather than 24 h before hard spa
     { name: "25 h before: allowed, and paid for", item: "strength-a", at: "2026-12-02 17:00", points: 30 },
     { name: "23 h before: shut", item: "strength-a", at: "2026-12-02 19:00", points: null },
     { name: "25 h before, not heavy: nothing", item: "strength-b", at: "2026-12-02 17:00", points: 0 },
-  ] as const)("$name", ({ item, at, points }) => expect(pointsAt({ item, at }, { rules, sport })).toBe(points));
+  ] as const)("$name", ({ item, at, points }) =>
+    expect(pointsAt({ item, at }, { rules, sport })).toBe(points),
+  );
 });
 
 describe("full-dose: 8 points each tenth of its sets that hard sparring takes", () => {
@@ -79,7 +98,9 @@ describe("fresh-first: strength A and power A pay 4 points each 100 AU left from
     { name: "48 h after it", item: "power-a", at: "2026-12-03 10:00", points: 3 },
     { name: "before it: nothing", item: "strength-a", at: "2026-11-30 10:00", points: 0 },
     { name: "another item: nothing", item: "strength-b", at: "2026-12-02 10:00", points: 0 },
-  ] as const)("$name", ({ item, at, points }) => expect(pointsAt({ item, at }, { rules, sport })).toBe(points));
+  ] as const)("$name", ({ item, at, points }) =>
+    expect(pointsAt({ item, at }, { rules, sport })).toBe(points),
+  );
 
   it("a session that was done counts as it was done", () => {
     const done = sport.map((one) => ({ ...one, doneLoad: 1200 as NonNullable<typeof one.doneLoad> }));
@@ -89,7 +110,9 @@ describe("fresh-first: strength A and power A pay 4 points each 100 AU left from
 
 describe("spread: 14 points for lifts a day apart, 2 for two days", () => {
   const rules = { "spread.next-day": 14, "spread.second-day": 2 };
-  const fixed = (input: PlanInput): FixedLift[] => [pinnedLift(input, { at: "2026-12-02 12:00", item: "power-touch" })];
+  const fixed = (input: PlanInput): FixedLift[] => [
+    pinnedLift(input, { at: "2026-12-02 12:00", item: "power-touch" }),
+  ];
   it.each([
     { name: "the day after a pinned lift", at: "2026-12-03 12:00", points: 14 },
     { name: "two days before it", at: "2026-11-30 12:00", points: 2 },
@@ -123,7 +146,12 @@ describe("hard-days-hard: off unless a team asks for it", () => {
     { name: "off: nothing", rules: { ...on, "hard-days-hard.on": 0 }, at: "2026-12-03 12:00", points: 0 },
     { name: "on, a day without hard sparring", rules: on, at: "2026-12-03 12:00", points: 12 },
     { name: "on, after the sparring: nothing", rules: on, at: "2026-12-02 18:00", points: 0 },
-    { name: "on, before the sparring: easy days would not be easy", rules: on, at: "2026-12-02 08:00", points: 12 },
+    {
+      name: "on, before the sparring: easy days would not be easy",
+      rules: on,
+      at: "2026-12-02 08:00",
+      points: 12,
+    },
   ])("$name", ({ rules, at, points }) => expect(pointsAt({ at }, { rules, sport })).toBe(points));
 });
 
@@ -154,10 +182,16 @@ describe("rest-day: a week keeps one day without training where the timetable le
   });
 
   it("rest and travel days are free days, sport, pinned lifts and the bout are not", () => {
-    const sport = [session("rest", "2027-01-03 00:00"), session("travel", "2027-01-04 08:00"), session("skill", "2027-01-05 08:00")];
+    const sport = [
+      session("rest", "2027-01-03 00:00"),
+      session("travel", "2027-01-04 08:00"),
+      session("skill", "2027-01-05 08:00"),
+    ];
     const input = emptyCamp({ sport }, rules);
     const fixed = [pinnedLift(input, { item: "power-touch", at: "2027-01-06 10:00" })];
-    const { problem } = placementProblem(request(input, { slots: [slotIn(input, "2027-01-06", "primer")], fixed }));
+    const { problem } = placementProblem(
+      request(input, { slots: [slotIn(input, "2027-01-06", "primer")], fixed }),
+    );
     expect(problem.weekly).toEqual([
       {
         week: 0,
@@ -178,12 +212,18 @@ describe("stay-put: a published session moves only for a reason", () => {
     { name: "five weeks ahead", hours: 840, points: 8 },
     { name: "half way to the locked hours", hours: 186, points: 44 },
     { name: "36 h ahead", hours: 36, points: 80 },
-    { name: "under 36 h ahead: more than all should rules and lost lifts of a week", hours: 35.9, points: 2_000_000 },
+    {
+      name: "under 36 h ahead: more than all should rules and lost lifts of a week",
+      hours: 35.9,
+      points: 2_000_000,
+    },
   ])("$name: $points points to move or to leave out", ({ hours, points }) => {
     const input = emptyCamp({ now: hoursAhead(hours) }, prices);
     const slots = [slotIn(input, "2026-12-02", "strength-b", { base })];
     const { problem } = placementProblem(request(input, { slots }));
-    const plain = placementProblem(request(input, { slots: [slotIn(input, "2026-12-02", "strength-b")] })).problem;
+    const plain = placementProblem(
+      request(input, { slots: [slotIn(input, "2026-12-02", "strength-b")] }),
+    ).problem;
     for (const { day: on, start, cost } of problem.candidates) {
       expect(cost).toBe(on === base.day && start === base.start ? 0 : points);
     }
@@ -193,7 +233,10 @@ describe("stay-put: a published session moves only for a reason", () => {
   it("a published start off the grid is kept", () => {
     const odd = published("2026-12-02 12:17");
     const input = emptyCamp({}, prices);
-    const slots = [slotIn(input, "2026-12-02", "strength-b", { base: odd }), slotIn(input, "2026-12-02", "power-touch", { order: 1 })];
+    const slots = [
+      slotIn(input, "2026-12-02", "strength-b", { base: odd }),
+      slotIn(input, "2026-12-02", "power-touch", { order: 1 }),
+    ];
     const { placed } = placeLifts(request(input, { slots }));
     expect(placed[0]).toMatchObject(odd);
   });
@@ -202,7 +245,8 @@ describe("stay-put: a published session moves only for a reason", () => {
     const sport = [session("skill", "2026-12-02 14:00")];
     const placedAt = (price: number): Day | undefined => {
       const input = emptyCamp({ sport }, { ...prices, "sport-gap.price": price });
-      return placeLifts(request(input, { slots: [slotIn(input, "2026-12-02", "strength-b", { base })] })).placed[0]?.day;
+      return placeLifts(request(input, { slots: [slotIn(input, "2026-12-02", "strength-b", { base })] }))
+        .placed[0]?.day;
     };
     // 5 h short.
     expect(placedAt(1)).toBe(base.day);
@@ -216,7 +260,9 @@ describe("stay-put: a published session moves only for a reason", () => {
       const input = emptyCamp({ ...at, sport }, rules);
       const slot = slotIn(input, "2026-12-02", "strength-b", { base, fresh: true });
       const other = slotIn(input, "2026-12-02", "strength-a", { order: 1 });
-      return placeLifts(request(input, { slots: [slot, other] })).placed.find((lift) => lift.slot.id === slot.id);
+      return placeLifts(request(input, { slots: [slot, other] })).placed.find(
+        (lift) => lift.slot.id === slot.id,
+      );
     };
     expect(placed([session("skill", "2026-12-02 14:00", { minutes: 600, effort: 10 })])).toMatchObject(base);
     expect(placed([session("skill", "2026-12-02 12:30")])).not.toMatchObject(base);
@@ -226,7 +272,9 @@ describe("stay-put: a published session moves only for a reason", () => {
 describe("unplaced lifts", () => {
   const oneHour = { ...emptyCamp().athlete, freeHours: freeHours("12:00", "13:00", [3]) };
   const wanted = (input: PlanInput) =>
-    (["strength-a", "strength-b", "trunk-and-kick", "power-touch"] as const).map((item, order) => slotIn(input, "2026-12-02", item, { order }));
+    (["strength-a", "strength-b", "trunk-and-kick", "power-touch"] as const).map((item, order) =>
+      slotIn(input, "2026-12-02", item, { order }),
+    );
 
   it("where one place is left the most important lift has it, and the others say why not", () => {
     const input = emptyCamp({ athlete: oneHour });
@@ -241,14 +289,32 @@ describe("unplaced lifts", () => {
 
   it("no prices that a team can set leave a lift out, nor the more important one", () => {
     const dear = {
-      ...{ "sport-gap.price": 100, "sport-gap.hours": 12, "heavy-before-hard-48.price": 500, "heavy-before-hard-48.hours": 96 },
-      ...{ "fresh-first.price": 50, "fresh-first.hours": 96, "spread.next-day": 200, "spread.second-day": 200 },
-      ...{ "rest-day.price": 500, "full-dose.price": 100, "hard-days-hard.on": 1, "hard-days-hard.price": 200 },
+      ...{
+        "sport-gap.price": 100,
+        "sport-gap.hours": 12,
+        "heavy-before-hard-48.price": 500,
+        "heavy-before-hard-48.hours": 96,
+      },
+      ...{
+        "fresh-first.price": 50,
+        "fresh-first.hours": 96,
+        "spread.next-day": 200,
+        "spread.second-day": 200,
+      },
+      ...{
+        "rest-day.price": 500,
+        "full-dose.price": 100,
+        "hard-days-hard.on": 1,
+        "hard-days-hard.price": 200,
+      },
     };
     const sport = ["2026-11-29", "2026-12-01", "2026-12-03"].flatMap((date) => [
       session("conditioning", `${date} 00:00`, { minutes: 600, effort: 10 }),
     ]);
-    const input = emptyCamp({ sport: [...sport, session("hard-sparring", "2026-12-06 19:00", { effort: 10 })] }, dear);
+    const input = emptyCamp(
+      { sport: [...sport, session("hard-sparring", "2026-12-06 19:00", { effort: 10 })] },
+      dear,
+    );
     const { unplaced } = placeLifts(request(input, { slots: wanted(input) }));
     expect(unplaced).toEqual([]);
     const athlete = { ...input.athlete, freeHours: freeHours("20:00", "21:00", [1, 2, 3]) };
@@ -268,13 +334,13 @@ describe("unplaced lifts", () => {
   });
 
   it("a week whose hours are past has no place any more", () => {
-    const input = emptyCamp({ now: ((day("2026-12-05") * 1440 + 1439) as Instant) });
+    const input = emptyCamp({ now: (day("2026-12-05") * 1440 + 1439) as Instant });
     const { unplaced } = placeLifts(request(input, { slots: [slotIn(input, "2026-12-02")] }));
     expect(unplaced[0]?.rules).toEqual([{ rule: "past", text: "Already past: every start." }]);
   });
 
   it("what starts now is past, what starts a step later is not", () => {
-    const input = emptyCamp({ now: ((day("2026-12-05") * 1440 + 1200) as Instant) });
+    const input = emptyCamp({ now: (day("2026-12-05") * 1440 + 1200) as Instant });
     const { placed } = placeLifts(request(input, { slots: [slotIn(input, "2026-12-02")] }));
     expect(placed[0]).toMatchObject(published("2026-12-05 20:05"));
   });
@@ -298,7 +364,10 @@ describe("reasons of a placed lift", () => {
   });
 
   it("why a lift is not where it was: the rule that shuts the place, the lift that has the day, or what it would pay", () => {
-    const sport = [session("hard-sparring", "2026-12-01 10:00", { title: "Hard rounds" }), session("skill", "2026-12-04 18:00", { title: "Pads" })];
+    const sport = [
+      session("hard-sparring", "2026-12-01 10:00", { title: "Hard rounds" }),
+      session("skill", "2026-12-04 18:00", { title: "Pads" }),
+    ];
     const input = emptyCamp({ sport }, { "sport-gap.price": 6, "stay-put.far": 8 });
     const slots = [
       slotIn(input, "2026-12-02", "strength-a", { base: published("2026-12-02 12:00") }),
@@ -309,7 +378,9 @@ describe("reasons of a placed lift", () => {
       const place = published(at);
       return whyNot("strength-b.5", place.day, place.start).map(({ text }) => text);
     };
-    expect(texts("2026-12-01 12:00")).toEqual(["Strength B starts 1 h after Hard rounds; house rule asks 6 h."]);
+    expect(texts("2026-12-01 12:00")).toEqual([
+      "Strength B starts 1 h after Hard rounds; house rule asks 6 h.",
+    ]);
     expect(texts("2026-12-02 08:00")).toEqual(["Strength A has that day now."]);
     expect(texts("2026-12-04 14:00")).toEqual(["3 h before Pads; house rule would like 6 h."]);
     expect(whyNot("nobody", day("2026-12-01"), published("2026-12-01 12:00").start)).toEqual([]);
