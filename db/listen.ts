@@ -10,7 +10,10 @@ export interface CampChanged {
  * Listens on a connection of its own for revisions of all camps; reconnects by itself. Returns a function that stops it.
  * Rejects when the first connection fails.
  */
-export async function listenCampChanges(url: string, onChange: (change: CampChanged) => void): Promise<() => Promise<void>> {
+export async function listenCampChanges(
+  url: string,
+  onChange: (change: CampChanged) => void,
+): Promise<() => Promise<void>> {
   const { sql } = openDatabase(url, { max: 1 });
   await sql.listen("camp_changed", (payload) => {
     const [campId, revision] = payload.split(":");

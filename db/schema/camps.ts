@@ -1,5 +1,16 @@
 import {
-  boolean, date, doublePrecision, index, integer, jsonb, pgEnum, pgTable, primaryKey, text, unique, uuid,
+  boolean,
+  date,
+  doublePrecision,
+  index,
+  integer,
+  jsonb,
+  pgEnum,
+  pgTable,
+  primaryKey,
+  text,
+  unique,
+  uuid,
 } from "drizzle-orm/pg-core";
 import { SPORT_KINDS, ITEMS } from "../../lib/engine/types";
 import type { Lift, Plan, KnockOn } from "../../lib/engine/types";
@@ -151,7 +162,11 @@ export const sessions = pgTable(
     /** Time of the revision that last touched it: DTSTAMP of the feed. */
     changedAt: instant().notNull(),
   },
-  (t) => [primaryKey({ columns: [t.campId, t.id] }), index("sessions_camp_day").on(t.campId, t.day), index("sessions_team_time").on(t.teamId, t.startsAt)],
+  (t) => [
+    primaryKey({ columns: [t.campId, t.id] }),
+    index("sessions_camp_day").on(t.campId, t.day),
+    index("sessions_team_time").on(t.teamId, t.startsAt),
+  ],
 );
 
 /** One saved change. `edit` did it, `inverse` undoes it. History is never rewritten. */
@@ -181,5 +196,8 @@ export const revisions = pgTable(
     putBackOf: integer(),
     createdAt: createdAt(),
   },
-  (t) => [unique("revisions_camp_number").on(t.campId, t.number), unique("revisions_camp_key").on(t.campId, t.idempotencyKey)],
+  (t) => [
+    unique("revisions_camp_number").on(t.campId, t.number),
+    unique("revisions_camp_key").on(t.campId, t.idempotencyKey),
+  ],
 );

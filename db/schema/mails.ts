@@ -22,7 +22,10 @@ export const notices = pgTable(
     /** The mail that carried it. */
     mailId: uuid().references(() => mails.id, { onDelete: "set null" }),
   },
-  (t) => [unique("notices_once").on(t.userId, t.campId, t.revision), index("notices_waiting").on(t.userId, t.mailId)],
+  (t) => [
+    unique("notices_once").on(t.userId, t.campId, t.revision),
+    index("notices_waiting").on(t.userId, t.mailId),
+  ],
 );
 
 export const mailStatusEnum = pgEnum("mail_status", ["waiting", "sent", "failed", "withheld"]);

@@ -112,14 +112,12 @@ async function seed(db: Database, now: Date): Promise<boolean> {
         athleteId: role === "athlete" || role === "guest" ? tamsin : null,
       })),
     );
-    await tx
-      .insert(timetableEntries)
-      .values(
-        GYM_WEEK.map((session) => ({
-          teamId: team.id,
-          ...weeklyEntry(session, "gym", (today - 28) as Day, null),
-        })),
-      );
+    await tx.insert(timetableEntries).values(
+      GYM_WEEK.map((session) => ({
+        teamId: team.id,
+        ...weeklyEntry(session, "gym", (today - 28) as Day, null),
+      })),
+    );
     return { teamId: team.id, people, roster };
   });
   const actor = (role: Role): TeamContext => ({

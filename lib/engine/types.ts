@@ -301,7 +301,15 @@ export interface Base {
 
 /** Input that cannot be planned: `pointer` is a JSON pointer into the plan request. */
 export interface InputProblem {
-  readonly code: "bout-past" | "weeks-range" | "lifts-range" | "free-hours" | "rule-range" | "sport-range" | "weigh-in-order" | "number";
+  readonly code:
+    | "bout-past"
+    | "weeks-range"
+    | "lifts-range"
+    | "free-hours"
+    | "rule-range"
+    | "sport-range"
+    | "weigh-in-order"
+    | "number";
   readonly pointer: string;
   readonly message: string;
 }
@@ -341,7 +349,11 @@ export interface PlacementProblem {
   /** `spread[g - 1]`: cost of each pair of chosen candidates whose days are g apart. Length at most 3. Integers. */
   readonly spread: readonly number[];
   /** Per camp week: days that fixed training leaves free, and the cost if lifting takes all of them. */
-  readonly weekly: readonly { readonly week: number; readonly freeDays: readonly Day[]; readonly noRestCost: number }[];
+  readonly weekly: readonly {
+    readonly week: number;
+    readonly freeDays: readonly Day[];
+    readonly noRestCost: number;
+  }[];
 }
 
 export interface PlacementSolution {

@@ -14,7 +14,10 @@ export interface ConcernedChange {
  */
 export function concerns(role: Role, { knockOn, edit }: ConcernedChange): boolean {
   const bout =
-    knockOn.bout !== null || edit.bout !== undefined || edit.weighIn !== undefined || edit.status !== undefined;
+    knockOn.bout !== null ||
+    edit.bout !== undefined ||
+    edit.weighIn !== undefined ||
+    edit.status !== undefined;
   const sport = knockOn.sport.length > 0;
   switch (role) {
     case "athlete":
