@@ -46,7 +46,7 @@ export const DOSE_SETTINGS = {
   ),
   "before.near": setting(
     "dose",
-    "Full reduction at or under",
+    "Before hard sparring: full reduction at or under",
     24,
     "h",
     [6, 48, 1],
@@ -55,7 +55,7 @@ export const DOSE_SETTINGS = {
   ),
   "before.far": setting(
     "dose",
-    "No reduction from",
+    "Before hard sparring: no reduction from",
     48,
     "h",
     [24, 96, 1],
@@ -73,7 +73,7 @@ export const DOSE_SETTINGS = {
   ),
   "after.near": setting(
     "dose",
-    "Full reduction at or under",
+    "After hard sparring: full reduction at or under",
     6,
     "h",
     [0, 24, 1],
@@ -81,7 +81,7 @@ export const DOSE_SETTINGS = {
   ),
   "after.far": setting(
     "dose",
-    "No reduction from",
+    "After hard sparring: no reduction from",
     36,
     "h",
     [12, 96, 1],
