@@ -72,17 +72,17 @@ async function main() {
   const { runPlaywright, runVitest } = await import("./suites.mjs");
   await section("Static checks", staticChecks);
   await section("Unit, reference, service and API tests", () =>
-    runVitest("tests", [], { timeoutMs: 7 * MINUTE }),
+    runVitest("tests", [], { timeoutMs: 12 * MINUTE }),
   );
   for (const zone of OTHER_ZONES) {
     await section(`Engine tests under TZ=${zone}`, () =>
-      runVitest(zone, ["tests/engine"], { zone, timeoutMs: 3 * MINUTE }),
+      runVitest(zone, ["tests/engine"], { zone, timeoutMs: 6 * MINUTE }),
     );
   }
   await section("Production build", build);
   await section("Browser tests", () => {
     if (!built) throw new SetupError("not run: there is no build to test");
-    return runPlaywright({ timeoutMs: 8 * MINUTE });
+    return runPlaywright({ timeoutMs: 25 * MINUTE });
   });
 }
 
