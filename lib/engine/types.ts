@@ -362,8 +362,6 @@ export interface PlacementSolution {
   readonly chosen: readonly (number | null)[];
 }
 
-/* Knock-on */
-
 export interface LiftEffect {
   readonly id: string;
   readonly item: Item;
