@@ -1,0 +1,153 @@
+import { entry, ladder, of } from "./entry";
+
+/** Bending the trunk forward and holding it against being bent back. */
+export const TRUNK_FLEXION = [
+  ...ladder(
+    entry({
+      id: "lying-heel-slide",
+      name: "Lying heel slide",
+      qualities: ["trunk-flexion"],
+      sides: "each",
+      doses: { volume: of([2, 3], [8, 12]) },
+      rest: 45,
+      cues: ["Press the low back into the floor first", "Slide one heel away and back", "Keep breathing"],
+    }),
+    entry({
+      id: "lying-leg-raise",
+      name: "Lying leg raise",
+      qualities: ["trunk-flexion", "hip-flexion"],
+      doses: { volume: of([3, 4], [8, 12]) },
+      rest: 60,
+      ruledOutBy: ["low-back-load", "rib"],
+      cues: [
+        "Hands beside the hips, low back pressed flat",
+        "Lower the legs only as far as the back stays down",
+        "Curl the pelvis up at the top",
+      ],
+    }),
+    entry({
+      id: "hanging-knee-raise",
+      name: "Hanging knee raise",
+      qualities: ["trunk-flexion", "hip-flexion", "grip"],
+      doses: { volume: of([3, 4], [8, 12]) },
+      equipment: ["pull-up-bar"],
+      ruledOutBy: ["shoulder-overhead", "elbow", "low-back-load", "rib"],
+      cues: [
+        "Hang with active shoulders",
+        "Knees to chest, pelvis curls under",
+        "Down slowly, kill the swing",
+      ],
+    }),
+    entry({
+      id: "hanging-leg-raise",
+      name: "Hanging leg raise",
+      qualities: ["trunk-flexion", "hip-flexion", "grip"],
+      // Common practice, no published source.
+      doses: { volume: of([3, 4], [10, 15]) },
+      equipment: ["pull-up-bar"],
+      ruledOutBy: ["shoulder-overhead", "elbow", "low-back-load", "rib", "hamstring"],
+      cues: [
+        "Straight legs as far as your hamstrings allow",
+        "Roll the pelvis up at the top",
+        "Three seconds down, no swing",
+      ],
+    }),
+  ),
+  ...ladder(
+    entry({
+      id: "short-curl-up",
+      name: "Short curl-up",
+      qualities: ["trunk-flexion"],
+      doses: { volume: of([3, 4], [12, 20]) },
+      rest: 45,
+      ruledOutBy: ["neck", "rib"],
+      cues: [
+        "Ribs slide towards the hips",
+        "Shoulder blades just leave the floor",
+        "Chin tucked, hands do not pull",
+      ],
+    }),
+    entry({
+      id: "straight-arm-sit-up",
+      name: "Sit-up under a dumbbell",
+      qualities: ["trunk-flexion", "hip-flexion"],
+      load: "reserve",
+      doses: { volume: of([3, 3], [8, 12]) },
+      rest: 75,
+      equipment: ["dumbbell"],
+      ruledOutBy: ["neck", "rib", "low-back-load", "shoulder-overhead"],
+      cues: [
+        "Dumbbell above the face, arms straight up",
+        "Roll up bone by bone",
+        "Lie down slower than you came up",
+      ],
+    }),
+    entry({
+      id: "kneeling-cable-curl-down",
+      name: "Kneeling cable curl-down",
+      qualities: ["trunk-flexion"],
+      load: "reserve",
+      doses: { volume: of([3, 4], [8, 12]) },
+      equipment: ["cable"],
+      ruledOutBy: ["neck", "rib", "low-back-load"],
+      cues: [
+        "Hips stay over the knees",
+        "Fold the ribs down, do not bow from the hips",
+        "Long breath out at the bottom",
+      ],
+    }),
+  ),
+  ...ladder(
+    entry({
+      id: "front-plank",
+      name: "Front plank on forearms",
+      qualities: ["trunk-flexion", "anti-rotation"],
+      intent: "held",
+      doses: { hold: of([3, 3], [30, 60]) },
+      rest: 60,
+      ruledOutBy: ["low-back-load", "shoulder-press"],
+      cues: ["Elbows under shoulders", "Seat tight, ribs down", "Pull elbows towards toes to make it count"],
+    }),
+    entry({
+      id: "tucked-hollow-hold",
+      name: "Hollow hold, knees tucked",
+      qualities: ["trunk-flexion", "hip-flexion"],
+      intent: "held",
+      doses: { hold: of([3, 3], [15, 30]) },
+      rest: 60,
+      ruledOutBy: ["neck", "rib"],
+      cues: [
+        "Low back glued to the floor",
+        "Shoulder blades up, knees over hips",
+        "Short breaths, belly stays hard",
+      ],
+    }),
+    entry({
+      id: "hollow-hold",
+      name: "Hollow hold",
+      qualities: ["trunk-flexion", "hip-flexion"],
+      intent: "held",
+      doses: { hold: of([3, 4], [15, 40]) },
+      rest: 75,
+      ruledOutBy: ["neck", "rib", "low-back-load"],
+      cues: [
+        "Legs long and low, arms by the ears",
+        "No light under the low back",
+        "Raise the legs when it starts to arch",
+      ],
+    }),
+    entry({
+      id: "barbell-roll-out",
+      name: "Barbell roll-out",
+      qualities: ["trunk-flexion"],
+      doses: { volume: of([3, 3], [6, 10]) },
+      equipment: ["barbell", "plate"],
+      ruledOutBy: ["shoulder-overhead", "low-back-load", "rib", "elbow"],
+      cues: [
+        "From the knees, arms straight",
+        "Hips and shoulders travel together",
+        "Turn back before the back sags",
+      ],
+    }),
+  ),
+];
