@@ -1,6 +1,17 @@
-import { date, index, integer, jsonb, pgEnum, pgTable, text, uuid } from "drizzle-orm/pg-core";
+import {
+  date,
+  doublePrecision,
+  index,
+  integer,
+  jsonb,
+  pgEnum,
+  pgTable,
+  text,
+  uuid,
+} from "drizzle-orm/pg-core";
+import { EQUIPMENT, type Equipment, type Limitation } from "../../lib/engine/prescription/exercise";
 import { STRIKING_BASES, TRAINING_AGES } from "../../lib/engine/types";
-import { createdAt, id, instant } from "./columns";
+import { createdAt, id, instant, unitsEnum } from "./columns";
 import { teams, users } from "./teams";
 
 export const trainingAgeEnum = pgEnum("training_age", [...TRAINING_AGES]);
@@ -27,8 +38,21 @@ export const athletes = pgTable(
     strikingBase: strikingBaseEnum().notNull(),
     liftsPerWeek: integer().notNull(),
     freeHours: jsonb().$type<FreeHoursRow[]>().notNull(),
+    /** A second striking base and its share, 0.1 to 0.9; null where there is one base alone. */
+    secondBase: strikingBaseEnum(),
+    secondShare: doublePrecision(),
     /** What hurts or is ruled out, in the athlete's words. */
     limitations: text().notNull().default(""),
+    /** The same from a closed list, which exercises are chosen by. */
+    limitationCodes: jsonb().$type<Limitation[]>().notNull().default([]),
+    /** What the athlete can train with. */
+    equipment: jsonb()
+      .$type<Equipment[]>()
+      .notNull()
+      .default([...EQUIPMENT]),
+    /** Smallest change of load, both sides of a bar together, in the unit. */
+    plateUnit: unitsEnum().notNull().default("kg"),
+    plateStep: doublePrecision().notNull().default(2.5),
     createdAt: createdAt(),
   },
   (t) => [index("athletes_team").on(t.teamId)],
@@ -55,4 +79,24 @@ export const holds = pgTable(
     liftedAt: instant(),
   },
   (t) => [index("holds_athlete").on(t.teamId, t.athleteId)],
+);
+
+/** What an athlete's limitations were before each edit, append only. */
+export const limitationHistory = pgTable(
+  "limitation_history",
+  {
+    id: id(),
+    teamId: uuid()
+      .notNull()
+      .references(() => teams.id, { onDelete: "cascade" }),
+    athleteId: uuid()
+      .notNull()
+      .references(() => athletes.id, { onDelete: "cascade" }),
+    limitations: text().notNull(),
+    limitationCodes: jsonb().$type<Limitation[]>().notNull(),
+    userId: uuid().references(() => users.id, { onDelete: "set null" }),
+    /** Since when they stand. */
+    createdAt: createdAt(),
+  },
+  (t) => [index("limitation_history_athlete").on(t.teamId, t.athleteId, t.createdAt)],
 );

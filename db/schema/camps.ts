@@ -15,6 +15,8 @@ import {
 import { SPORT_KINDS, ITEMS } from "../../lib/engine/types";
 import type { Lift, Plan, KnockOn } from "../../lib/engine/types";
 import type { BookEdit } from "../../lib/book/edit";
+import type { CampResponse } from "../../lib/schemas/camp-book";
+import type { BoutResult } from "../../lib/schemas/result";
 import type { Change } from "../../lib/schemas/change";
 import { athletes } from "./athletes";
 import { createdAt, id, instant } from "./columns";
@@ -57,6 +59,10 @@ export const camps = pgTable(
     liftsPerWeek: integer().notNull(),
     freeHours: jsonb().$type<{ weekday: number; from: string; to: string }[]>().notNull(),
     coachFactors: jsonb().$type<Record<string, number>>().notNull().default({}),
+    /** Accepted suggestions that lower the sets of the days that they cover. */
+    responses: jsonb().$type<CampResponse[]>().notNull().default([]),
+    /** How the bout ended; null before. */
+    result: jsonb().$type<BoutResult>(),
     /** Number of the newest revision; optimistic writes carry it. */
     revision: integer().notNull().default(0),
     /** What the plan says besides its sessions: weeks, phases, unplaced, violations, form. */

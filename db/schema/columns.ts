@@ -1,5 +1,5 @@
 import { sql } from "drizzle-orm";
-import { timestamp, uuid } from "drizzle-orm/pg-core";
+import { pgEnum, timestamp, uuid } from "drizzle-orm/pg-core";
 
 /** Instants are UTC; the server and the cluster run in UTC. */
 export const instant = () => timestamp({ withTimezone: true, mode: "date" });
@@ -10,3 +10,5 @@ export const id = () =>
     .default(sql`gen_random_uuid()`);
 
 export const createdAt = () => instant().notNull().defaultNow();
+
+export const unitsEnum = pgEnum("units", ["kg", "lb"]);

@@ -1,6 +1,11 @@
+export { unitsEnum } from "./columns";
 export * from "./teams";
 export * from "./athletes";
 export * from "./camps";
 export * from "./feeds";
 export * from "./mails";
 export * from "./rate-limits";
+export * from "./exercises";
+export * from "./prescription";
+export * from "./logs";
+export * from "./tests";

@@ -1,10 +1,9 @@
 import { sql } from "drizzle-orm";
 import { index, integer, jsonb, pgEnum, pgTable, text, unique, uniqueIndex, uuid } from "drizzle-orm/pg-core";
 import { ROLES } from "../../lib/policy/roles";
-import { createdAt, id, instant } from "./columns";
+import { createdAt, id, instant, unitsEnum } from "./columns";
 import { athletes } from "./athletes";
 
-export const unitsEnum = pgEnum("units", ["kg", "lb"]);
 /** `each`: one mail a change or burst; `daily`: one a day at 06:00 of the reader's zone; `none`: none. */
 export const mailChoiceEnum = pgEnum("mail_choice", ["each", "daily", "none"]);
 export const roleEnum = pgEnum("role", [...ROLES]);

@@ -74,6 +74,22 @@ export type BookPin = z.infer<typeof pinSchema>;
 /** Coach's own factor on a session's sets. */
 export const coachFactor = z.number().min(0.5, "0.5 to 1.5.").max(1.5, "0.5 to 1.5.");
 
+/** An accepted suggestion: sets of the lifting in these days are lowered by the factor. */
+export const campResponseSchema = z
+  .object({
+    id: z.string().min(1).max(80),
+    from: civilDate,
+    /** Inclusive. */
+    to: civilDate,
+    factor: z.number().min(0.5, "0.5 to 1.").max(1, "0.5 to 1."),
+    because: z.string().trim().max(300),
+  })
+  .refine((response) => response.from <= response.to, {
+    path: ["to"],
+    message: "The last day must not be before the first.",
+  });
+export type CampResponse = z.infer<typeof campResponseSchema>;
+
 export const campBookSchema = z.object({
   status: z.enum(["on", "off"]),
   /** Zone of the gym; sessions are in it until the travel day, in the venue's after. */
