@@ -23,6 +23,16 @@ const GROUPS: readonly { readonly group: RuleGroup; readonly title: string; read
   { group: "dose", title: "The dose", lead: "What a session’s sets are multiplied by, and the weekly cap." },
   { group: "load", title: "Load", lead: "How a week’s load is called." },
   {
+    group: "response",
+    title: "Suggestions",
+    lead: "When what was logged asks for a word or for fewer sets; nothing changes until somebody accepts.",
+  },
+  {
+    group: "weight",
+    title: "Weight",
+    lead: "The way down to the limit; a team may be stricter than what is published.",
+  },
+  {
     group: "form",
     title: "The form illustration",
     lead: "An illustration of training theory, not a forecast.",

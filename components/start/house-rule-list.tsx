@@ -7,6 +7,8 @@ const GROUP_WORDS: Record<RuleGroup, string> = {
   camp: "The shape of the camp",
   dose: "The dose",
   load: "Load",
+  response: "Suggestions",
+  weight: "Weight",
   form: "The form illustration",
 };
 

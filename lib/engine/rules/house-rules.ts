@@ -2,7 +2,9 @@ import { CAMP_SETTINGS } from "./settings-camp";
 import { DOSE_SETTINGS } from "./settings-dose";
 import { MODEL_SETTINGS } from "./settings-model";
 import { MUST_SETTINGS } from "./settings-must";
+import { RESPONSE_SETTINGS } from "./settings-response";
 import { SHOULD_SETTINGS } from "./settings-should";
+import { WEIGHT_SETTINGS } from "./settings-weight";
 
 export type { RuleGroup } from "./setting";
 
@@ -20,6 +22,8 @@ export const HOUSE_RULES = {
   ...CAMP_SETTINGS,
   ...DOSE_SETTINGS,
   ...MODEL_SETTINGS,
+  ...RESPONSE_SETTINGS,
+  ...WEIGHT_SETTINGS,
 };
 
 export type RuleKey = keyof typeof HOUSE_RULES;

@@ -1,6 +1,6 @@
 const COMMON = "common practice, no published source";
 
-export type RuleGroup = "must" | "should" | "camp" | "dose" | "load" | "form";
+export type RuleGroup = "must" | "should" | "camp" | "dose" | "load" | "response" | "weight" | "form";
 
 /** One threshold. */
 export interface Setting {

@@ -1,0 +1,7 @@
+export * from "./asymmetry";
+export * from "./change-verdict";
+export * from "./flight";
+export * from "./jump-power";
+export * from "./push-off";
+export * from "./reliability";
+export * from "./test-kinds";

@@ -1,0 +1,3 @@
+export * from "./ceilings";
+export * from "./descent";
+export * from "./remark";
