@@ -71,7 +71,7 @@ export interface PrescriptionInput {
 export type LineLoad =
   | {
       readonly of: "best";
-      /** Percent. */
+      /** Percent, in steps of a half: the engine's own intensity is finer than whole numbers. */
       readonly percent: Range;
       /** Rounded to the athlete's plates. */
       readonly kg: Kg;
