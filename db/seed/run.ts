@@ -6,6 +6,7 @@ import { keepCamp } from "../../lib/services/camps/create";
 import { replanAthlete } from "../../lib/services/camps/replan";
 import { saveChange } from "../../lib/services/camps/save-change";
 import type { TeamContext } from "../../lib/services/context";
+import { ensureLibrary } from "../../lib/services/exercises/library";
 import { openDatabase, type Database, type Transaction } from "../client";
 import { athletes, camps, holds, memberships, teams, timetableEntries, users } from "../schema";
 import demo from "./accounts.json";
@@ -153,6 +154,7 @@ const url = process.env.DATABASE_URL;
 if (!url) throw new Error("DATABASE_URL is not set.");
 const { db, sql } = openDatabase(url, { max: 4 });
 try {
+  await ensureLibrary(db);
   await seed(db, new Date());
 } finally {
   await sql.end();

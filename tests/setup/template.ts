@@ -5,6 +5,8 @@ import postgres from "postgres";
 import { migrateDatabase } from "@/db/migrate.mjs";
 import { clusterRuns, clusterUrl, startCluster, stopCluster } from "@/db/server.mjs";
 import { isAlive, withLock } from "@/db/server-ports.mjs";
+import { openDatabase } from "@/db/client";
+import { ensureLibrary } from "@/lib/services/exercises/library";
 
 const ROOT = path.resolve(import.meta.dirname, "../..");
 /** The tests' own cluster: without fsync, and apart from the one `npm start` uses. */
@@ -17,9 +19,11 @@ function templateName(): string {
   const files = [
     "db/migrate.mjs",
     "package-lock.json",
-    ...readdirSync(path.join(ROOT, "drizzle")).map((file) => `drizzle/${file}`),
+    ...["drizzle", "db/seed/exercises"].flatMap((folder) =>
+      readdirSync(path.join(ROOT, folder)).map((file) => `${folder}/${file}`),
+    ),
   ];
-  for (const file of files.filter((name) => /\.(mjs|json|sql)$/.test(name)).sort()) {
+  for (const file of files.filter((name) => /\.(mjs|json|sql|ts)$/.test(name)).sort()) {
     hash.update(file).update(readFileSync(path.join(ROOT, file)));
   }
   return `template_${hash.digest("hex").slice(0, 16)}`;
@@ -40,6 +44,16 @@ async function asOwner<T>(url: string, work: (sql: postgres.Sql) => Promise<T>):
   }
 }
 
+/** The exercise library, as every server process brings it at its start. */
+async function fillLibrary(url: string): Promise<void> {
+  const { db, sql } = openDatabase(url, { max: 1 });
+  try {
+    await ensureLibrary(db);
+  } finally {
+    await sql.end();
+  }
+}
+
 /** Migrates the template once for all processes; others wait for the one that does. */
 async function ensureTemplate(url: string): Promise<string> {
   const name = templateName();
@@ -51,6 +65,7 @@ async function ensureTemplate(url: string): Promise<string> {
       await sql`drop database if exists ${sql(FRESH)} with (force)`;
       await sql`create database ${sql(FRESH)}`;
       await migrateDatabase(withDatabase(url, FRESH));
+      await fillLibrary(withDatabase(url, FRESH));
       await sql`alter database ${sql(FRESH)} rename to ${sql(name)}`;
     });
     return name;
