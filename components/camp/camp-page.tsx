@@ -1,7 +1,7 @@
 "use client";
 
 import dynamic from "next/dynamic";
-import { useCallback, useEffect, useRef, useState } from "react";
+import { useCallback, useEffect, useState } from "react";
 import { Notice } from "@/components/ui/notice";
 import { isoFromDay } from "@/lib/engine/geometry";
 import type { Day, Instant } from "@/lib/engine/types";
@@ -16,6 +16,7 @@ import { Rail } from "./rail/rail";
 import { Ropes } from "./ropes/ropes";
 import { todayOf } from "./today";
 import { useDesk } from "./use-desk";
+import { useHeadingFocus } from "./rail/use-heading-focus";
 import { useNow } from "./use-now";
 import { WeekTable } from "./week-table";
 
@@ -47,7 +48,7 @@ export function CampPage({ initial, now: serverNow, selected }: CampPageProps) {
   const desk = useDesk(view, now, selected);
   const [mark] = useState(createDayMark);
   const [dialog, setDialog] = useState<OpenDialog | null>(null);
-  const heading = useRef<HTMLHeadingElement>(null);
+  const heading = useHeadingFocus();
 
   const { shown, dispatch } = desk;
   useEffect(() => {
@@ -58,8 +59,6 @@ export function CampPage({ initial, now: serverNow, selected }: CampPageProps) {
   const today = todayOf(shown.book, now);
   const openSession = useCallback((id: string) => dispatch({ type: "select", id }), [dispatch]);
   const addOn = useCallback((day: Day) => setDialog({ kind: "add", date: isoFromDay(day) }), []);
-  // The heading is drawn with the drop; it can take the focus once that has happened.
-  const toRail = useCallback(() => requestAnimationFrame(() => heading.current?.focus()), []);
   const close = (): void => setDialog(null);
   const active = desk.state.pending !== null || desk.state.selected !== null;
 
@@ -81,9 +80,9 @@ export function CampPage({ initial, now: serverNow, selected }: CampPageProps) {
           mark={mark}
           onOpen={openSession}
           onAdd={addOn}
-          onDropped={toRail}
+          onDropped={heading.wanted}
         />
-        <Rail desk={desk} heading={heading} onEdit={(id) => setDialog({ kind: "edit", id })} />
+        <Rail desk={desk} heading={heading.ref} onEdit={(id) => setDialog({ kind: "edit", id })} />
       </div>
       {view.may.includes("lifts.detail") ? <WeekTable plan={shown.plan} /> : null}
       {isError ? (

@@ -53,6 +53,8 @@ test("a reset link from the mail sets a new password once, and ends the sessions
 
   await page.goto("/sign-in");
   await page.getByRole("link", { name: "Forgot the password?" }).click();
+  // The sign-in page has a field of the same name.
+  await expect(page.getByRole("heading", { name: "Set a new password" })).toBeVisible();
   await page.getByLabel("E-mail").fill(email);
   await page.getByRole("button", { name: "Send me a link" }).click();
   await expect(page.getByRole("status").filter({ hasText: "Check your mail" })).toBeVisible();

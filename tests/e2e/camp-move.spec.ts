@@ -98,7 +98,7 @@ test("a session is picked up, carried and dropped by keys, and what it knocks on
   const heading = rail(page).getByRole("heading", {
     name: /^Moving Hard sparring from .* 11:00 to .* 11:30$/,
   });
-  await expect(heading).toBeVisible();
+  await expect(heading).toBeFocused();
   await rail(page).getByRole("button", { name: /^Save/ }).focus();
   await page.keyboard.press("Enter");
   await expect(page.getByText(/^Saved\./)).toBeVisible();

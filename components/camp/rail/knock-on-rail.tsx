@@ -1,6 +1,6 @@
 "use client";
 
-import type { RefObject } from "react";
+import type { RefCallback } from "react";
 import { Button } from "@/components/ui/button";
 import { Notice } from "@/components/ui/notice";
 import { isPreview } from "@/lib/book/preview-result";
@@ -15,7 +15,7 @@ import { ScopeChoice } from "./scope-choice";
 interface KnockOnRailProps {
   readonly desk: Desk;
   readonly pending: Pending;
-  readonly heading: RefObject<HTMLHeadingElement | null>;
+  readonly heading: RefCallback<HTMLHeadingElement>;
 }
 
 /** True where the change is about one occurrence of a recurring session, so that it may be about more. */

@@ -1,7 +1,7 @@
 "use client";
 
 import dynamic from "next/dynamic";
-import type { ReactNode, RefObject } from "react";
+import type { ReactNode, RefCallback } from "react";
 import { classNames } from "@/components/ui/class-names";
 import { KindLegend, legendOf } from "@/components/session/kind-legend";
 import type { Desk } from "../use-desk";
@@ -18,7 +18,7 @@ const SessionDetails = dynamic(
 
 interface RailProps {
   readonly desk: Desk;
-  readonly heading: RefObject<HTMLHeadingElement | null>;
+  readonly heading: RefCallback<HTMLHeadingElement>;
   readonly onEdit: (sportId: string) => void;
 }
 
