@@ -34,9 +34,9 @@ const AGAIN = 0.4;
 /** Work that belongs to this part of the camp: Lee & McGill 2017, J Sports Sci 35:1768-1780 (direction only). */
 const TIMELY = 1.4;
 /** A lift whose kilograms can be said. */
-const SAYS_LOAD = 1.15;
+const SAYS_LOAD = 1.25;
 /** Within this share of the best score, exercises take turns. */
-const NEAR = 0.7;
+const NEAR = { stays: 0.85, rotates: 0.7 } as const;
 /** How many take turns: of main lifts, of the others. */
 const POOL = { stays: 2, rotates: 4 } as const;
 /** Turns before the order of qualities begins anew. */
@@ -171,7 +171,7 @@ export function inTurn(
     .sort(byRank);
   const most = scored[0]?.score ?? 0;
   const near = scored
-    .filter(({ score }) => score >= NEAR * most)
+    .filter(({ score }) => score >= (slot.stays ? NEAR.stays : NEAR.rotates) * most)
     .slice(0, slot.stays ? POOL.stays : POOL.rotates);
   const start = near.length > 0 ? (slot.stays ? block.index : week + shift) % near.length : 0;
   const rest = [...scored.slice(near.length), ...open.filter(({ tier }) => tier !== first)];

@@ -1,11 +1,11 @@
 import type { Item } from "../types";
 import { weightsOf, type Weights } from "./base-weights";
 import { candidatesOf, isAllowed, slotTurns, type Candidate } from "./choose";
-import type { Bounds } from "./empty";
+import { emptySlot, type Bounds } from "./empty";
 import type { Exercise, Quality } from "./exercise";
 import type { LineContext } from "./line";
 import type { Slot } from "./slots";
-import type { PrescriptionInput } from "./types";
+import type { EmptySlot, PrescriptionInput } from "./types";
 
 interface Ranked {
   readonly candidates: readonly Candidate[];
@@ -21,6 +21,8 @@ export interface Library extends Bounds, LineContext {
   readonly edits: PrescriptionInput["edits"];
   /** Candidates of a slot, best first. */
   ranked(item: Item, slot: Slot, early: boolean): Ranked;
+  /** A slot that nothing fills, with the reason. */
+  emptyOf(slot: Slot): EmptySlot;
   /** What the camp's swaps make of an exercise; null where none does, or where it may not be done. */
   swapFor(item: Item, from: Exercise): Exercise | null;
 }
@@ -33,10 +35,11 @@ export function libraryOf(input: PrescriptionInput): Library {
   const allowedIds = new Set(allowed.map(({ id }) => id));
   const byId = new Map(exercises.map((exercise) => [exercise.id, exercise]));
   const weights = weightsOf(mix);
+  const bounds = { equipment, limitations };
   const cache = new Map<string, Ranked>();
+  const empty = new Map<Slot, EmptySlot>();
   return {
-    equipment,
-    limitations,
+    ...bounds,
     mix,
     bests,
     plates,
@@ -56,6 +59,11 @@ export function libraryOf(input: PrescriptionInput): Library {
         cache.set(key, ranked);
       }
       return ranked;
+    },
+    emptyOf(slot) {
+      const known = empty.get(slot) ?? emptySlot(slot, exercises, bounds);
+      empty.set(slot, known);
+      return known;
     },
     swapFor(item, from) {
       // In the order they were made: a swap of a swap goes on, a swap back comes home.

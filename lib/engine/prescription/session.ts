@@ -1,7 +1,7 @@
 import { ITEMS, type Lift, type Reason } from "../types";
 import type { Block } from "./blocks";
 import { aimIn, inTurn, isEarly, type Candidate, type Moment } from "./choose";
-import { emptySlot, whyNot } from "./empty";
+import { whyNot } from "./empty";
 import type { Exercise, Quality } from "./exercise";
 import type { Library } from "./library";
 import { lineOf, type Filled } from "./line";
@@ -91,15 +91,19 @@ class Session {
   }
 }
 
+/** Sets that are still worth doing for something other than heavy work: common practice, no published source. */
+const LEAST = 2;
+
 function claimOf({ slot, exercise, aim }: Filled, share: number, lift: Lift, kept: boolean): Claim {
   const own = exercise.doses[aim]?.sets ?? { low: 1, high: 1 };
   const row = aim === "heavy" ? heavyRow(lift.intensity) : null;
-  if (!row) return { share, low: own.low, high: own.high, most: Infinity, kept };
+  if (!row) {
+    return { share, low: own.low, high: own.high, least: Math.min(LEAST, own.low), most: Infinity, kept };
+  }
   const inside = heavySets(row);
   const low = Math.max(inside.low, Math.min(own.low, inside.high));
   const high = Math.max(low, Math.min(own.high, inside.high));
-  // Outside its heavy slot, work near the best stays at the exercise's own end.
-  return { share, low, high, most: slot.work === "heavy" ? inside.high : high, kept };
+  return { share, low, high, least: inside.low, most: inside.high, kept };
 }
 
 interface Opened {
@@ -117,7 +121,10 @@ function open(lift: Lift, edits: Readonly<Record<string, LineEdit>>, library: Li
   const empty: EmptySlot[] = [];
   const add = (slot: Slot) => {
     const one = session.fill(slot);
-    if (!one) return void (slot.extra || empty.push(emptySlot(slot, library.exercises, library)));
+    if (!one) {
+      if (!slot.extra) empty.push(library.emptyOf(slot));
+      return;
+    }
     filled.push(one);
     claims.push(claimOf(one, slot.share, lift, edits[slot.id] !== undefined));
   };

@@ -1,9 +1,11 @@
 /** One slot's claim on a session's sets. */
 export interface Claim {
   readonly share: number;
-  /** Fewest and most sets that make sense for what fills it. */
+  /** Fewest and most sets by the range of what fills it. */
   readonly low: number;
   readonly high: number;
+  /** Fewest sets that are still worth doing where `low` would keep it closed. */
+  readonly least: number;
   /** Never more, whatever is left over: the lift-count table's end. `Infinity` where there is none. */
   readonly most: number;
   /** A coach wrote on it: it is opened before the others. */
@@ -19,39 +21,41 @@ export interface Split {
   readonly left: number;
 }
 
-/** Claims that are opened: the kept ones, then in order each whose fewest sets still fit. */
+/** Sets that open claims begin with: the kept ones, then in order each whose fewest sets still fit. */
 function opened(total: number, claims: readonly Claim[]): number[] {
-  const lows = claims.map(() => 0);
+  const sets = claims.map(() => 0);
   let free = total;
-  const open = (claim: Claim, index: number, low: number) => {
-    lows[index] = low;
-    free -= low;
-  };
-  const kept = claims.filter((claim) => claim.kept).length;
-  let keptLeft = kept;
+  let kept = claims.filter((claim) => claim.kept).length;
   claims.forEach((claim, index) => {
     if (!claim.kept) return;
-    keptLeft -= 1;
-    const low = Math.max(Math.min(claim.low, free - keptLeft), Math.min(1, free));
-    if (low > 0) open(claim, index, low);
+    kept -= 1;
+    // One set at least for each of those that follow.
+    const low = Math.max(Math.min(claim.low, free - kept), Math.min(1, free));
+    sets[index] = low;
+    free -= low;
   });
   claims.forEach((claim, index) => {
-    if (!claim.kept && claim.low <= free) open(claim, index, claim.low);
+    if (claim.kept) return;
+    // What matters most is not closed for the sake of its usual range.
+    const low = index === 0 ? Math.min(claim.low, Math.max(claim.least, free)) : claim.low;
+    if (low > free) return;
+    sets[index] = low;
+    free -= low;
   });
-  // Fewer sets than any claim wants: the first takes them all.
-  if (total > 0 && free === total && claims[0]) open(claims[0], 0, Math.min(total, claims[0].most));
-  return lows;
+  const first = claims[0];
+  // Fewer sets than any claim wants: the first takes them.
+  if (first && free === total) sets[0] = Math.min(total, first.most);
+  return sets;
 }
 
-/**
- * Parts `total` sets over claims in order of importance: as many claims open as their fewest sets allow, then each next set
- * goes where the share is furthest from met (largest remainder), within the ranges while any range has room.
- */
-export function splitSets(total: number, claims: readonly Claim[]): Split {
+function parted(total: number, claims: readonly Claim[]): Split {
   const sets = opened(total, claims);
   const shares = claims.reduce((sum, claim, index) => ((sets[index] ?? 0) > 0 ? sum + claim.share : sum), 0);
   let left = total - sets.reduce((sum, value) => sum + value, 0);
-  let above = 0;
+  let above = claims.reduce(
+    (sum, claim, index) => sum + Math.max(0, (sets[index] ?? 0) - Math.min(claim.high, claim.most)),
+    0,
+  );
   const give = (end: (claim: Claim) => number): boolean => {
     let next = -1;
     let most = -Infinity;
@@ -69,4 +73,22 @@ export function splitSets(total: number, claims: readonly Claim[]): Split {
   while (left > 0 && give((claim) => Math.min(claim.high, claim.most)));
   while (left > 0 && give((claim) => claim.most)) above += 1;
   return { sets, above: above + left, left };
+}
+
+/**
+ * Parts `total` sets over claims in order of importance: as many claims open as their fewest sets allow, then each next set goes
+ * where the share is furthest from met (largest remainder), within the ranges while any range has room. Where open claims would
+ * go above their ranges, a closed one opens with less than its own range instead. The sets and `left` add up to `total`.
+ */
+export function splitSets(total: number, claims: readonly Claim[]): Split {
+  let split = parted(total, claims);
+  let now = claims;
+  for (const index of claims.keys()) {
+    if (split.above === 0) break;
+    if ((split.sets[index] ?? 0) > 0) continue;
+    const eased = now.map((claim, at) => (at === index ? { ...claim, low: claim.least } : claim));
+    const next = parted(total, eased);
+    if (next.above < split.above && (next.sets[index] ?? 0) > 0) [split, now] = [next, eased];
+  }
+  return split;
 }
