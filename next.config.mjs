@@ -13,11 +13,21 @@ const HEADERS = [
   },
 ];
 
+/** The service worker fetches from this site only; a phone must not sit on an old one. */
+const WORKER_HEADERS = [
+  { key: "Cache-Control", value: "no-cache" },
+  { key: "Content-Security-Policy", value: "default-src 'self'; script-src 'self'; connect-src 'self'" },
+];
+
 /** @type {import('next').NextConfig} */
 const config = {
   reactStrictMode: true,
   poweredByHeader: false,
-  headers: () => Promise.resolve([{ source: "/:path*", headers: HEADERS }]),
+  headers: () =>
+    Promise.resolve([
+      { source: "/:path*", headers: HEADERS },
+      { source: "/sw.js", headers: WORKER_HEADERS },
+    ]),
   // Modules with native parts or their own worker files stay outside the bundle.
   serverExternalPackages: [
     "graphile-worker",

@@ -51,5 +51,9 @@ export async function proxy(request: NextRequest): Promise<Response> {
   return secured(pathname.startsWith("/api/") ? NextResponse.next() : await page(request));
 }
 
-// Feeds are read by calendars, often and without a cookie: nothing here is about them.
-export const config = { matcher: ["/((?!_next/static|_next/image|feeds/|icon.svg|favicon.ico).*)"] };
+// Feeds are read by calendars, often and without a cookie: nothing here is about them, nor about files for everyone.
+export const config = {
+  matcher: [
+    "/((?!_next/static|_next/image|feeds/|icons/|icon.svg|favicon.ico|sw.js|manifest.webmanifest).*)",
+  ],
+};

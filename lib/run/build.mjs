@@ -21,8 +21,9 @@ const FILES = [
   "instrumentation.ts",
   "proxy.ts",
 ];
-// These run beside the server and are no part of it.
-const OUTSIDE = ["lib/run", "db/seed"];
+const WORKER = "public/sw.js";
+// Run beside the server and no part of it, or made by the build itself.
+const OUTSIDE = ["lib/run", "db/seed", WORKER];
 
 function* filesIn(folder) {
   if (OUTSIDE.includes(folder) || !existsSync(inRoot(folder))) return;
@@ -31,7 +32,7 @@ function* filesIn(folder) {
   )) {
     const name = `${folder}/${entry.name}`;
     if (entry.isDirectory()) yield* filesIn(name);
-    else yield name;
+    else if (!OUTSIDE.includes(name)) yield name;
   }
 }
 
@@ -53,7 +54,27 @@ export function sourceHash() {
 }
 
 const isBuilt = (hash) =>
-  existsSync(inRoot(".next", "BUILD_ID")) && existsSync(STAMP) && readFileSync(STAMP, "utf8").trim() === hash;
+  existsSync(inRoot(".next", "BUILD_ID")) &&
+  existsSync(inRoot(WORKER)) &&
+  existsSync(STAMP) &&
+  readFileSync(STAMP, "utf8").trim() === hash;
+
+/** The service worker of the athlete's phone: one file under a fixed name, since its address is its identity. */
+async function buildWorker() {
+  const { build } = await import("esbuild");
+  await build({
+    absWorkingDir: ROOT,
+    entryPoints: ["lib/offline/service-worker.ts"],
+    outfile: inRoot(WORKER),
+    bundle: true,
+    minify: true,
+    format: "iife",
+    target: "es2022",
+    legalComments: "none",
+    define: { "process.env.NODE_ENV": '"production"' },
+    logLevel: "error",
+  });
+}
 
 /**
  * Builds when the sources changed since the last build.
@@ -65,6 +86,7 @@ export async function ensureBuild({ force = false } = {}) {
     if (!force && isBuilt(hash)) return false;
     rmSync(STAMP, { force: true });
     await step("Building", async () => {
+      await buildWorker();
       const built = await run(process.execPath, [NEXT, "build"], {
         cwd: ROOT,
         env: { ...process.env, NODE_ENV: "production", NEXT_TELEMETRY_DISABLED: "1" },
