@@ -1,5 +1,6 @@
 import { randomUUID } from "node:crypto";
 import type { Action } from "@/lib/policy";
+import type { ExerciseForm } from "@/lib/schemas/exercise";
 import { campForm } from "../factories/camp-book";
 import type { Call } from "./client";
 
@@ -12,6 +13,7 @@ export interface Scene {
   readonly membershipId: string;
   readonly entryId: string;
   readonly feedId: string;
+  readonly exerciseId: string;
 }
 
 export interface RouteRow {
@@ -46,6 +48,32 @@ export const PROFILE = {
   liftsPerWeek: 2,
   freeHours: [{ weekday: 1, from: "10:00", to: "24:00" }],
 } as const;
+
+/** What a form says of an exercise; the sets and repetitions are invented. */
+export const EXERCISE_FORM = {
+  name: "Quayside rope turn",
+  qualities: ["rotation", "anti-rotation"],
+  main: false,
+  load: "reserve",
+  bestOf: null,
+  powerZone: null,
+  sides: "each",
+  intent: "controlled",
+  doses: {
+    heavy: null,
+    volume: { sets: { low: 3, high: 4 }, reps: { low: 8, high: 12 } },
+    fast: null,
+    hold: null,
+  },
+  rest: 75,
+  equipment: ["cable"],
+  ruledOutBy: ["low-back-twist"],
+  order: "any",
+  stretch: null,
+  easier: null,
+  harder: null,
+  cues: ["Turn from the floor", "Stop where you want, not where it ends"],
+} satisfies ExerciseForm;
 
 const CHANGE = {
   change: { kind: "bout.off" },
@@ -147,6 +175,35 @@ export const TEAM_ROUTES: readonly RouteRow[] = [
     method: "DELETE",
     may: "timetable.write",
     params: ({ entryId }) => ({ id: entryId }),
+  },
+  { path: "exercises", method: "GET", may: "exercises.read" },
+  { path: "exercises", method: "POST", may: "exercises.write", body: () => EXERCISE_FORM },
+  {
+    path: "exercises/[id]",
+    method: "GET",
+    may: "exercises.read",
+    params: ({ exerciseId }) => ({ id: exerciseId }),
+  },
+  {
+    path: "exercises/[id]",
+    method: "PUT",
+    may: "exercises.write",
+    body: () => ({ ...EXERCISE_FORM, changedAt: null }),
+    params: ({ exerciseId }) => ({ id: exerciseId }),
+  },
+  {
+    path: "exercises/[id]/shelve",
+    method: "POST",
+    may: "exercises.write",
+    body: () => ({ shelved: true, changedAt: null }),
+    params: ({ exerciseId }) => ({ id: exerciseId }),
+  },
+  {
+    path: "exercises/[id]/restore",
+    method: "POST",
+    may: "exercises.write",
+    body: () => ({ changedAt: null }),
+    params: ({ exerciseId }) => ({ id: exerciseId }),
   },
   { path: "camps", method: "GET", may: null },
   {

@@ -4,10 +4,11 @@ import { feeds, holds, invites, memberships, timetableEntries } from "@/db/schem
 import type { Database } from "@/db/client";
 import type { Role } from "@/lib/policy";
 import { createCamp } from "@/lib/services/camps/create";
+import { addExercise } from "@/lib/services/exercises/save";
 import { campForm } from "../factories/camp-book";
 import { teamWithEveryRole } from "../factories/team";
 import { cookieOf } from "./client";
-import { SESSION, type Scene } from "./routes";
+import { EXERCISE_FORM, SESSION, type Scene } from "./routes";
 
 const only = <T>([row]: readonly T[]): T => {
   if (row === undefined) throw new Error("no row");
@@ -48,6 +49,10 @@ export async function sceneOf(db: Database, now: Date) {
       .values({ teamId, userId: head.userId, scope: "team", tokenHash: randomUUID() })
       .returning(),
   );
+  // Ids are made from names: another name for each team, so that a foreign id names nothing here.
+  const { id: exerciseId } = await addExercise(head, {
+    body: { ...EXERCISE_FORM, name: `Rope turn ${randomUUID()}` },
+  });
   const scene: Scene = {
     athleteId,
     campId,
@@ -56,6 +61,7 @@ export async function sceneOf(db: Database, now: Date) {
     membershipId: only(members.filter((row) => row.role === "skills")).id,
     entryId,
     feedId: feed.id,
+    exerciseId,
   };
   return { ...team, teamId, scene, cookie: (role: Role) => cookieOf(team.as(role).userId) };
 }
