@@ -17,7 +17,7 @@ const SET_DAYS = 56;
 
 export type ById = { params: Record<string, string> };
 
-async function useOf(ctx: TeamContext): Promise<(exerciseId: string) => ExerciseSummary["use"]> {
+async function countUse(ctx: TeamContext): Promise<(exerciseId: string) => ExerciseSummary["use"]> {
   const today = await todayOf(ctx);
   const setsFrom = isoFromDay((dayFromIso(today) - SET_DAYS) as Day);
   const rows = await listExerciseUse(ctx.db, ctx.teamId, { today, setsFrom });
@@ -32,20 +32,20 @@ const summaryOf = (
 
 /** The team's exercises, shelved ones included, with where each is used. */
 export async function listTeamExercises(ctx: TeamContext): Promise<{ exercises: ExerciseSummary[] }> {
-  const [rows, use] = await Promise.all([listExercises(ctx.db, ctx.teamId), useOf(ctx)]);
-  return { exercises: rows.map((row) => summaryOf(row, use(row.exercise.id))) };
+  const [rows, useOf] = await Promise.all([listExercises(ctx.db, ctx.teamId), countUse(ctx)]);
+  return { exercises: rows.map((row) => summaryOf(row, useOf(row.exercise.id))) };
 }
 
 /** One exercise with what the team changed about it. */
 export async function readExercise(ctx: TeamContext, { params }: ById): Promise<ExerciseView> {
   const row = params.id ? await findExercise(ctx.db, ctx.teamId, params.id) : null;
   if (!row) throw notFound();
-  const [edits, use] = await Promise.all([
+  const [edits, useOf] = await Promise.all([
     listExerciseEdits(ctx.db, ctx.teamId, row.exercise.id),
-    useOf(ctx),
+    countUse(ctx),
   ]);
   return {
-    ...summaryOf(row, use(row.exercise.id)),
+    ...summaryOf(row, useOf(row.exercise.id)),
     history: edits.map(({ at, ...edit }) => ({ ...edit, at: at.toISOString() })),
   };
 }
