@@ -23,7 +23,7 @@ export default defineConfig({
     viewport: { width: 1440, height: 900 },
     locale: "en-GB",
     timezoneId: "Europe/London",
-    trace: "retain-on-failure",
+    // A trace of every test costs more than the tests: `npx playwright test --trace on` where one is needed.
     screenshot: "only-on-failure",
     launchOptions: {
       executablePath: "/usr/bin/chromium",

@@ -84,16 +84,17 @@ for (const [role, { nav, pages, missing }] of Object.entries(SEES) as [Role, See
     await page.goto("/settings");
     const bar = page.getByRole("navigation", { name: "Main", exact: true });
     expect(await bar.getByRole("link").allInnerTexts()).toEqual(nav);
+    // As the server answers them: six roles times every page need no drawing.
     for (const path of pages.map(pathOf)) {
-      const answer = await page.goto(path);
-      expect(answer?.status(), path).toBe(200);
-      expect(new URL(page.url()).pathname, path).toBe(path);
-      await expect(heading(page), path).not.toHaveText(NOTHING);
+      const answer = await page.request.get(path);
+      expect(answer.status(), path).toBe(200);
+      expect(new URL(answer.url()).pathname, path).toBe(path);
     }
-    for (const path of missing.map(pathOf)) {
-      const answer = await page.goto(path);
-      await expect(heading(page), path).toHaveText(NOTHING);
-      expect(answer?.status(), path).toBe(404);
+    for (const path of missing.map(pathOf)) expect((await page.request.get(path)).status(), path).toBe(404);
+    const [absent] = missing.map(pathOf);
+    if (absent) {
+      await page.goto(absent);
+      await expect(heading(page), absent).toHaveText(NOTHING);
     }
     await page.context().close();
   });
@@ -264,10 +265,9 @@ const apiPath = (path: string): string =>
 for (const [index, role] of ORDER.entries()) {
   test(`${role}: the API refuses what the role may not, whatever the page shows`, async ({ browser }) => {
     const page = await demoPage(browser, role);
-    await page.goto("/settings");
     const answers: string[] = [];
     for (const [method, path, body] of CALLS)
-      answers.push(`${method} ${path} ${await apiStatus(page, method, apiPath(path), body)}`);
+      answers.push(`${method} ${path} ${await apiStatus(page.request, method, apiPath(path), body)}`);
     expect(answers).toEqual(CALLS.map(([method, path, , wanted]) => `${method} ${path} ${wanted[index]}`));
     await page.context().close();
   });
@@ -298,10 +298,10 @@ test("without a session every page of a team leads to the sign-in, and the API a
   page,
 }) => {
   for (const path of [...COACH, "/settings", pathOf("OWN"), pathOf("OWN/changes"), pathOf("OWN-ATHLETE")]) {
-    await page.goto(path);
-    await expect(heading(page), path).toHaveText("Sign in");
-    expect(new URL(page.url()).searchParams.get("next"), path).toBe(path);
+    const answer = await page.request.get(path);
+    const { pathname, searchParams } = new URL(answer.url());
+    expect([pathname, searchParams.get("next")], path).toEqual(["/sign-in", path]);
   }
   for (const [method, path, body] of CALLS)
-    expect(await apiStatus(page, method, apiPath(path), body), path).toBe(401);
+    expect(await apiStatus(page.request, method, apiPath(path), body), path).toBe(401);
 });
