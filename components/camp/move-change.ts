@@ -44,6 +44,8 @@ export function subjectOf(change: LiveChange): string | null {
       return change.sportId;
     case "sport.add":
       return change.entryId;
+    case "response.add":
+    case "response.drop":
     case "bout.change":
     case "bout.off":
       return null;

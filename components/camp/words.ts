@@ -94,6 +94,10 @@ export function changeHeading(change: LiveChange, standing: Picture): string {
       return `Letting ${liftTitle(standing, change.liftId)} go from its pin`;
     case "lift.factor":
       return `Coach’s factor × ${change.factor.toFixed(2)} for ${liftTitle(standing, change.liftId)}`;
+    case "response.add":
+      return `Sets × ${change.factor.toFixed(2)} from ${dayText(dayFromIso(change.from))} to ${dayText(dayFromIso(change.to))}`;
+    case "response.drop":
+      return "Taking back an accepted suggestion";
     case "sport.add":
       return `Adding ${change.values.title} on ${longDayName(dayFromIso(change.values.date))}`;
     case "sport.edit":

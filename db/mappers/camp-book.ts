@@ -85,6 +85,7 @@ export function bookOf(rows: {
     sport: rows.sport.map(sportEntryOf),
     pins: rows.pins.map(pinOf),
     coachFactors: camp.coachFactors,
+    responses: camp.responses,
     holds: rows.holds.map((hold) => ({ from: hold.fromDay, to: hold.toDay })),
     rules: rows.rules,
   };
@@ -111,4 +112,5 @@ export const campColumnsOf = (book: CampBook) => ({
   liftsPerWeek: book.athlete.liftsPerWeek,
   freeHours: book.athlete.freeHours,
   coachFactors: book.coachFactors,
+  responses: book.responses,
 });

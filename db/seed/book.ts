@@ -78,6 +78,7 @@ export function demoBook(athlete: DemoAthlete, camp: DemoCamp, today: string, ke
     sport: travelDay === null ? sport : [...sport, travelEntry(key, travelDay)],
     pins: [],
     coachFactors: {},
+    responses: [],
     holds: [],
     rules: {},
   };

@@ -19,6 +19,7 @@ export interface CampState {
 }
 
 const refuse = (pointer: string, message: string): EditResult => ({ problems: [{ pointer, message }] });
+const END_OF_DAY = "23:59";
 const PAST = "That is already past, and what is past stays.";
 
 const isPast = (state: CampState, day: Day, start: string): boolean =>
@@ -61,6 +62,28 @@ function editLift(state: CampState, change: Extract<Change, { liftId: string }>)
   return placeProblem(state, date, start) ?? { edit: { putPins: [{ liftId, item, week, date, start }] } };
 }
 
+/** More than this many at once is no plan any more; the schema of the book holds no more either. */
+const MOST_RESPONSES = 100;
+
+function editResponse(state: CampState, change: Extract<Change, { kind: `response.${string}` }>): EditResult {
+  const { from, to } = campSpan(state.book);
+  const known = state.book.responses.find((response) => response.id === change.id);
+  if (change.kind === "response.drop") {
+    if (!known) return refuse("/change/id", "That suggestion is not in force any more.");
+    if (isPast(state, dayFromIso(known.to), END_OF_DAY)) return refuse("/change/id", PAST);
+    return { edit: { dropResponses: [change.id] } };
+  }
+  if (dayFromIso(change.from) < from || dayFromIso(change.to) > to) {
+    return refuse("/change/from", "Those days are outside the camp.");
+  }
+  if (isPast(state, dayFromIso(change.to), END_OF_DAY)) return refuse("/change/to", PAST);
+  if (!known && state.book.responses.length >= MOST_RESPONSES) {
+    return refuse("/change", "Too many suggestions are in force: take one out first.");
+  }
+  const { id, from: first, to: last, factor, because } = change;
+  return { edit: { putResponses: [{ id, from: first, to: last, factor, because }] } };
+}
+
 function editDatedSport(state: CampState, change: Extract<Change, { sportId: string }>): EditResult {
   const { from, to } = campSpan(state.book);
   const occurrence = findOccurrence(state.book, change.sportId, from, to);
@@ -91,6 +114,9 @@ export function editFor(state: CampState, change: Exclude<Change, { kind: "put-b
     case "lift.release":
     case "lift.factor":
       return editLift(state, change);
+    case "response.add":
+    case "response.drop":
+      return editResponse(state, change);
     case "sport.add":
       return (
         placeProblem(state, change.values.date, change.values.start) ?? {

@@ -1,4 +1,4 @@
-import type { BookPin, Bout, CampBook, SportEntry } from "@/lib/schemas/camp-book";
+import type { BookPin, Bout, CampBook, CampResponse, SportEntry } from "@/lib/schemas/camp-book";
 
 /**
  * A change made concrete: what it puts into the camp book and what it takes out. Every change becomes one edit, every
@@ -13,6 +13,8 @@ export interface BookEdit {
   readonly dropSport?: readonly string[];
   readonly putPins?: readonly BookPin[];
   readonly dropPins?: readonly string[];
+  readonly putResponses?: readonly CampResponse[];
+  readonly dropResponses?: readonly string[];
   /** Null takes the factor away. */
   readonly factors?: Readonly<Record<string, number | null>>;
 }
@@ -29,6 +31,12 @@ const put = <T>(list: readonly T[], key: (value: T) => string, values: readonly 
 
 const sportKey = (entry: SportEntry) => entry.id;
 const pinKey = (pin: BookPin) => pin.liftId;
+const responseKey = (response: CampResponse) => response.id;
+/** Always in the same order, so that putting one back restores the list as it was. */
+const byDays = (a: CampResponse, b: CampResponse): number => {
+  const [one, other] = [a, b].map(({ from, to, id }) => `${from} ${to} ${id}`);
+  return one === other ? 0 : (one ?? "") < (other ?? "") ? -1 : 1;
+};
 
 /** The book after the edit; the one given is not touched. */
 export function applyEdit(book: CampBook, edit: BookEdit): CampBook {
@@ -46,6 +54,11 @@ export function applyEdit(book: CampBook, edit: BookEdit): CampBook {
     sport: put(without(book.sport, sportKey, new Set(edit.dropSport ?? [])), sportKey, edit.putSport ?? []),
     pins: put(without(book.pins, pinKey, new Set(edit.dropPins ?? [])), pinKey, edit.putPins ?? []),
     coachFactors: factors,
+    responses: put(
+      without(book.responses, responseKey, new Set(edit.dropResponses ?? [])),
+      responseKey,
+      edit.putResponses ?? [],
+    ).sort(byDays),
   };
 }
 
@@ -71,6 +84,12 @@ const inverseOfList = <T>(
 export function inverseOf(book: CampBook, edit: BookEdit): BookEdit {
   const sport = inverseOfList(book.sport, sportKey, edit.putSport ?? [], edit.dropSport ?? []);
   const pins = inverseOfList(book.pins, pinKey, edit.putPins ?? [], edit.dropPins ?? []);
+  const responses = inverseOfList(
+    book.responses,
+    responseKey,
+    edit.putResponses ?? [],
+    edit.dropResponses ?? [],
+  );
   return {
     ...(edit.status !== undefined && { status: book.status }),
     ...(edit.bout !== undefined && { bout: book.bout }),
@@ -80,6 +99,8 @@ export function inverseOf(book: CampBook, edit: BookEdit): BookEdit {
     dropSport: sport.gone,
     putPins: pins.back,
     dropPins: pins.gone,
+    putResponses: responses.back,
+    dropResponses: responses.gone,
     factors: Object.fromEntries(
       Object.keys(edit.factors ?? {}).map((id) => [id, book.coachFactors[id] ?? null]),
     ),

@@ -70,7 +70,11 @@ export function planInputOf(book: CampBook, now: Instant): PlanInput {
     })),
     rules: withOverrides(book.rules),
     coachFactors: book.coachFactors,
-    response: 1,
+    responses: book.responses.map(({ from, to, factor }) => ({
+      from: dayFromIso(from),
+      to: dayFromIso(to),
+      factor,
+    })),
   };
 }
 

@@ -16,12 +16,15 @@ export interface SavedChange {
 /** What the revision wrote must still stand; otherwise putting it back would take a later change with it. */
 export function putBackProblem(book: CampBook, { edit }: SavedChange): FieldError | null {
   const sport = new Map(book.sport.map((entry) => [entry.id, entry]));
+  const responses = new Map(book.responses.map((response) => [response.id, response]));
   const pins = new Map(book.pins.map((pin) => [pin.liftId, pin]));
   const stands =
     (edit.putSport ?? []).every((entry) => dequal(sport.get(entry.id), entry)) &&
     (edit.dropSport ?? []).every((id) => !sport.has(id)) &&
     (edit.putPins ?? []).every((pin) => dequal(pins.get(pin.liftId), pin)) &&
     (edit.dropPins ?? []).every((id) => !pins.has(id)) &&
+    (edit.putResponses ?? []).every((response) => dequal(responses.get(response.id), response)) &&
+    (edit.dropResponses ?? []).every((id) => !responses.has(id)) &&
     (edit.bout === undefined || dequal(edit.bout, book.bout)) &&
     (edit.weeks === undefined || edit.weeks === book.weeks) &&
     (edit.weighIn === undefined || dequal(edit.weighIn, book.weighIn)) &&

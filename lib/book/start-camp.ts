@@ -120,7 +120,7 @@ export function startInput(params: StartParams, zone: string, now: Instant): Pla
     holds: [],
     rules: DEFAULT_RULES,
     coachFactors: {},
-    response: 1,
+    responses: [],
   };
 }
 

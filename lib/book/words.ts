@@ -1,6 +1,6 @@
-import { ITEM_TITLES } from "@/lib/engine";
+import { ITEM_TITLES, dayFromIso } from "@/lib/engine";
 import type { KnockOn } from "@/lib/engine/types";
-import { momentText } from "@/lib/format/civil";
+import { dayText, momentText } from "@/lib/format/civil";
 import type { Change } from "@/lib/schemas/change";
 import type { StandingCamp } from "./preview";
 
@@ -15,6 +15,9 @@ function sportWords(knockOn: KnockOn, scope: keyof typeof SCOPE, verb: string): 
   const at = first.from ?? first.to;
   return `${verb} ${first.title}${at ? `, ${momentText(at)}` : ""}${SCOPE[scope]}`;
 }
+
+const daysText = ({ from, to }: { readonly from: string; readonly to: string }): string =>
+  from === to ? dayText(dayFromIso(from)) : `${dayText(dayFromIso(from))} to ${dayText(dayFromIso(to))}`;
 
 /** What a change did, in one line, for the list of changes and for mail. */
 export function changeWords(change: Change, standing: StandingCamp, knockOn: KnockOn): string {
@@ -35,6 +38,13 @@ export function changeWords(change: Change, standing: StandingCamp, knockOn: Kno
       return `Lifted the pin of ${liftTitle(change.liftId)}`;
     case "lift.factor":
       return `Set the coach's factor of ${liftTitle(change.liftId)} to ${change.factor}`;
+    // Not the reason: more people read the list of changes than may read check-ins.
+    case "response.add":
+      return `Accepted a suggestion: sets × ${change.factor}, ${daysText(change)}`;
+    case "response.drop": {
+      const known = standing.book.responses.find((response) => response.id === change.id);
+      return `Took back an accepted suggestion${known ? `: sets × ${known.factor}, ${daysText(known)}` : ""}`;
+    }
     case "sport.add":
       return `Added ${change.values.title}`;
     case "sport.edit":

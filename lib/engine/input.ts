@@ -75,7 +75,7 @@ function checkSport({ sport }: PlanInput, problems: Problems): void {
   });
 }
 
-function checkDecisions({ pins, holds, coachFactors, response }: PlanInput, problems: Problems): void {
+function checkDecisions({ pins, holds, coachFactors, responses }: PlanInput, problems: Problems): void {
   pins.forEach(({ slot, day, start }, index) => {
     const holdsUp = isDay(day) && isMinute(start) && Number.isInteger(slot.week);
     problems.check(holdsUp, "number", `/pins/${index}`, "Give a date, a time of day and a week.");
@@ -91,7 +91,11 @@ function checkDecisions({ pins, holds, coachFactors, response }: PlanInput, prob
       "The coach's factor: 0.5 to 1.5.",
     );
   }
-  problems.check(within(response, 0.5, 1), "number", "/response", "The factor of a suggestion: 0.5 to 1.");
+  responses.forEach(({ from, to, factor }, index) => {
+    const at = `/responses/${index}`;
+    problems.check(isDay(from) && isDay(to) && from <= to, "number", at, "Give dates, the first one first.");
+    problems.check(within(factor, 0.5, 1), "number", `${at}/factor`, "The factor of a suggestion: 0.5 to 1.");
+  });
 }
 
 function checkRules({ rules }: PlanInput, problems: Problems): void {

@@ -134,6 +134,15 @@ export interface Hold {
   readonly to: Day | null;
 }
 
+/** An accepted suggestion: sets of the lifts of these days are lowered. */
+export interface AcceptedResponse {
+  readonly from: Day;
+  /** Inclusive. */
+  readonly to: Day;
+  /** 0.5 to 1. */
+  readonly factor: number;
+}
+
 export interface PlanInput {
   /** What starts at or before this instant is past: it is never planned and never moves. */
   readonly now: Instant;
@@ -155,8 +164,8 @@ export interface PlanInput {
   readonly rules: HouseRules;
   /** Coach's own factor on sets by lift id, 0.5 to 1.5. */
   readonly coachFactors: Readonly<Record<string, number>>;
-  /** Factor from an accepted suggestion, 0.5 to 1. 1 where there is none. */
-  readonly response: number;
+  /** Accepted suggestions; where several cover a day their factors multiply, never below 0.5. */
+  readonly responses: readonly AcceptedResponse[];
 }
 
 export const FACTOR_NAMES = ["wave", "taper", "before", "after", "cap", "response", "coach"] as const;

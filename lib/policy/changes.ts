@@ -6,6 +6,8 @@ export const CHANGE_ACTION: Record<ChangeKind, Action> = {
   "lift.move": "lifts.write",
   "lift.release": "lifts.write",
   "lift.factor": "lifts.write",
+  "response.add": "lifts.write",
+  "response.drop": "lifts.write",
   "sport.add": "sport.write",
   "sport.edit": "sport.write",
   "sport.drop": "sport.write",

@@ -74,20 +74,20 @@ export type BookPin = z.infer<typeof pinSchema>;
 /** Coach's own factor on a session's sets. */
 export const coachFactor = z.number().min(0.5, "0.5 to 1.5.").max(1.5, "0.5 to 1.5.");
 
+export const campResponseFields = {
+  id: z.string().min(1).max(80),
+  from: civilDate,
+  /** Inclusive. */
+  to: civilDate,
+  factor: z.number("0.5 to 1.").min(0.5, "0.5 to 1.").max(1, "0.5 to 1."),
+  because: z.string().trim().max(300, "At most 300 characters."),
+};
+/** For a refinement: the first of two dates is not after the last. */
+export const datesInOrder = ({ from, to }: { from: string; to: string }): boolean => from <= to;
+export const DATES_IN_ORDER = { path: ["to"], message: "The last day must not be before the first." };
+
 /** An accepted suggestion: sets of the lifting in these days are lowered by the factor. */
-export const campResponseSchema = z
-  .object({
-    id: z.string().min(1).max(80),
-    from: civilDate,
-    /** Inclusive. */
-    to: civilDate,
-    factor: z.number().min(0.5, "0.5 to 1.").max(1, "0.5 to 1."),
-    because: z.string().trim().max(300),
-  })
-  .refine((response) => response.from <= response.to, {
-    path: ["to"],
-    message: "The last day must not be before the first.",
-  });
+export const campResponseSchema = z.object(campResponseFields).refine(datesInOrder, DATES_IN_ORDER);
 export type CampResponse = z.infer<typeof campResponseSchema>;
 
 export const campBookSchema = z.object({
@@ -101,6 +101,7 @@ export const campBookSchema = z.object({
   sport: z.array(sportEntrySchema).max(500),
   pins: z.array(pinSchema).max(100),
   coachFactors: z.record(z.string(), coachFactor),
+  responses: z.array(campResponseSchema).max(100),
   holds: z.array(z.object({ from: civilDate, to: civilDate.nullable() })).max(50),
   /** The team's own values of house rules, by key. */
   rules: z.record(z.string(), z.number()),

@@ -1,6 +1,16 @@
 import { z } from "zod";
 import { ITEMS } from "@/lib/engine/types";
-import { boutSchema, campWeeks, coachFactor, sportEntrySchema, sportKind, weighInSchema } from "./camp-book";
+import {
+  DATES_IN_ORDER,
+  boutSchema,
+  campResponseFields,
+  campWeeks,
+  coachFactor,
+  datesInOrder,
+  sportEntrySchema,
+  sportKind,
+  weighInSchema,
+} from "./camp-book";
 import { civilDate, civilTime } from "./civil";
 
 /**
@@ -31,6 +41,9 @@ export const changeSchema = z.discriminatedUnion("kind", [
   /** Lifts the pin, so that the engine places it again. */
   z.object({ kind: z.literal("lift.release"), liftId: z.string().min(1).max(60) }),
   z.object({ kind: z.literal("lift.factor"), liftId: z.string().min(1).max(60), factor: coachFactor }),
+  /** Accepts a suggestion: the lifting of these days gets fewer sets. */
+  z.object({ kind: z.literal("response.add"), ...campResponseFields }).refine(datesInOrder, DATES_IN_ORDER),
+  z.object({ kind: z.literal("response.drop"), id: campResponseFields.id }),
   z.object({ kind: z.literal("sport.add"), entryId: z.uuid(), values: sportValuesSchema }),
   /** Also a move: only `date` and `start` given. */
   z.object({

@@ -29,6 +29,7 @@ const bookOf = (change: Partial<StartParams>) => {
     sport: form.sport.map((entry, index) => ({ ...entry, id: `s${index}`, series: `s${index}`, idShift: 0 })),
     pins: [],
     coachFactors: {},
+    responses: [],
     holds: [],
     rules: {},
   };

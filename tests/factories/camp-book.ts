@@ -50,6 +50,7 @@ export const campBook = (over: Partial<CampBook> = {}): CampBook => ({
   ],
   pins: [],
   coachFactors: {},
+  responses: [],
   holds: [],
   rules: {},
   ...over,

@@ -13,6 +13,7 @@ import {
   minuteFromHhmm,
   weekdayOf,
   withOverrides,
+  type AcceptedResponse,
   type Day,
   type FreeHours,
   type HouseRules,
@@ -99,7 +100,7 @@ export const planInput = (over: Partial<PlanInput> = {}): PlanInput => {
     holds: [],
     rules: DEFAULT_RULES,
     coachFactors: {},
-    response: 1,
+    responses: [],
     ...over,
   };
 };
@@ -277,6 +278,20 @@ const arbPin = (boutDay: Day, weeks: number): fc.Arbitrary<Pin> =>
       start,
     }));
 
+/** An accepted suggestion on any days of the camp, from one day to all of it. */
+export const arbResponse = (boutDay: Day, weeks: number): fc.Arbitrary<AcceptedResponse> =>
+  fc
+    .record({
+      back: fc.integer({ min: 0, max: 7 * weeks - 1 }),
+      length: fc.integer({ min: 0, max: 7 * weeks }),
+      factor: fc.constantFrom(0.5, 0.7, 0.8, 0.95, 1),
+    })
+    .map(({ back, length, factor }) => ({
+      from: (boutDay - back) as Day,
+      to: (boutDay - back + length) as Day,
+      factor,
+    }));
+
 export interface ArbOptions {
   readonly minWeeks?: number;
   readonly maxWeeks?: number;
@@ -345,7 +360,10 @@ export const arbPlanInput = (options: ArbOptions = {}): fc.Arbitrary<PlanInput> 
               .constantFrom(0.5, 0.8, 1.25, 1.5)
               .map((factor) => ({ "strength-a.2": factor, "power-a.1": factor })),
           ),
-          response: fc.constantFrom(1, 1, 1, 0.8, 0.5),
+          responses: fc.oneof(
+            { weight: 3, arbitrary: fc.constant([]) },
+            { weight: 2, arbitrary: fc.array(arbResponse(boutDay, weeks), { minLength: 1, maxLength: 3 }) },
+          ),
         })
         .map((made): PlanInput => ({
           now: instantAt(made.zone, (campStart(boutDay, weeks) - made.ahead) as Day, made.nowMinute),
@@ -364,6 +382,6 @@ export const arbPlanInput = (options: ArbOptions = {}): fc.Arbitrary<PlanInput> 
           holds: made.holds,
           rules: made.rules,
           coachFactors: made.coach,
-          response: made.response,
+          responses: made.responses,
         })),
     );

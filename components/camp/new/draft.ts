@@ -114,6 +114,7 @@ export const bookOfForm = (form: CampForm, rules: CampBook["rules"]): CampBook =
   sport: form.sport.map((row, index) => ({ ...row, id: `row-${index}`, series: `row-${index}`, idShift: 0 })),
   pins: [],
   coachFactors: {},
+  responses: [],
   holds: [],
   rules,
 });

@@ -5,6 +5,7 @@ import type { CampFrame } from "../phases";
 import type { Au, Day, Factor, Instant, Item, Lift, Minute } from "../types";
 import { capShare, loadCap } from "./cap";
 import { doseOf, fullSets, type Dose, type DoseParts } from "./lift-dose";
+import { responseFactor } from "./response";
 import { roundHalfUp, sessionMinutes } from "./sets";
 import { afterFactor, beforeFactor, hardSessions, sparringGaps, type HardSession } from "./sparring";
 import { taperFactor } from "./taper";
@@ -64,11 +65,7 @@ function partsOf(frame: CampFrame, lift: PlacedLift, hard: readonly HardSession[
     taper: taperPart(frame, lift.day),
     before: { name: "before", value: before, text: beforeText(before, gaps.before, rules["before.far"]) },
     after: { name: "after", value: after, text: afterText(after, gaps.after, rules["after.far"]) },
-    response: {
-      name: "response",
-      value: input.response,
-      text: input.response === 1 ? "No suggestion accepted" : "A suggestion was accepted",
-    },
+    response: responseFactor(input, lift.day),
     coach: {
       name: "coach",
       value: coach,

@@ -25,14 +25,12 @@ export interface Dose {
   readonly factors: readonly Factor[];
 }
 
-/** Sets before taper, sparring and cap. */
-export const fullSets = ({
-  baseSets,
-  wave,
-  response,
-  coach,
-}: Pick<DoseParts, "baseSets" | "wave" | "response" | "coach">): number =>
-  baseSets * wave.value * response.value * coach.value;
+/**
+ * Sets before taper, sparring, cap and accepted suggestions. The week's share is worked out from these: what a suggestion takes
+ * off one session is not handed to the others, so that accepting one never raises a set.
+ */
+export const fullSets = ({ baseSets, wave, coach }: Pick<DoseParts, "baseSets" | "wave" | "coach">): number =>
+  baseSets * wave.value * coach.value;
 
 /**
  * Sets of one lift. A lift within a day of hard sparring gives up at least one set against what it would hold without that
@@ -40,7 +38,7 @@ export const fullSets = ({
  */
 export function doseOf(parts: DoseParts): Dose {
   const { wave, taper, before, after, response, coach, share, floorSets } = parts;
-  const full = fullSets(parts);
+  const full = fullSets(parts) * response.value;
   const reduced = taper.value * before.value * after.value;
   const cap = Math.min(1, share / reduced);
   const rounded = roundHalfUp(full * Math.min(reduced, share));

@@ -29,6 +29,7 @@ function bookOfForm(form: CampForm, rules: Record<string, number>): CampBook {
     }),
     pins: [],
     coachFactors: {},
+    responses: [],
     holds: [],
     rules,
   };

@@ -59,11 +59,23 @@ const withoutDecisions = (book: CampBook): CampBook => ({
   bout: { ...book.bout, limitKg: null },
   pins: [],
   coachFactors: {},
+  responses: [],
   holds: [],
   rules: {},
   athlete: { ...book.athlete, freeHours: [] },
   sport: book.sport.map((entry) => ({ ...entry, effort: 0 })),
 });
+
+/** Why a suggestion was made is told by check-ins and logs: kept from those who may not read them. */
+const withoutReasons = (book: CampBook): CampBook => ({
+  ...book,
+  responses: book.responses.map((response) => ({ ...response, because: "" })),
+});
+
+function bookFor({ member }: TeamContext, { book, athlete }: LoadedCamp): CampBook {
+  if (!can(member, "lifts.detail", athlete.id)) return withoutDecisions(book);
+  return can(member, "checkins.read", athlete.id) ? book : withoutReasons(book);
+}
 
 export async function viewOf(tx: Tx, ctx: TeamContext, camp: LoadedCamp): Promise<CampView> {
   const { athlete, row } = camp;
@@ -79,7 +91,7 @@ export async function viewOf(tx: Tx, ctx: TeamContext, camp: LoadedCamp): Promis
     revision: row.revision,
     changedAt: row.changedAt.toISOString(),
     athlete,
-    book: detail ? camp.book : withoutDecisions(camp.book),
+    book: bookFor(ctx, camp),
     plan: detail ? camp.plan : withoutLiftingDetail(camp.plan),
     sport: detail ? sport : sport.map((session) => ({ ...session, effort: 0 })),
     may: ACTIONS.filter((action) => can(ctx.member, action, athlete.id)),

@@ -73,7 +73,7 @@ function inputOf(request: PlanRequest, now: Date): PlanInput {
     holds: [],
     rules: withOverrides(request.houseRules ?? {}),
     coachFactors: {},
-    response: 1,
+    responses: [],
   };
 }
 
