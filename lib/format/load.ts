@@ -1,0 +1,78 @@
+import { FROM_WORDS } from "@/lib/engine/prescription/wording";
+import { KG_PER_LB } from "@/lib/engine/prescription/plates";
+import type { Range } from "@/lib/engine/prescription/exercise";
+import type { Best, Line } from "@/lib/engine/prescription/types";
+import type { ShownLoad } from "@/lib/schemas/prescription";
+import { dayText } from "./civil";
+
+/** Loads, repetitions and rests as a reader sees them. Kilograms inside, the reader's unit outside. */
+
+export type MassUnit = "kg" | "lb";
+
+/** A mass in kilograms as a number of the unit, to one decimal. */
+export const massIn = (kg: number, unit: MassUnit): number =>
+  Math.round((unit === "lb" ? kg / KG_PER_LB : kg) * 10) / 10;
+
+/** "102.5", without its unit. */
+export const massNumber = (kg: number, unit: MassUnit): string => String(massIn(kg, unit));
+
+/** Kilograms of what was typed in the unit; exact for what `massIn` gave. */
+export const kgFrom = (value: number, unit: MassUnit): number => (unit === "lb" ? value * KG_PER_LB : value);
+
+/** "102.5 kg", "225 lb". */
+export const massText = (kg: number, unit: MassUnit): string => `${massNumber(kg, unit)} ${unit}`;
+
+/** "5", "8 to 10". */
+export const spanText = ({ low, high }: Range): string => (low === high ? `${low}` : `${low} to ${high}`);
+
+/** "5", "8 to 10 a side", "20 to 30 s". */
+export function repsText({ reps, aim, sides }: Pick<Line, "reps" | "aim" | "sides">): string {
+  const count = aim === "hold" ? `${spanText(reps)} s` : spanText(reps);
+  return sides === "each" ? `${count} a side` : count;
+}
+
+/** "4 × 5", "3 × 8 to 10 a side". */
+export const workText = (line: Pick<Line, "sets" | "reps" | "aim" | "sides">): string =>
+  `${line.sets} × ${repsText(line)}`;
+
+/** "105 kg", "2 to 3 in reserve", "body mass"; empty where there is nothing to load. */
+export function loadText(load: ShownLoad, unit: MassUnit): string {
+  switch (load.of) {
+    case "best":
+      return massText(load.kg, unit);
+    case "percent":
+      return `${spanText(load.percent)} % of best`;
+    case "reserve": {
+      const reserve = `${spanText(load.reserve)} in reserve`;
+      return load.kg === null ? reserve : `${massText(load.kg, unit)}, ${reserve}`;
+    }
+    case "body":
+      return load.kg === null ? "body mass" : `body mass and ${massText(load.kg, unit)}`;
+    case "throw":
+      return load.kg === null ? "a ball that still flies fast" : `${massText(load.kg, unit)} ball`;
+    case "none":
+      return load.kg === null ? "" : massText(load.kg, unit);
+  }
+}
+
+/** What was lifted for a best. */
+export interface Lifted {
+  readonly kg: number;
+  readonly reps: number;
+}
+
+/** "125 kg, estimated by Epley from 110 kg × 4 on Tue 3 Nov", "125 kg, measured on Tue 3 Nov". */
+export function bestText(best: Best, lifted: Lifted | null, unit: MassUnit): string {
+  const mass = massText(best.kg, unit);
+  const on = `on ${dayText(best.day)}`;
+  if (best.from === "measured") return `${mass}, measured ${on}`;
+  const from = lifted ? ` from ${massText(lifted.kg, unit)} × ${lifted.reps}` : "";
+  return `${mass}, estimated by ${FROM_WORDS[best.from]}${from} ${on}`;
+}
+
+/** "45 s", "2 min", "1 min 30 s". */
+export function restText(seconds: number): string {
+  const [minutes, rest] = [Math.floor(seconds / 60), seconds % 60];
+  if (minutes === 0) return `${rest} s`;
+  return rest === 0 ? `${minutes} min` : `${minutes} min ${rest} s`;
+}
