@@ -22,7 +22,7 @@ const ENTRIES: readonly NavEntry[] = [
   { href: "/camps", label: "Camps", shows: () => true },
   { href: "/athletes", label: "Athletes", shows: may("athletes.read") },
   { href: "/timetable", label: "Timetable", shows: may("timetable.read") },
-  { href: "/exercises", label: "Exercises", action: "exercises.read" },
+  { href: "/exercises", label: "Exercises", shows: may("exercises.read") },
   { href: "/house-rules", label: "House rules", shows: may("rules.read") },
 ];
 

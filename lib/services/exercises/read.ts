@@ -32,20 +32,20 @@ const summaryOf = (
 
 /** The team's exercises, shelved ones included, with where each is used. */
 export async function listTeamExercises(ctx: TeamContext): Promise<{ exercises: ExerciseSummary[] }> {
-  const [rows, useOf] = await Promise.all([listExercises(ctx.db, ctx.teamId), countUse(ctx)]);
-  return { exercises: rows.map((row) => summaryOf(row, useOf(row.exercise.id))) };
+  const [rows, countOf] = await Promise.all([listExercises(ctx.db, ctx.teamId), countUse(ctx)]);
+  return { exercises: rows.map((row) => summaryOf(row, countOf(row.exercise.id))) };
 }
 
 /** One exercise with what the team changed about it. */
 export async function readExercise(ctx: TeamContext, { params }: ById): Promise<ExerciseView> {
   const row = params.id ? await findExercise(ctx.db, ctx.teamId, params.id) : null;
   if (!row) throw notFound();
-  const [edits, useOf] = await Promise.all([
+  const [edits, countOf] = await Promise.all([
     listExerciseEdits(ctx.db, ctx.teamId, row.exercise.id),
     countUse(ctx),
   ]);
   return {
-    ...summaryOf(row, useOf(row.exercise.id)),
+    ...summaryOf(row, countOf(row.exercise.id)),
     history: edits.map(({ at, ...edit }) => ({ ...edit, at: at.toISOString() })),
   };
 }
