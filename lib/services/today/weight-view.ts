@@ -28,8 +28,8 @@ export function weightViewOf(
   const nearest = now.camps.find(
     ({ camp }) => camp.weighInDate !== null && dayFromIso(camp.weighInDate) >= now.today,
   );
-  const { limitKg, weighInDate } = nearest?.camp ?? {};
-  if (!nearest || limitKg == null || weighInDate == null) return { off: "no-limit" };
+  const { limitKg = null, weighInDate = null } = nearest?.camp ?? {};
+  if (!nearest || limitKg === null || weighInDate === null) return { off: "no-limit" };
   const weighIn = dayFromIso(weighInDate);
   const rules = withOverrides(now.rules);
   const weights = rows.map(({ day, kg }) => ({ day: dayFromIso(day), kg: kg as Kg }));
