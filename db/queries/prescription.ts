@@ -1,8 +1,7 @@
 import { and, asc, eq, inArray, isNull, sql } from "drizzle-orm";
-import type { Exercise } from "../../lib/engine/prescription/exercise";
 import type { LiftEdit, Swap } from "../../lib/engine/prescription/types";
 import type { Tx } from "../client";
-import { bests, camps, libraryExercises, liftEdits, swaps, teamExercises } from "../schema";
+import { bests, camps, liftEdits, swaps } from "../schema";
 
 export type BestRow = typeof bests.$inferSelect;
 
@@ -27,28 +26,11 @@ export async function listOverrides(
       campId: camps.id,
       // Columns are written out: inside a select of one table drizzle leaves the table's name away.
       swaps: sql<Swap[]>`coalesce((select jsonb_agg(
-        jsonb_build_object('item', s.item, 'from', s.from_exercise, 'to', s.to_exercise) order by s.item, s.from_exercise)
+        jsonb_build_object('item', s.item, 'from', s.from_exercise, 'to', s.to_exercise) order by s.created_at, s.item, s.from_exercise)
         from ${swaps} s where s.team_id = "camps"."team_id" and s.camp_id = "camps"."id"), '[]')`,
       edits: sql<Record<string, LiftEdit>>`coalesce((select jsonb_object_agg(e.lift_id, e.edit)
         from ${liftEdits} e where e.team_id = "camps"."team_id" and e.camp_id = "camps"."id"), '{}')`,
     })
     .from(camps)
     .where(and(eq(camps.teamId, teamId), inArray(camps.id, [...campIds])));
-}
-
-/** Exercises that this team uses: the library with the team's own form over it, shelved ones left out. */
-export async function listUsedExercises(tx: Tx, teamId: string): Promise<Exercise[]> {
-  const [library, own] = await Promise.all([
-    tx.select().from(libraryExercises).orderBy(asc(libraryExercises.position)),
-    tx.select().from(teamExercises).where(eq(teamExercises.teamId, teamId)).orderBy(asc(teamExercises.id)),
-  ]);
-  const team = new Map(own.map((row) => [row.id, row]));
-  const known = new Set(library.map((row) => row.id));
-  return [
-    ...library.flatMap(({ id, exercise }) => {
-      const row = team.get(id);
-      return row?.shelved ? [] : [row?.exercise ?? exercise];
-    }),
-    ...own.flatMap((row) => (row.shelved || known.has(row.id) ? [] : [row.exercise])),
-  ];
 }

@@ -2,7 +2,7 @@ import { randomUUID } from "node:crypto";
 import { readdirSync, readFileSync } from "node:fs";
 import path from "node:path";
 import { beforeAll, describe, expect, it } from "vitest";
-import { ROLES, can } from "@/lib/policy";
+import { ROLES, can, type Action, type Role } from "@/lib/policy";
 import { testDatabase } from "../setup/database";
 import { call, cookieOf, problemOf } from "./client";
 import { OPEN_ROUTES, TEAM_ROUTES, callOf, type RouteRow } from "./routes";
@@ -24,6 +24,12 @@ const handlerOf = async ({ method, path: route }: RouteRow) => {
   if (!handler) throw new Error(`no ${method} in ${route}`);
   return handler;
 };
+
+/** A role that may do it: of the whole team where there is one, else for its own athlete. */
+const allowedTo = (may: Action | null): Role =>
+  ROLES.find((role) => may === null || can({ role, athleteId: null }, may)) ??
+  ROLES.find((role) => may !== null && can({ role, athleteId: "own" }, may, "own")) ??
+  "head";
 
 let own: Awaited<ReturnType<typeof sceneOf>>;
 let foreign: Awaited<ReturnType<typeof sceneOf>>;
@@ -73,11 +79,12 @@ describe.each(TEAM_ROUTES.map((row) => [name(row), row] as const))("%s", (_, row
   if (row.params)
     it("the same 404 for another team's, for nobody's, and for what is no id", async () => {
       const handler = await handlerOf(row);
-      const allowed = ROLES.find((role) => may !== null && can({ role, athleteId: null }, may));
-      const cookie = await own.cookie(allowed ?? "head");
-      const key = Object.keys(row.params?.(own.scene) ?? {})[0] ?? "";
+      const cookie = await own.cookie(allowedTo(may));
+      const good = row.params?.(own.scene) ?? {};
+      const key = Object.keys(good)[0] ?? "";
+      const wrong = [randomUUID(), "../x%00"].map((id) => ({ ...good, [key]: id }));
       const answers = [];
-      for (const params of [row.params?.(foreign.scene), { [key]: randomUUID() }, { [key]: "../x%00" }]) {
+      for (const params of [row.params?.(foreign.scene), ...wrong]) {
         const response = await call(handler, { ...callOf(row, own.scene), cookie, params });
         expect(response.status).toBe(404);
         answers.push(await problemOf(response));
@@ -89,8 +96,7 @@ describe.each(TEAM_ROUTES.map((row) => [name(row), row] as const))("%s", (_, row
   if (row.body)
     it("422 for a body that is no JSON and for one of another shape, with pointers", async () => {
       const handler = await handlerOf(row);
-      const allowed = ROLES.find((role) => may === null || can({ role, athleteId: null }, may));
-      const cookie = await own.cookie(allowed ?? "head");
+      const cookie = await own.cookie(allowedTo(may));
       const { params } = callOf(row, own.scene);
       for (const raw of ["{", "[]", '{"x":1}', ""]) {
         const response = await call(handler, { method: row.method, cookie, params, raw });
@@ -107,8 +113,7 @@ describe.each(TEAM_ROUTES.map((row) => [name(row), row] as const))("%s", (_, row
   if (row.body)
     it("413 for a body above 256 KiB, whether or not it says so", async () => {
       const handler = await handlerOf(row);
-      const allowed = ROLES.find((role) => may === null || can({ role, athleteId: null }, may));
-      const cookie = await own.cookie(allowed ?? "head");
+      const cookie = await own.cookie(allowedTo(may));
       const raw = JSON.stringify({ x: "y".repeat(256 * 1024) });
       for (const headers of [
         {} as Record<string, string>,

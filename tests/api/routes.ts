@@ -1,6 +1,7 @@
 import { randomUUID } from "node:crypto";
 import type { Action } from "@/lib/policy";
 import type { ExerciseForm } from "@/lib/schemas/exercise";
+import type { SessionLog } from "@/lib/schemas/today";
 import { campForm } from "../factories/camp-book";
 import type { Call } from "./client";
 
@@ -14,6 +15,10 @@ export interface Scene {
   readonly entryId: string;
   readonly feedId: string;
   readonly exerciseId: string;
+  /** A request of the athlete that waits for an answer. */
+  readonly requestId: string;
+  /** A session of the camp that can be logged. */
+  readonly sessionId: string;
 }
 
 export interface RouteRow {
@@ -81,6 +86,19 @@ const CHANGE = {
   idempotencyKey: "5d1f0a52-6f0e-4b57-9a55-0c7f3a1f7b99",
 };
 const ACCOUNT = { name: "New Name", units: "lb", timeZone: "Europe/Zagreb", mailChoice: "daily" };
+
+/** A sport session as done: the numbers are invented. */
+export const LOG = {
+  state: "done",
+  effort: 6,
+  minutes: 55,
+  hardRounds: null,
+  knock: false,
+  painPlace: "",
+  pain: null,
+  note: "",
+  sets: [],
+} as const satisfies SessionLog;
 
 /** Every route for members of a team. */
 export const TEAM_ROUTES: readonly RouteRow[] = [
@@ -237,6 +255,54 @@ export const TEAM_ROUTES: readonly RouteRow[] = [
     may: "camps.bout",
     body: () => CHANGE,
     params: ({ campId }) => ({ id: campId }),
+  },
+  { path: "today", method: "GET", may: null },
+  {
+    path: "camps/[id]/sessions/[sid]/log",
+    method: "PUT",
+    may: "logs.write",
+    body: () => ({ key: randomUUID(), baseVersion: 0, log: LOG }),
+    params: ({ campId, sessionId }) => ({ id: campId, sid: sessionId }),
+  },
+  {
+    path: "camps/[id]/sessions/[sid]/request",
+    method: "POST",
+    may: "requests.ask",
+    body: () => ({ key: randomUUID(), reason: "Exam." }),
+    params: ({ campId, sessionId }) => ({ id: campId, sid: sessionId }),
+  },
+  {
+    path: "requests/[id]/answer",
+    method: "POST",
+    may: "requests.answer",
+    body: () => ({ state: "accepted", answer: "" }),
+    params: ({ requestId }) => ({ id: requestId }),
+  },
+  {
+    path: "requests/[id]/withdraw",
+    method: "POST",
+    may: "requests.ask",
+    params: ({ requestId }) => ({ id: requestId }),
+  },
+  {
+    path: "athletes/[id]/check-ins/[date]",
+    method: "PUT",
+    may: "checkins.write",
+    body: () => ({ sleep: 2, fatigue: 3, soreness: 4, stress: 2 }),
+    params: ({ athleteId }) => ({ id: athleteId, date: "2026-12-01" }),
+  },
+  {
+    path: "athletes/[id]/weights/[date]",
+    method: "PUT",
+    may: "weight.write",
+    body: () => ({ kg: 63.2 }),
+    params: ({ athleteId }) => ({ id: athleteId, date: "2026-12-01" }),
+  },
+  {
+    path: "athletes/[id]/weights/[date]",
+    method: "DELETE",
+    may: "weight.write",
+    params: ({ athleteId }) => ({ id: athleteId, date: "2026-12-01" }),
   },
   { path: "feeds", method: "GET", may: "account.own" },
   {

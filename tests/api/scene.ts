@@ -1,6 +1,6 @@
 import { randomUUID } from "node:crypto";
-import { eq } from "drizzle-orm";
-import { feeds, holds, invites, memberships, timetableEntries } from "@/db/schema";
+import { and, eq } from "drizzle-orm";
+import { feeds, holds, invites, memberships, requests, sessions, timetableEntries } from "@/db/schema";
 import type { Database } from "@/db/client";
 import type { Role } from "@/lib/policy";
 import { createCamp } from "@/lib/services/camps/create";
@@ -53,6 +53,19 @@ export async function sceneOf(db: Database, now: Date) {
   const { id: exerciseId } = await addExercise(head, {
     body: { ...EXERCISE_FORM, name: `Rope turn ${randomUUID()}` },
   });
+  const requestId = randomUUID();
+  await db.insert(requests).values({
+    id: requestId,
+    teamId,
+    campId,
+    athleteId,
+    sessionId: "mon@2026-12-14",
+    reason: "Exam.",
+  });
+  const [session] = await db
+    .select({ id: sessions.id })
+    .from(sessions)
+    .where(and(eq(sessions.campId, campId), eq(sessions.source, "sport"), eq(sessions.day, "2026-11-30")));
   const scene: Scene = {
     athleteId,
     campId,
@@ -62,6 +75,8 @@ export async function sceneOf(db: Database, now: Date) {
     entryId,
     feedId: feed.id,
     exerciseId,
+    requestId,
+    sessionId: session?.id ?? "",
   };
   return { ...team, teamId, scene, cookie: (role: Role) => cookieOf(team.as(role).userId) };
 }

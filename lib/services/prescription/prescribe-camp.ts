@@ -1,5 +1,6 @@
 import { findAthlete, type AthleteRow } from "@/db/queries/athletes";
-import { listBests, listOverrides, listUsedExercises, type BestRow } from "@/db/queries/prescription";
+import { listExercises } from "@/db/queries/exercises";
+import { listBests, listOverrides, type BestRow } from "@/db/queries/prescription";
 import { liftsOf } from "@/db/mappers/sessions";
 import type { Tx } from "@/db/client";
 import { dayFromIso, prescribe } from "@/lib/engine";
@@ -49,7 +50,7 @@ function mixOf(campBase: string, { strikingBase, secondBase, secondShare }: Athl
   ];
 }
 
-/** Four questions for any number of camps of one athlete. */
+/** Three questions for any number of camps of one athlete. */
 export async function loadPrescriptionParts(
   tx: Tx,
   teamId: string,
@@ -57,13 +58,13 @@ export async function loadPrescriptionParts(
   campIds: readonly string[],
 ): Promise<PrescriptionParts> {
   const [exercises, bests, overrides] = await Promise.all([
-    listUsedExercises(tx, teamId),
+    listExercises(tx, teamId),
     listBests(tx, teamId, athlete.id),
     listOverrides(tx, teamId, campIds),
   ]);
   return {
     athlete,
-    exercises,
+    exercises: exercises.flatMap(({ exercise, shelved }) => (shelved ? [] : [exercise])),
     bests: bestsOf(bests),
     overrides: new Map(overrides.map(({ campId, swaps, edits }) => [campId, { swaps, edits }])),
   };
