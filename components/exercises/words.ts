@@ -9,6 +9,7 @@ import type {
   Quality,
   Range,
 } from "@/lib/engine/prescription/exercise";
+import type { ExerciseSummary } from "@/lib/schemas/exercise";
 
 export const QUALITY_WORDS: Record<Quality, string> = {
   rotation: "Rotation",
@@ -134,4 +135,17 @@ export function restText(seconds: number): string {
   const rest = seconds % 60;
   if (minutes === 0 || seconds < 90) return `${seconds} s`;
   return rest === 0 ? `${minutes} min` : `${minutes} min ${rest} s`;
+}
+
+/** Where an exercise comes from, where that is not the library as it is; "" where it is. */
+export function originText({ origin, shelved }: Pick<ExerciseSummary, "origin" | "shelved">): string {
+  const own = { library: null, team: "The team’s own", changed: "Changed by the team" }[origin];
+  return [own, shelved ? "Shelved" : null].filter(Boolean).join(", ");
+}
+
+/** "2 current camps; 14 sets in 8 weeks"; "" where it is not used. */
+export function usedText({ camps, sets }: ExerciseSummary["use"]): string {
+  const inCamps = camps === 0 ? null : camps === 1 ? "1 current camp" : `${camps} current camps`;
+  const logged = sets === 0 ? null : `${sets} ${sets === 1 ? "set" : "sets"} in 8 weeks`;
+  return [inCamps, logged].filter(Boolean).join("; ");
 }

@@ -22,6 +22,9 @@ const exerciseQuery = (id: string) =>
 export const useExercises = (initial: readonly ExerciseSummary[]) =>
   useQuery({ ...listQuery, initialData: initial });
 
+/** The same below a page that has asked for them. */
+export const useKnownExercises = (): readonly ExerciseSummary[] => useQuery(listQuery).data ?? [];
+
 /** One exercise with its history; `initial` is what the server rendered. */
 export const useExercise = (initial: ExerciseView) =>
   useQuery({ ...exerciseQuery(initial.exercise.id), initialData: initial });

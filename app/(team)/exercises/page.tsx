@@ -1,0 +1,10 @@
+import { EmptyState } from "@/components/ui/empty-state";
+
+/** Beside the list, before one is picked. */
+export default function ExercisesPage() {
+  return (
+    <EmptyState title="Pick an exercise">
+      Its cues, sets and what rules it out stand here, with what the team changed about it.
+    </EmptyState>
+  );
+}
