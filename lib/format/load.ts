@@ -9,15 +9,24 @@ import { dayText } from "./civil";
 
 export type MassUnit = "kg" | "lb";
 
-/** A mass in kilograms as a number of the unit, to one decimal. */
-export const massIn = (kg: number, unit: MassUnit): number =>
-  Math.round((unit === "lb" ? kg / KG_PER_LB : kg) * 10) / 10;
+/** Kilograms as a number of the unit, to a hundredth. */
+export const fromKg = (kg: number, unit: MassUnit): number =>
+  Math.round((unit === "lb" ? kg / KG_PER_LB : kg) * 100) / 100;
 
-/** "102.5", without its unit. */
-export const massNumber = (kg: number, unit: MassUnit): string => String(massIn(kg, unit));
+/** A number of the unit as kilograms. */
+export const toKg = (value: number, unit: MassUnit): number => (unit === "lb" ? value * KG_PER_LB : value);
 
-/** Kilograms of what was typed in the unit; exact for what `massIn` gave. */
-export const kgFrom = (value: number, unit: MassUnit): number => (unit === "lb" ? value * KG_PER_LB : value);
+/** A number as people type it, with point or comma; null where it is none. */
+export function readNumber(text: string): number | null {
+  const value = Number(text.trim().replace(",", "."));
+  return text.trim() === "" || !Number.isFinite(value) ? null : value;
+}
+
+/** "102.5", without its unit: quarters as they are, anything else to one decimal. */
+export function massNumber(kg: number, unit: MassUnit): string {
+  const value = fromKg(kg, unit);
+  return String(value % 0.25 === 0 ? value : Math.round(value * 10) / 10);
+}
 
 /** "102.5 kg", "225 lb". */
 export const massText = (kg: number, unit: MassUnit): string => `${massNumber(kg, unit)} ${unit}`;

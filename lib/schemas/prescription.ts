@@ -16,8 +16,7 @@ import type { LastTime, LogView } from "./today";
 /** What people decide about prescriptions, and what pages show of them. Kilograms on the wire. */
 
 const exerciseId = z.string().min(1, "Choose an exercise.").max(80);
-const count = (high: number) =>
-  z.int(`1 to ${high}.`).min(1, `1 to ${high}.`).max(high, `1 to ${high}.`);
+const count = (high: number) => z.int(`1 to ${high}.`).min(1, `1 to ${high}.`).max(high, `1 to ${high}.`);
 const kg = z.number("0 to 500 kg.").min(0, "0 to 500 kg.").max(500, "0 to 500 kg.");
 const note = z.string().trim().max(300, "At most 300 characters.");
 
@@ -137,6 +136,8 @@ export interface LiftView {
   readonly empty: readonly EmptySlot[];
   readonly note: string | null;
   readonly edit: EditView | null;
+  /** Why nothing of it can be changed any more, in words; null where it can. */
+  readonly closed: string | null;
   /** Every exercise that the page may name, by id. */
   readonly names: Readonly<Record<string, string>>;
   /** What a coach may choose from, by name; empty for others. */

@@ -29,7 +29,7 @@ import { readExercise, type ById } from "./read";
 type Act = "exercise.create" | "exercise.update" | "exercise.shelve" | "exercise.restore";
 
 /** A later change always carries a later time, also within one millisecond: the check for stale edits rests on it. */
-const timeAfter = (now: Date, before: Date | null): Date =>
+export const timeAfter = (now: Date, before: Date | null): Date =>
   before && before >= now ? new Date(before.getTime() + 1) : now;
 
 interface Write {

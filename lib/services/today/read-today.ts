@@ -19,7 +19,7 @@ import { weightViewOf, weightsFrom } from "./weight-view";
 /** Days ahead that the phone keeps. */
 const AHEAD_DAYS = 7;
 /** Older figures say nothing of the next session; days. */
-const LAST_TIME_DAYS = 120;
+export const LAST_TIME_DAYS = 120;
 
 const checkInOf = ({ sleep, fatigue, soreness, stress }: CheckInRow): CheckIn => ({
   sleep,
