@@ -58,12 +58,13 @@ function sum(terms: readonly string[]): string {
 
 /**
  * The problem as a mixed-integer program in LP format, written from the value's own words and sharing nothing with the solver.
+ * `whole` keeps also the candidates that a look at the value shows to be beaten: what a solver without that look is given.
  * `x`: candidate chosen; `u`: item left out; `z`: both days of a pair have a lift; `r`: lifting takes all free days of a week.
  */
-export function milpOf(problem: PlacementProblem): string {
+export function milpOf(problem: PlacementProblem, { whole = false } = {}): string {
   const { items, candidates, spread, weekly } = problem;
   const apart = keptApart(problem);
-  const used = needed(problem, apart);
+  const used = whole ? candidates.map((_, index) => index) : needed(problem, apart);
   const isUsed = new Set(used);
   const byItem = new Map<number, number[]>(items.map((_, item) => [item, []]));
   const byDay = new Map<number, number[]>();

@@ -23,11 +23,15 @@ export function joined(one: readonly Ban[], other: readonly Ban[]): readonly Ban
   return [...left, ...right];
 }
 
+/** Two numbers of memories as one: there are far fewer than 2^26 of them. */
+const pairOf = (memory: number, other: number): number => memory * 2 ** 26 + other;
+
 /** What lifts chosen so far forbid, by number: 0 forbids nothing. Equal bans have equal numbers. */
 export class Memories {
   readonly #bans: (readonly Ban[])[] = [NO_BANS];
   readonly #ids = new Map<string, number>([["", 0]]);
-  readonly #joins = new Map<string, number>();
+  /** By both numbers in one, see `pairOf`. */
+  readonly #joins = new Map<number, number>();
 
   idOf(bans: readonly Ban[]): number {
     if (bans.length === 0) return 0;
@@ -49,7 +53,7 @@ export class Memories {
   join(memory: number, other: number): number {
     if (other === 0 || memory === other) return memory;
     if (memory === 0) return other;
-    const key = `${memory},${other}`;
+    const key = pairOf(memory, other);
     const known = this.#joins.get(key);
     if (known !== undefined) return known;
     const id = this.idOf(joined(this.bansOf(memory), this.bansOf(other)));

@@ -11,6 +11,7 @@ export class Layer {
   /** Way up to the day before; after `settle` up to this day. */
   readonly way: number[] = [];
   readonly #chosen: number[] = [];
+  readonly #lists = [this.key, this.memory, this.cost, this.starts, this.way, this.#chosen];
   /** Position + 1 by state, 0 for none. Memories are numbered anew in each layer, which keeps it small. */
   #table = new Int32Array(0);
   readonly #localOf: number[] = [];
@@ -66,11 +67,7 @@ export class Layer {
   }
 
   clear(): void {
-    for (const list of this.#lists()) list.length = 0;
-  }
-
-  #lists(): number[][] {
-    return [this.key, this.memory, this.cost, this.starts, this.way, this.#chosen];
+    for (const list of this.#lists) list.length = 0;
   }
 
   /** Without states that cost no less than one of the same key that forbids no more: however it goes on, that is better. */
@@ -97,7 +94,7 @@ export class Layer {
       if (!beaten) kept.push(at);
     }
     if (kept.length === key.length) return;
-    for (const list of this.#lists()) {
+    for (const list of this.#lists) {
       const values = kept.map((at) => list[at] ?? 0);
       list.length = 0;
       for (const value of values) list.push(value);

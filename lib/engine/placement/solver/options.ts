@@ -60,17 +60,23 @@ export function optionsByDay(
   const sift = (group: Group, day: number): { loose: Option | null; tied: readonly number[] } => {
     const { item, members } = group;
     const touching = reaches.filter((reach) => reach.touches(group, day));
-    let [best, bestCost, bestStart] = [-1, Number.POSITIVE_INFINITY, Number.POSITIVE_INFINITY];
+    let best = -1;
+    let bestCost = Number.POSITIVE_INFINITY;
+    let bestStart = Number.POSITIVE_INFINITY;
     const tied: number[] = [];
     for (const index of members) {
-      if (touching.some((reach) => reach.touchesAt(index, item, day))) {
+      let isTied = false;
+      for (const reach of touching) isTied ||= reach.touchesAt(index, item, day);
+      if (isTied) {
         tied.push(index);
         continue;
       }
       const cost = problem.candidates[index]?.cost ?? 0;
       const start = starts[index] ?? 0;
       if (cost > bestCost || (cost === bestCost && start >= bestStart)) continue;
-      [best, bestCost, bestStart] = [index, cost, start];
+      best = index;
+      bestCost = cost;
+      bestStart = start;
     }
     return { loose: best < 0 ? null : optionAt(best, item, NO_BANS), tied };
   };

@@ -62,6 +62,15 @@ export function search(
       next.offer((bits & ~day.closingBits) * window + recent, memory, points, starts, way, chosen);
     };
     const forbids = day.options.map((option) => memories.idOf(option.bans));
+    // Many states share a memory: what is left of it is asked once a day.
+    const heldOf = new Map<number, number>();
+    const heldIn = (memory: number): number => {
+      const known = heldOf.get(memory);
+      if (known !== undefined) return known;
+      const held = memories.without(memory, spent);
+      heldOf.set(memory, held);
+      return held;
+    };
     for (let at = 0; at < layer.key.length; at++) {
       const key = layer.key[at] ?? 0;
       const memory = layer.memory[at] ?? 0;
@@ -71,7 +80,7 @@ export function search(
       const recent = key & (window - 1);
       const bits = (key - recent) / window;
       const older = (recent << 1) & (window - 1);
-      const held = memory === 0 ? 0 : memories.without(memory, spent);
+      const held = memory === 0 ? 0 : heldIn(memory);
       offer(bits | day.freeBits, older, held, cost, starts, way, -1);
       const near = spreadCost[recent] ?? 0;
       for (let n = 0; n < day.options.length; n++) {
