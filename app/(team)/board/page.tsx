@@ -12,7 +12,7 @@ export const metadata: Metadata = { title: "Board" };
 
 export default async function Page() {
   const ctx = await pageContext();
-  if (!isStaff(ctx.member.role)) redirect("/camps");
+  if (!isStaff(ctx.member.role)) redirect(ctx.member.role === "athlete" ? "/today" : "/camps");
   const { camps } = await listCampSummaries(ctx);
   const creates = can(ctx.member, "camps.create");
   return (

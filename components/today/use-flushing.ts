@@ -1,0 +1,74 @@
+"use client";
+
+import { useQueryClient } from "@tanstack/react-query";
+import { useCallback, useEffect, useState } from "react";
+import { keepView } from "@/lib/offline/device";
+import { flush, type Round } from "@/lib/offline/flush";
+import { settled } from "@/lib/offline/overlay";
+import type { Queue } from "@/lib/offline/queue";
+import type { QueueStore } from "@/lib/offline/queue-store";
+import { deliver, todayQuery } from "@/lib/query/today";
+
+/** How often is tried while something waits, milliseconds. */
+const RETRY_MS = 20_000;
+/** Changes in quick succession (a stepper) go out as one, milliseconds. */
+const GATHER_MS = 400;
+
+/** Runs `work` in one tab at a time; where another is at it, not at all. */
+async function alone(name: string, work: () => Promise<Round>): Promise<Round | null> {
+  if (!("locks" in navigator)) return work();
+  return navigator.locks.request(name, { ifAvailable: true }, (lock) => (lock ? work() : null));
+}
+
+/** Sends what waits whenever there is reason to hope; gives back how the last round ended. */
+export function useFlushing(store: QueueStore, queue: Queue): Round | null {
+  const client = useQueryClient();
+  const [round, setRound] = useState<Round | null>(null);
+
+  const run = useCallback(async () => {
+    // The browser is sure that there is no net: nothing is tried, so nothing is in doubt.
+    if (!navigator.onLine) return;
+    const { userId } = store;
+    const { queryKey } = todayQuery(userId);
+    let any = false;
+    const result = await alone(`bellward-send:${userId}`, () =>
+      flush(store, {
+        send: deliver,
+        onSent: async (entry, version) => {
+          any = true;
+          // A read that began before this write must not undo it on the screen.
+          await client.cancelQueries({ queryKey });
+          const view = client.setQueryData(queryKey, (shown) => shown && settled(shown, entry, version));
+          if (view) await keepView(userId, view);
+        },
+      }),
+    );
+    if (result) setRound(result);
+    if (any) await client.invalidateQueries({ queryKey });
+  }, [client, store]);
+
+  // Each new write starts the gathering anew; marks on an entry do not.
+  const waiting = queue.flatMap(({ key, stuck }) => (stuck === null ? [key] : [])).join();
+  useEffect(() => {
+    if (waiting === "") return;
+    const soon = setTimeout(() => void run(), GATHER_MS);
+    const retry = setInterval(() => void run(), RETRY_MS);
+    return () => {
+      clearTimeout(soon);
+      clearInterval(retry);
+    };
+  }, [waiting, run]);
+
+  useEffect(() => {
+    const hope = (): void => {
+      if (document.visibilityState === "visible") void run();
+    };
+    window.addEventListener("online", hope);
+    document.addEventListener("visibilitychange", hope);
+    return () => {
+      window.removeEventListener("online", hope);
+      document.removeEventListener("visibilitychange", hope);
+    };
+  }, [run]);
+  return round;
+}
