@@ -1,4 +1,3 @@
-import path from "node:path";
 import { build } from "esbuild";
 import { figures, round } from "./measure";
 import { openBrowser } from "./browser";
@@ -6,12 +5,12 @@ import { openBrowser } from "./browser";
 /** Times previews of a moved hard sparring day in Chromium: the same code as the camp page, bundled for the browser. */
 export async function benchPreview() {
   const bundle = await build({
-    entryPoints: [path.join(import.meta.dirname, "preview-page.ts")],
+    entryPoints: ["tests/bench/preview-page.ts"],
     bundle: true,
     write: false,
     format: "iife",
     minify: true,
-    alias: { "@": path.resolve(import.meta.dirname, "../..") },
+    logLevel: "error",
   });
   const browser = await openBrowser();
   const page = await browser.newPage();
