@@ -1,6 +1,7 @@
 import { randomUUID } from "node:crypto";
 import type { Action } from "@/lib/policy";
 import type { ExerciseForm } from "@/lib/schemas/exercise";
+import type { BestForm } from "@/lib/schemas/prescription";
 import type { SessionLog } from "@/lib/schemas/today";
 import { campForm } from "../factories/camp-book";
 import type { Call } from "./client";
@@ -19,6 +20,9 @@ export interface Scene {
   readonly requestId: string;
   /** A session of the camp that can be logged. */
   readonly sessionId: string;
+  /** A lifting session that is still to come. */
+  readonly liftId: string;
+  readonly bestId: string;
 }
 
 export interface RouteRow {
@@ -47,12 +51,27 @@ export const PROFILE = {
   name: "Ilse Marrow",
   sport: "Boxing",
   dateOfBirth: null,
+  secondBase: null,
+  secondShare: null,
   limitations: "",
+  limitationCodes: [],
+  equipment: ["barbell", "rack"],
+  plateUnit: "kg",
+  plateStep: 2.5,
   trainingAge: "novice",
   strikingBase: "boxing",
   liftsPerWeek: 2,
   freeHours: [{ weekday: 1, from: "10:00", to: "24:00" }],
 } as const;
+
+/** An invented rep record. */
+export const BEST = {
+  exerciseId: "back-squat",
+  day: "2026-11-03",
+  kg: 110,
+  reps: 4,
+  formula: "epley",
+} satisfies BestForm;
 
 /** What a form says of an exercise; the sets and repetitions are invented. */
 export const EXERCISE_FORM = {
@@ -99,6 +118,16 @@ export const LOG = {
   note: "",
   sets: [],
 } as const satisfies SessionLog;
+
+export const TRIAL = {
+  kind: "jump-height",
+  side: "both",
+  day: "2026-11-20",
+  value: 38.5,
+  second: null,
+  massKg: 80,
+  note: "",
+} as const;
 
 /** Every route for members of a team. */
 export const TEAM_ROUTES: readonly RouteRow[] = [
@@ -171,6 +200,39 @@ export const TEAM_ROUTES: readonly RouteRow[] = [
     method: "POST",
     may: "holds.write",
     params: ({ holdId }) => ({ id: holdId }),
+  },
+  {
+    path: "athletes/[id]/tests",
+    method: "GET",
+    may: "tests.read",
+    params: ({ athleteId }) => ({ id: athleteId }),
+  },
+  {
+    path: "athletes/[id]/tests",
+    method: "POST",
+    may: "tests.write",
+    body: () => TRIAL,
+    params: ({ athleteId }) => ({ id: athleteId }),
+  },
+  {
+    path: "athletes/[id]/tests/upload",
+    method: "POST",
+    may: "tests.write",
+    body: () => ({ uploadId: randomUUID(), rows: [TRIAL] }),
+    params: ({ athleteId }) => ({ id: athleteId }),
+  },
+  { path: "tests/[id]", method: "DELETE", may: "tests.write", params: ({ trialId }) => ({ id: trialId }) },
+  {
+    path: "tests/[id]/restore",
+    method: "POST",
+    may: "tests.write",
+    params: ({ trialId }) => ({ id: trialId }),
+  },
+  {
+    path: "test-uploads/[id]",
+    method: "DELETE",
+    may: "tests.write",
+    params: ({ uploadId }) => ({ id: uploadId }),
   },
   { path: "house-rules", method: "GET", may: "rules.read" },
   {
@@ -255,6 +317,52 @@ export const TEAM_ROUTES: readonly RouteRow[] = [
     may: "camps.bout",
     body: () => CHANGE,
     params: ({ campId }) => ({ id: campId }),
+  },
+  {
+    path: "camps/[id]/sessions/[sid]",
+    method: "GET",
+    may: "camps.read",
+    params: ({ campId, liftId }) => ({ id: campId, sid: liftId }),
+  },
+  {
+    path: "camps/[id]/sessions/[sid]/edit",
+    method: "PUT",
+    may: "prescription.write",
+    body: () => ({ base: null, edit: { lines: {}, note: "Slow and clean." } }),
+    params: ({ campId, liftId }) => ({ id: campId, sid: liftId }),
+  },
+  {
+    path: "camps/[id]/swaps",
+    method: "POST",
+    may: "prescription.swap",
+    body: () => ({ item: "strength-a", from: "back-squat", to: "front-squat" }),
+    params: ({ campId }) => ({ id: campId }),
+  },
+  {
+    path: "camps/[id]/swaps",
+    method: "DELETE",
+    may: "prescription.swap",
+    body: () => ({ item: "strength-a", from: "back-squat" }),
+    params: ({ campId }) => ({ id: campId }),
+  },
+  {
+    path: "athletes/[id]/bests",
+    method: "GET",
+    may: "tests.read",
+    params: ({ athleteId }) => ({ id: athleteId }),
+  },
+  {
+    path: "athletes/[id]/bests",
+    method: "POST",
+    may: "bests.write",
+    body: () => BEST,
+    params: ({ athleteId }) => ({ id: athleteId }),
+  },
+  {
+    path: "bests/[id]",
+    method: "DELETE",
+    may: "bests.write",
+    params: ({ bestId }) => ({ id: bestId }),
   },
   { path: "today", method: "GET", may: null },
   {

@@ -1,14 +1,15 @@
 import { randomUUID } from "node:crypto";
-import { and, eq } from "drizzle-orm";
+import { and, asc, eq, gt } from "drizzle-orm";
 import { feeds, holds, invites, memberships, requests, sessions, timetableEntries } from "@/db/schema";
 import type { Database } from "@/db/client";
 import type { Role } from "@/lib/policy";
 import { createCamp } from "@/lib/services/camps/create";
 import { addExercise } from "@/lib/services/exercises/save";
+import { addBest } from "@/lib/services/prescription/bests";
 import { campForm } from "../factories/camp-book";
 import { teamWithEveryRole } from "../factories/team";
 import { cookieOf } from "./client";
-import { EXERCISE_FORM, SESSION, type Scene } from "./routes";
+import { BEST, EXERCISE_FORM, SESSION, TRIAL, type Scene } from "./routes";
 
 const only = <T>([row]: readonly T[]): T => {
   if (row === undefined) throw new Error("no row");
@@ -66,6 +67,19 @@ export async function sceneOf(db: Database, now: Date) {
     .select({ id: sessions.id })
     .from(sessions)
     .where(and(eq(sessions.campId, campId), eq(sessions.source, "sport"), eq(sessions.day, "2026-11-30")));
+  const lifts = await db
+    .select({ id: sessions.id })
+    .from(sessions)
+    .where(and(eq(sessions.campId, campId), eq(sessions.source, "lift"), gt(sessions.startsAt, now)))
+    .orderBy(asc(sessions.startsAt));
+  const best = await addBest(head, { params: { id: athleteId }, body: BEST });
+  const uploadId = randomUUID();
+  const trial = only(
+    await db
+      .insert(testTrials)
+      .values({ ...TRIAL, teamId, athleteId, uploadId })
+      .returning(),
+  );
   const scene: Scene = {
     athleteId,
     campId,
@@ -77,6 +91,8 @@ export async function sceneOf(db: Database, now: Date) {
     exerciseId,
     requestId,
     sessionId: session?.id ?? "",
+    liftId: only(lifts).id,
+    bestId: best.id,
   };
   return { ...team, teamId, scene, cookie: (role: Role) => cookieOf(team.as(role).userId) };
 }
