@@ -226,6 +226,19 @@ export const KNEE_DOMINANT = [
   ),
   ...ladder(
     entry({
+      id: "shallow-wall-sit",
+      name: "Wall sit, shallow",
+      qualities: ["knee-dominant"],
+      intent: "held",
+      doses: { hold: of([3, 3], [30, 60]) },
+      rest: 60,
+      cues: [
+        "Back flat on the wall, knees only a little bent",
+        "Lower by a hand's width when it is easy",
+        "Nothing in the knee but work",
+      ],
+    }),
+    entry({
       id: "band-braced-squat-hold",
       name: "Squat hold leaning into a band",
       qualities: ["knee-dominant"],

@@ -71,6 +71,19 @@ export const PULL = [
   ),
   ...ladder(
     entry({
+      id: "face-down-blade-squeeze",
+      name: "Face-down shoulder-blade squeeze",
+      qualities: ["pull"],
+      doses: { volume: of([2, 3], [10, 15]) },
+      rest: 45,
+      ruledOutBy: ["rib"],
+      cues: [
+        "On the belly, arms bent at the sides",
+        "Lift the elbows by drawing the blades together",
+        "Hold two counts, lower slowly",
+      ],
+    }),
+    entry({
       id: "band-row",
       name: "Band row",
       qualities: ["pull"],
