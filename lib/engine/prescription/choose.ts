@@ -42,6 +42,9 @@ const POOL = { stays: 2, rotates: 4 } as const;
 /** Turns before the order of qualities begins anew. */
 const TURNS = 12;
 
+/** Percent of best up to which a fast lift is light: where the zone of jump squats ends (Soriano et al. 2015). */
+const LIGHT = 30;
+
 export const isEarly = (phase: Phase): boolean => phase === "foundation" || phase === "strength";
 
 /** Everything it needs is there, and nothing rules it out. */
@@ -59,8 +62,9 @@ export function isAllowed(
 /** The first tier of a slot that the exercise fits, and the aim it has there; null where its main quality is not wanted. */
 export function fitOf(slot: Slot, exercise: Exercise): { readonly tier: number; readonly aim: Aim } | null {
   if (slot.wanted[exercise.qualities[0]] === undefined) return null;
-  for (const [tier, { aims, main }] of slot.tiers.entries()) {
+  for (const [tier, { aims, main, light }] of slot.tiers.entries()) {
     if (main && !exercise.main) continue;
+    if (light && (exercise.powerZone?.low ?? 0) > LIGHT) continue;
     const aim = aims.find((name) => exercise.doses[name] !== undefined);
     if (aim) return { tier, aim };
   }
@@ -84,11 +88,11 @@ function timely(slot: Slot, { qualities, intent }: Exercise, aim: Aim, early: bo
   return (early ? still : fast) ? TIMELY : 1;
 }
 
-/** Loaded fast lifts: those whose zone of most power meets the session's percent come first. */
-function zoned(slot: Slot, { powerZone, load }: Exercise, light: number): number {
-  if (slot.id !== "ballistic-lower") return 1;
-  if (powerZone) return powerZone.low <= light ? 2 : 1.3;
-  return load === "body" ? 0.8 : 1;
+/** A fast lift against a load is loaded, and a jump is not, where there is a choice. */
+function loaded({ id }: Slot, { powerZone, load }: Exercise): number {
+  if (id === "ballistic-lower") return powerZone ? 2 : load === "body" ? 0.8 : 1;
+  if (id === "jump") return load === "body" ? 1 : 0.5;
+  return 1;
 }
 
 function scoreOf(slot: Slot, exercise: Exercise, aim: Aim, weights: Weights, early: boolean): number {
@@ -99,8 +103,7 @@ function scoreOf(slot: Slot, exercise: Exercise, aim: Aim, weights: Weights, ear
     score += wanted(quality) * (index === 0 ? 1 : SECOND) + BASE_BONUS * weights[quality];
   }
   const said = slot.work === "heavy" && exercise.load === "best" ? SAYS_LOAD : 1;
-  // 30 % of best: where ballistic work of the engine's menu ends.
-  return score * said * timely(slot, exercise, aim, early) * zoned(slot, exercise, 30);
+  return score * said * timely(slot, exercise, aim, early) * loaded(slot, exercise);
 }
 
 const byRank = (a: Candidate, b: Candidate): number =>
@@ -144,36 +147,41 @@ export interface Moment {
 
 /**
  * Candidates in the order in which this session would take them: those near the best score of the first tier in turns (main lifts by
- * block, others by camp week), then the rest by rank. What the session already uses is left out.
+ * block, others by camp week), then the rest by rank. What the session already uses is left out. Lazy: mostly the first is taken.
  */
-export function inTurn(
+export function* inTurn(
   slot: Slot,
   candidates: readonly Candidate[],
   turns: readonly Quality[],
   place: number,
   moment: Moment,
-): readonly Candidate[] {
+): Generator<Candidate> {
   const { week, shift, block, used, usedQualities, known } = moment;
   // 5 and 7 share no factor with a turn of 12: qualities and exercises drift against each other.
   const turn = turns.length > 0 ? turns[(week * 5 + shift * 7 + place) % turns.length] : undefined;
   const open = candidates.filter(({ exercise }) => !used.has(exercise.id));
   const first = open[0]?.tier;
-  const scored = open
-    .filter(({ tier }) => tier === first)
-    .map((candidate): Candidate => {
-      const quality = candidate.exercise.qualities[0];
-      const factor =
-        (quality === turn ? TURN : 1) *
-        (slot.byBase && !slot.stays && usedQualities.has(quality) ? AGAIN : 1) *
-        (slot.stays && known(candidate.exercise) ? SAYS_LOAD : 1);
-      return factor === 1 ? candidate : { ...candidate, score: candidate.score * factor };
-    })
-    .sort(byRank);
-  const most = scored[0]?.score ?? 0;
-  const near = scored
-    .filter(({ score }) => score >= (slot.stays ? NEAR.stays : NEAR.rotates) * most)
-    .slice(0, slot.stays ? POOL.stays : POOL.rotates);
-  const start = near.length > 0 ? (slot.stays ? block.index : week + shift) % near.length : 0;
-  const rest = [...scored.slice(near.length), ...open.filter(({ tier }) => tier !== first)];
-  return [...near.slice(start), ...near.slice(0, start), ...rest];
+  const scoreOfTurn = ({ exercise, score, tier }: Candidate): number => {
+    if (tier !== first) return 0;
+    const quality = exercise.qualities[0];
+    return (
+      score *
+      (quality === turn ? TURN : 1) *
+      (slot.byBase && !slot.stays && usedQualities.has(quality) ? AGAIN : 1) *
+      (slot.stays && known(exercise) ? SAYS_LOAD : 1)
+    );
+  };
+  const scores = open.map(scoreOfTurn);
+  const least = (slot.stays ? NEAR.stays : NEAR.rotates) * Math.max(0, ...scores);
+  const near: Candidate[] = [];
+  for (const [index, candidate] of open.entries()) {
+    const score = scores[index] ?? 0;
+    if (candidate.tier === first && score >= least) near.push({ ...candidate, score });
+  }
+  const pool = near.sort(byRank).slice(0, slot.stays ? POOL.stays : POOL.rotates);
+  const start = pool.length > 0 ? (slot.stays ? block.index : week + shift) % pool.length : 0;
+  yield* pool.slice(start);
+  yield* pool.slice(0, start);
+  const taken = new Set(pool.map(({ exercise }) => exercise));
+  for (const candidate of open) if (!taken.has(candidate.exercise)) yield candidate;
 }

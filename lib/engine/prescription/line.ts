@@ -58,9 +58,14 @@ function choiceReasons(
   return list;
 }
 
-function loadReason(load: LineLoad, { plates }: LineContext): Reason[] {
-  if (load.of === "reserve") {
-    return [{ rule: "reserve", text: "No percent of a best here: the load leaves this many in reserve." }];
+function loadReason(
+  load: LineLoad,
+  exercise: Exercise,
+  known: Best | null,
+  { plates }: LineContext,
+): Reason[] {
+  if (exercise.load === "best" && !known) {
+    return [{ rule: "no-best", text: "No best of this lift is known yet, so no kilograms are said." }];
   }
   if (load.of !== "best") return [];
   const { best, percent, kg } = load;
@@ -142,7 +147,7 @@ export function lineOf(
     reasons: [
       ...choiceReasons(filled, context.mix),
       ...(dosed ? doseReasons(lift, aim, sets, reps) : []),
-      ...(edit?.kg === undefined ? loadReason(load, context) : []),
+      ...(edit?.kg === undefined ? loadReason(load, exercise, best, context) : []),
     ],
     edited,
     note: edit?.note ?? null,

@@ -10,6 +10,9 @@ const VOLUME_RESERVE: Range = { low: 2, high: 3 };
 /** Reserve of fast work whose load no best gives: far from failure, and no more than can be judged. */
 const FAST_RESERVE: Range = { low: MOST_RESERVE, high: MOST_RESERVE };
 
+/** Heavy sets stop this many short of failure: common practice, no published source. */
+const HEAVY_LEAVES = 1;
+
 /** Fast repetitions of one exercise before a bout, at most: common practice; the effect in Harrison et al. 2019. */
 const PRIMER_REPS = 12;
 
@@ -40,10 +43,10 @@ export const heavySets = ({ total, repsPerSet }: LiftCount): Range => ({
 });
 
 /**
- * Repetitions a set of heavy work: those that bring the total nearest the table's optimum and inside its range. The exercise's own range
- * gives way where the two do not meet.
+ * Repetitions a set of heavy work: those that bring the total nearest the table's optimum and inside its range. At most `most`, and
+ * within the exercise's own range, where the table can be met that way.
  */
-export function heavyReps(row: LiftCount, sets: number, own: Range): number {
+export function heavyReps(row: LiftCount, sets: number, own: Range, most = Infinity): number {
   const inside = (reps: number) => sets * reps >= row.total.low && sets * reps <= row.total.high;
   const nearest = ({ low, high }: Range): number | null => {
     let best: number | null = null;
@@ -54,7 +57,9 @@ export function heavyReps(row: LiftCount, sets: number, own: Range): number {
     }
     return best;
   };
-  return nearest(repsChoices(row, own)) ?? nearest(row.repsPerSet) ?? row.repsPerSet.high;
+  const choices = repsChoices(row, own);
+  const short = { low: choices.low, high: Math.min(choices.high, most) };
+  return nearest(short) ?? nearest(choices) ?? nearest(row.repsPerSet) ?? row.repsPerSet.high;
 }
 
 /** Repetitions of a line, or seconds of a hold. */
@@ -73,18 +78,16 @@ export function repsOf(
   if (aim !== "heavy") return own;
   const row = heavyRow(intensity);
   if (!row) return own;
-  const reps = heavyReps(row, sets, own);
+  const reps = heavyReps(row, sets, own, repsAtPercent(intensity.high) - HEAVY_LEAVES);
   return { low: reps, high: reps };
 }
 
 const capped = (reserve: number): number => Math.min(MOST_RESERVE, Math.max(0, reserve));
 
-/** Reserve that a percent range leaves for so many repetitions, by the wall chart; at most what can be judged. */
+/** Reserve that a percent range leaves for so many repetitions, by the wall chart: never none, at most what can be judged. */
 export function reserveAt(percent: Range, reps: Range): Range {
-  return {
-    low: capped(repsAtPercent(percent.high) - reps.high),
-    high: capped(repsAtPercent(percent.low) - reps.low),
-  };
+  const left = (at: number, count: number) => capped(Math.max(HEAVY_LEAVES, repsAtPercent(at) - count));
+  return { low: left(percent.high, reps.high), high: left(percent.low, reps.low) };
 }
 
 /** Percent at which the repetitions leave the reserve, by the wall chart and under the session's own high end. */

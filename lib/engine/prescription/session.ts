@@ -94,7 +94,7 @@ class Session {
 /** Sets that are still worth doing for something other than heavy work: common practice, no published source. */
 const LEAST = 2;
 
-function claimOf({ slot, exercise, aim }: Filled, share: number, lift: Lift, kept: boolean): Claim {
+function claimOf({ exercise, aim }: Filled, share: number, lift: Lift, kept: boolean): Claim {
   const own = exercise.doses[aim]?.sets ?? { low: 1, high: 1 };
   const row = aim === "heavy" ? heavyRow(lift.intensity) : null;
   if (!row) {
@@ -172,12 +172,20 @@ export function prescribeLift(lift: Lift, library: Library, block: Block): Presc
     }
     return { ...line, alternatives };
   });
+  // A slot whose only exercise went to another that then stayed closed is short of sets, not of exercises.
+  const choice = (id: string): boolean => {
+    const slot = slotsOf(lift.item).find((one) => one.id === id);
+    if (!slot) return false;
+    return library
+      .ranked(lift.item, slot, early)
+      .candidates.some(({ exercise }) => !inSession.has(exercise.id));
+  };
   const worked = rows.map(({ one, sets: count }) => ({ exercise: one.exercise, sets: count }));
   return {
     id: lift.id,
     warmUp: warmUpLines(lift, worked, edits, library),
     lines,
-    empty,
+    empty: empty.filter(({ slot }) => !choice(slot)),
     note: edit?.note ?? null,
   };
 }

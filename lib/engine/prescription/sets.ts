@@ -42,6 +42,12 @@ function opened(total: number, claims: readonly Claim[]): number[] {
     sets[index] = low;
     free -= low;
   });
+  // A few sets over are worth another exercise more than a fourth and fifth set of the ones before.
+  claims.forEach((claim, index) => {
+    if ((sets[index] ?? 0) > 0 || claim.least > free) return;
+    sets[index] = claim.least;
+    free -= claim.least;
+  });
   const first = claims[0];
   // Fewer sets than any claim wants: the first takes them.
   if (first && free === total) sets[0] = Math.min(total, first.most);

@@ -5,10 +5,14 @@ import type { Aim, Quality } from "./exercise";
 export const WORK = ["warm-up", "fast", "heavy", "accessory", "trunk"] as const;
 export type Work = (typeof WORK)[number];
 
-/** A way to fill a slot: what the sets are for; `main` asks for a main lift. */
+/**
+ * A way to fill a slot: what the sets are for; `main` asks for a main lift, `light` leaves out fast lifts whose zone of most power
+ * begins above that of jump squats.
+ */
 export interface Tier {
   readonly aims: readonly Aim[];
   readonly main?: true;
+  readonly light?: true;
 }
 
 /** A place in a session. */
@@ -38,7 +42,8 @@ const HEAVY: readonly Tier[] = [{ aims: ["heavy"], main: true }, { aims: ["heavy
 const VOLUME: readonly Tier[] = [{ aims: ["volume"] }, { aims: ["heavy"] }, { aims: ["hold"] }];
 const TRUNK: readonly Tier[] = [{ aims: ["hold", "volume"] }, { aims: ["heavy"] }];
 const TRUNK_LATE: readonly Tier[] = [{ aims: ["fast", "hold", "volume"] }, { aims: ["heavy"] }];
-const FAST: readonly Tier[] = [{ aims: ["fast"] }];
+const FAST_LIGHT: readonly Tier[] = [{ aims: ["fast"], light: true }];
+const FAST: readonly Tier[] = [...FAST_LIGHT, { aims: ["fast"] }];
 
 const TRUNK_QUALITIES = { rotation: 1, "anti-rotation": 1, "trunk-flexion": 1, "lateral-trunk": 1 } as const;
 
@@ -96,7 +101,7 @@ const ballisticLower = (share: number): Slot =>
     share,
   });
 
-const jump = (share: number): Slot =>
+const jump = (share: number, over: Partial<Slot> = {}): Slot =>
   slot({
     id: "jump",
     purpose: "Jumps",
@@ -104,6 +109,7 @@ const jump = (share: number): Slot =>
     wanted: { jump: 1, "calf-and-foot": 0.4, "knee-dominant": 0.3, "posterior-chain": 0.3 },
     tiers: FAST,
     share,
+    ...over,
   });
 
 const rotationalThrow = (share: number, over: Partial<Slot> = {}): Slot =>
@@ -237,7 +243,12 @@ const SLOTS: Readonly<Record<Item, readonly Slot[]>> = {
     trunk(1, 3, { tiers: TRUNK_LATE, extra: true }),
   ],
   "power-short": [ballisticLower(3), jump(3), rotationalThrow(2), fastUpper(2, { extra: true })],
-  primer: [jump(2), rotationalThrow(2), fastUpper(2)],
+  // Ballistic and fast work only, far from failure: it wakes up, it does not tire.
+  primer: [
+    jump(2, { tiers: FAST_LIGHT }),
+    rotationalThrow(2, { tiers: FAST_LIGHT }),
+    fastUpper(2, { tiers: FAST_LIGHT }),
+  ],
 };
 
 /** Places of a session of this item, most important first. */

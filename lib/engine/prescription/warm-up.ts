@@ -21,7 +21,7 @@ const BASE_PART = 0.15;
 /** A place already opened. */
 const AGAIN = 0.4;
 /** Within this share of the best, exercises take turns by camp week. */
-const NEAR = 0.75;
+const NEAR = 0.6;
 
 /** How much of the session's work is of each quality, 0 to 1. */
 function demandOf(
@@ -50,26 +50,25 @@ export function warmUpOf(
   const picked: Exercise[] = [];
   const number = lift.sets <= SHORT ? FEW : MANY;
   for (let place = 0; place < number; place += 1) {
-    const scored = mobility
-      .filter((exercise) => !picked.includes(exercise))
-      .map((exercise) => {
-        const places = exercise.qualities.filter((quality) => quality !== "mobility");
-        const worth = places.reduce(
-          (sum, quality) =>
-            sum +
-            ((demand.get(quality) ?? 0) + BASE_PART * weights[quality]) * (open.has(quality) ? AGAIN : 1),
-          BASE_PART,
-        );
-        const stretch = STRETCH[exercise.stretch ?? "active"][lift.explosive ? "fast" : "other"];
-        return { exercise, score: (worth / Math.max(1, places.length)) * stretch };
-      })
-      .sort((a, b) => b.score - a.score || (a.exercise.id < b.exercise.id ? -1 : 1));
-    const most = scored[0]?.score ?? 0;
-    const near = scored.filter(({ score }) => score >= NEAR * most);
-    const next = near[lift.week % Math.max(1, near.length)];
+    const scores = mobility.map((exercise) => {
+      if (picked.includes(exercise)) return 0;
+      let worth = 0;
+      let places = 0;
+      for (const quality of exercise.qualities) {
+        if (quality === "mobility") continue;
+        places += 1;
+        worth +=
+          ((demand.get(quality) ?? 0) + BASE_PART * weights[quality]) * (open.has(quality) ? AGAIN : 1);
+      }
+      const stretch = STRETCH[exercise.stretch ?? "active"][lift.explosive ? "fast" : "other"];
+      return ((BASE_PART + worth) / Math.max(1, places)) * stretch;
+    });
+    const least = NEAR * Math.max(0, ...scores);
+    const near = mobility.filter((_, index) => (scores[index] ?? 0) > 0 && (scores[index] ?? 0) >= least);
+    const next = near[(lift.week + place) % Math.max(1, near.length)];
     if (!next) break;
-    picked.push(next.exercise);
-    for (const quality of next.exercise.qualities) open.add(quality);
+    picked.push(next);
+    for (const quality of next.qualities) open.add(quality);
   }
   return picked.flatMap((exercise, index): Filled[] => {
     const aim = (["hold", "volume", "fast"] as const).find((name) => exercise.doses[name] !== undefined);
