@@ -1,6 +1,15 @@
 import { randomUUID } from "node:crypto";
 import { and, asc, eq, gt } from "drizzle-orm";
-import { feeds, holds, invites, memberships, requests, sessions, timetableEntries } from "@/db/schema";
+import {
+  feeds,
+  holds,
+  invites,
+  memberships,
+  requests,
+  sessions,
+  testTrials,
+  timetableEntries,
+} from "@/db/schema";
 import type { Database } from "@/db/client";
 import type { Role } from "@/lib/policy";
 import { createCamp } from "@/lib/services/camps/create";
