@@ -3,6 +3,7 @@
 import { useAthlete } from "@/lib/query/athletes";
 import type { AthleteView } from "@/lib/schemas/athlete";
 import { HoldsPanel } from "./holds-panel";
+import { LimitationsPanel } from "./limitations-panel";
 import { ProfilePanel } from "./profile-panel";
 
 interface AthletePageProps {
@@ -17,7 +18,10 @@ export function AthletePage({ initial, today, may }: AthletePageProps) {
   return (
     <div className="grid items-start gap-4 xl:grid-cols-[minmax(0,3fr)_minmax(0,2fr)]">
       <ProfilePanel athlete={athlete} edits={may.edit} />
-      {may.seeHolds ? <HoldsPanel athlete={athlete} today={today} writes={may.writeHolds} /> : null}
+      <div className="grid gap-4">
+        {may.seeHolds ? <HoldsPanel athlete={athlete} today={today} writes={may.writeHolds} /> : null}
+        <LimitationsPanel athlete={athlete} />
+      </div>
     </div>
   );
 }

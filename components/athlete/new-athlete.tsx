@@ -3,6 +3,7 @@
 import { useRouter } from "next/navigation";
 import { Panel } from "@/components/ui/panel";
 import { showToast } from "@/components/ui/toasts";
+import { EQUIPMENT } from "@/lib/engine/prescription/exercise";
 import { useAddAthlete } from "@/lib/query/athletes";
 import type { AthleteForm } from "@/lib/schemas/athlete";
 import { ProfileForm } from "./profile-form";
@@ -16,7 +17,13 @@ const START: AthleteForm = {
   strikingBase: "boxing",
   liftsPerWeek: 3,
   freeHours: [1, 2, 3, 4, 5, 6].map((weekday) => ({ weekday, from: "07:00", to: "21:00" })),
+  secondBase: null,
+  secondShare: null,
   limitations: "",
+  limitationCodes: [],
+  equipment: [...EQUIPMENT],
+  plateUnit: "kg",
+  plateStep: 2.5,
 };
 
 export function NewAthlete() {

@@ -1,15 +1,16 @@
 "use client";
 
 import { useFormContext } from "react-hook-form";
-import { AGE_CHOICES, BASE_CHOICES, LIFT_CHOICES } from "@/components/start/words";
+import { AGE_CHOICES, LIFT_CHOICES } from "@/components/start/words";
 import { Field } from "@/components/ui/field";
 import { Select } from "@/components/ui/select";
-import { TextArea } from "@/components/ui/text-area";
 import { DateInput, TextInput } from "@/components/ui/text-input";
 import type { AthleteForm } from "@/lib/schemas/athlete";
 import { FreeHoursInput } from "./free-hours-input";
+import { StyleFields } from "./style-fields";
+import { EquipmentFields, LimitationFields } from "./training-fields";
 
-/** What is known of an athlete: who, what the planner needs, what hurts. */
+/** What is known of an athlete: who, what the planner needs, what hurts, what there is to lift. */
 export function ProfileFields({ minor }: { readonly minor: boolean }) {
   const { register, formState } = useFormContext<AthleteForm>();
   const { errors } = formState;
@@ -30,9 +31,7 @@ export function ProfileFields({ minor }: { readonly minor: boolean }) {
       >
         <DateInput {...register("dateOfBirth", { setValueAs: (value: string | null) => value || null })} />
       </Field>
-      <Field label="Striking base" error={errors.strikingBase?.message}>
-        <Select choices={BASE_CHOICES} {...register("strikingBase")} />
-      </Field>
+      <StyleFields />
       <Field
         label="Training age"
         hint="Of lifting: a novice has under a year, the advanced are strong already."
@@ -44,14 +43,8 @@ export function ProfileFields({ minor }: { readonly minor: boolean }) {
         <Select choices={LIFT_CHOICES} {...register("liftsPerWeek", { setValueAs: Number })} />
       </Field>
       <FreeHoursInput />
-      <Field
-        label="Limitations"
-        hint="What hurts or is ruled out, in the athlete’s words."
-        error={errors.limitations?.message}
-        className="sm:col-span-2"
-      >
-        <TextArea rows={3} {...register("limitations")} />
-      </Field>
+      <LimitationFields />
+      <EquipmentFields />
     </div>
   );
 }

@@ -1,3 +1,6 @@
+import { LIMITATION_WORDS } from "@/components/exercises/words";
+import type { Limitation } from "@/lib/engine/prescription/exercise";
+
 /** "2 camps were planned again." */
 export function replannedText(count: number): string {
   if (count === 0) return "No camp had to change.";
@@ -20,3 +23,7 @@ export const holdSpan = ({ from, to }: { readonly from: string; readonly to: str
     : from === to
       ? `On ${dateText(from)}`
       : `From ${dateText(from)} to ${dateText(to)}`;
+
+/** "Ankle; Knee: no deep bend", or "" where there is none. */
+export const codesText = (codes: readonly Limitation[]): string =>
+  codes.map((code) => LIMITATION_WORDS[code]).join("; ");

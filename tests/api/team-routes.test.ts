@@ -192,6 +192,48 @@ describe("athletes and holds", () => {
     expect(roster.athletes.map((one) => one.id)).toEqual([own.athlete.id]);
   });
 
+  it("limitations keep their history: what stood before the first change, then each change with who and when", async () => {
+    const cookie = await own.cookie("strength");
+    const params = { id: own.athlete.id };
+    const put = async (part: object) =>
+      json<AthleteView>(
+        await call(putAthlete, { method: "PUT", cookie, params, body: { ...PROFILE, ...part } }),
+      );
+    expect((await put({ name: "Only the name" })).limitationHistory).toEqual([]);
+    const knee = { limitations: "Right knee.", limitationCodes: ["knee-deep", "knee-impact"] };
+    const by = own.people[1]?.name;
+    expect((await put(knee)).limitationHistory).toMatchObject([
+      { ...knee, by, since: expect.stringMatching(/^2026-12-01T/) as string },
+      { limitations: "", limitationCodes: [], by: null },
+    ]);
+    expect((await put({ ...knee, sport: "Judo" })).limitationHistory).toHaveLength(2);
+    expect((await put({})).limitationHistory.map((one) => one.limitationCodes)).toEqual([
+      [],
+      knee.limitationCodes,
+      [],
+    ]);
+    const fresh = await json<{ id: string }>(
+      await call(addAthlete, { cookie, body: { ...PROFILE, ...knee } }),
+      201,
+    );
+    const view = await json<AthleteView>(await call(readAthlete, { cookie, params: { id: fresh.id } }));
+    expect(view.limitationHistory).toMatchObject([{ ...knee, by }]);
+  });
+
+  it.each([
+    ["the first base as second", { secondBase: "boxing", secondShare: 0.3 }, "/secondBase"],
+    ["a second base without a share", { secondBase: "grappling" }, "/secondShare"],
+    ["a share without a second base", { secondShare: 0.3 }, "/secondShare"],
+    ["a share above 90 %", { secondBase: "grappling", secondShare: 0.95 }, "/secondShare"],
+    ["a step of nothing", { plateStep: 0 }, "/plateStep"],
+    ["unknown equipment", { equipment: ["trampoline"] }, "/equipment/0"],
+    ["an unknown limitation", { limitationCodes: ["soul"] }, "/limitationCodes/0"],
+  ])("a profile with %s is refused beside its field", async (_, part, pointer) => {
+    const cookie = await own.cookie("strength");
+    const response = await call(addAthlete, { cookie, body: { ...PROFILE, ...part } });
+    expect((await problemOf(response)).errors?.map((error) => error.pointer)).toContain(pointer);
+  });
+
   const hold = { from: "2026-12-05", to: null, reason: "Knock to the head on Friday." };
 
   it("a hold takes training out of open camps in the same step, and lifting it brings training back", async () => {

@@ -7,6 +7,7 @@ import {
   type AthleteRow,
 } from "@/db/queries/athletes";
 import { writeAudit } from "@/db/queries/audit";
+import { listLimitationHistory } from "@/db/queries/limitations";
 import { listHeldAthletes, listHolds } from "@/db/queries/holds";
 import { findTeam } from "@/db/queries/teams";
 import { civilNow } from "@/lib/calendar/zones";
@@ -17,6 +18,7 @@ import type { AthleteForm, AthleteSummary, AthleteView, HoldDetail } from "@/lib
 import type { TeamContext } from "@/lib/services/context";
 import { isId } from "@/lib/services/ids";
 import { isMinor } from "./age";
+import { noteLimitations } from "./limitations";
 
 type ById = { params: Record<string, string> };
 
@@ -31,6 +33,17 @@ const factsOf = ({ trainingAge, strikingBase, liftsPerWeek, freeHours }: Athlete
   strikingBase,
   liftsPerWeek,
   freeHours,
+});
+
+/** What exercises and loads are chosen by. */
+const trainingOf = (row: AthleteRow) => ({
+  secondBase: row.secondBase,
+  secondShare: row.secondShare,
+  limitations: row.limitations,
+  limitationCodes: row.limitationCodes,
+  equipment: row.equipment,
+  plateUnit: row.plateUnit,
+  plateStep: row.plateStep,
 });
 
 /** Athletes whose profile this member may see: the roster for staff, oneself for an athlete. */
@@ -72,23 +85,26 @@ async function holdsOf(ctx: TeamContext, athleteId: string): Promise<HoldDetail[
 export async function readAthlete(ctx: TeamContext, { params }: ById): Promise<AthleteView> {
   const row = isId(params.id) ? await findAthlete(ctx.db, ctx.teamId, params.id) : null;
   if (!row || !can(ctx.member, "athletes.read", row.id)) throw notFound();
-  const { id, name, sport, dateOfBirth, limitations } = row;
-  const [today, holds] = await Promise.all([todayOf(ctx), holdsOf(ctx, id)]);
+  const { id, name, sport, dateOfBirth } = row;
+  const [today, holds, limitations] = await Promise.all([
+    todayOf(ctx),
+    holdsOf(ctx, id),
+    listLimitationHistory(ctx.db, ctx.teamId, id),
+  ]);
   return {
-    id,
-    name,
-    sport,
-    dateOfBirth,
-    limitations,
+    ...{ id, name, sport, dateOfBirth },
     ...factsOf(row),
+    ...trainingOf(row),
     minor: isMinor(dateOfBirth, today),
     holds,
+    limitationHistory: limitations.map(({ since, ...then }) => ({ ...then, since: since.toISOString() })),
   };
 }
 
 export async function addAthlete(ctx: TeamContext, { body }: { body: AthleteForm }): Promise<{ id: string }> {
   return ctx.db.transaction(async (tx) => {
     const { id } = await insertAthlete(tx, ctx.teamId, body);
+    await noteLimitations(tx, ctx, null, { ...body, id });
     await writeAudit(tx, ctx, "athlete.create", id);
     return { id };
   });
@@ -103,6 +119,7 @@ export async function editAthlete(
     const row = isId(params.id) ? await findAthlete(tx, ctx.teamId, params.id) : null;
     if (!row) throw notFound();
     await updateAthlete(tx, ctx.teamId, row.id, body);
+    await noteLimitations(tx, ctx, row, { ...body, id: row.id });
     const changed = Object.entries(body).filter(
       ([key, value]) => !isDeepStrictEqual(row[key as keyof AthleteForm], value),
     );
