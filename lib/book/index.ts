@@ -7,4 +7,5 @@ export * from "./plan-book";
 export * from "./preview";
 export * from "./preview-result";
 export * from "./put-back";
+export * from "./suggested-change";
 export * from "./words";

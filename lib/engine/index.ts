@@ -7,6 +7,7 @@ export { sessionMinutes } from "./dose";
 export * from "./load";
 export * from "./measures";
 export * from "./weight";
+export * from "./response";
 export { inputProblems, PlanInputError } from "./input";
 export { plan } from "./plan";
 export { knockOn } from "./changes/knock-on";

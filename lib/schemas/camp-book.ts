@@ -75,7 +75,8 @@ export type BookPin = z.infer<typeof pinSchema>;
 export const coachFactor = z.number().min(0.5, "0.5 to 1.5.").max(1.5, "0.5 to 1.5.");
 
 export const campResponseFields = {
-  id: z.string().min(1).max(80),
+  /** Key of the suggestion that was accepted. */
+  id: z.string().min(1).max(120),
   from: civilDate,
   /** Inclusive. */
   to: civilDate,

@@ -1,6 +1,7 @@
 import { describe, expect, it } from "vitest";
 import {
   applyEdit,
+  changeOfSuggestion,
   changeWords,
   inverseOf,
   isPreview,
@@ -13,7 +14,7 @@ import {
   type SavedChange,
   type StandingCamp,
 } from "@/lib/book";
-import { dayFromIso, isoFromDay } from "@/lib/engine";
+import { dayFromIso, isoFromDay, type Suggestion } from "@/lib/engine";
 import type { Instant } from "@/lib/engine/types";
 import { CHANGE_ACTION } from "@/lib/policy";
 import type { CampBook } from "@/lib/schemas/camp-book";
@@ -146,5 +147,35 @@ describe("what is refused", () => {
   it("to who may not write lifting: the right is that of the coach's own factor", () => {
     expect(CHANGE_ACTION["response.add"]).toBe(CHANGE_ACTION["lift.factor"]);
     expect(CHANGE_ACTION["response.drop"]).toBe(CHANGE_ACTION["lift.factor"]);
+  });
+});
+
+describe("a suggestion of the engine", () => {
+  const suggested: Suggestion = {
+    key: "effort:tue@2026-12-08",
+    kind: "effort",
+    title: "Lifting felt harder than planned, twice running",
+    numbers: [],
+    text: "",
+    source: "common practice, no published source",
+    change: { kind: "response", from: dayFromIso("2026-11-30"), to: dayFromIso("2026-12-06"), factor: 0.8 },
+  };
+
+  it("becomes the change that accepts it, under its own key, and can be previewed as it is", () => {
+    const change = changeOfSuggestion(suggested);
+    expect(change).toEqual(
+      add({ id: suggested.key, factor: 0.8, because: "Lifting felt harder than planned, twice running" }),
+    );
+    expect(changeSchema.safeParse(change).success).toBe(true);
+    expect(change && preview(standing(), change).book.responses).toHaveLength(1);
+  });
+
+  it("for one lift becomes the coach's own factor; a talk becomes no change", () => {
+    const lift = changeOfSuggestion({
+      ...suggested,
+      change: { kind: "factor", liftId: "power-a.2", factor: 0.72 },
+    });
+    expect(lift).toEqual({ kind: "lift.factor", liftId: "power-a.2", factor: 0.72 });
+    expect(changeOfSuggestion({ ...suggested, change: null })).toBeNull();
   });
 });

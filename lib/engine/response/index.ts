@@ -1,0 +1,3 @@
+export { againstNormal, checkInSum, type AgainstNormal } from "./check-in";
+export * from "./suggestions";
+export * from "./types";
