@@ -1,3 +1,4 @@
+import { EQUIPMENT, type Equipment, type Limitation } from "../../lib/engine/prescription/exercise";
 import type { SportKind, StrikingBase, TrainingAge } from "../../lib/engine/types";
 
 /** An invented gym and its people; dates are days from the day of seeding. Nothing here is a real person, club or bout. */
@@ -94,10 +95,50 @@ export interface DemoAthlete {
   readonly freeFrom: string;
   readonly freeTo: string;
   readonly limitations: string;
+  /** The same as exercises are chosen by. */
+  readonly limitationCodes: readonly Limitation[];
+  /** A second striking base and its share. */
+  readonly second?: { readonly base: StrikingBase; readonly share: number };
+  /** What the athlete can train with. */
+  readonly equipment: readonly Equipment[];
+  /** Smallest change of load; steps of 2.5 kg where it is left out. */
+  readonly plates?: { readonly unit: "kg" | "lb"; readonly step: number };
   readonly camp: DemoCamp | null;
   /** A hold from so many days ago, open-ended. */
   readonly holdDaysAgo?: number;
 }
+
+/** The club's lifting room. */
+const CLUB: readonly Equipment[] = [
+  "barbell",
+  "rack",
+  "dumbbell",
+  "kettlebell",
+  "plate",
+  "cable",
+  "band",
+  "medicine-ball",
+  "pull-up-bar",
+  "bench",
+  "extension-bench",
+  "box",
+  "landmine",
+  "rope",
+  "heavy-bag",
+];
+
+/** The corner of a hall: nothing with a rack. */
+const CORNER: readonly Equipment[] = [
+  "dumbbell",
+  "kettlebell",
+  "plate",
+  "band",
+  "medicine-ball",
+  "pull-up-bar",
+  "bench",
+  "box",
+  "heavy-bag",
+];
 
 export const ATHLETES: readonly DemoAthlete[] = [
   {
@@ -110,6 +151,8 @@ export const ATHLETES: readonly DemoAthlete[] = [
     freeFrom: "10:00",
     freeTo: "20:00",
     limitations: "Left shoulder dislikes overhead pressing.",
+    limitationCodes: ["shoulder-overhead"],
+    equipment: CLUB,
     camp: {
       daysOut: 38,
       weeks: 8,
@@ -135,6 +178,9 @@ export const ATHLETES: readonly DemoAthlete[] = [
     freeFrom: "09:00",
     freeTo: "21:00",
     limitations: "",
+    limitationCodes: [],
+    equipment: [...CLUB, "trap-bar", "neck-harness"],
+    plates: { unit: "lb", step: 5 },
     camp: {
       daysOut: 61,
       weeks: 12,
@@ -161,6 +207,9 @@ export const ATHLETES: readonly DemoAthlete[] = [
     freeFrom: "08:00",
     freeTo: "19:00",
     limitations: "Old ankle sprain, right.",
+    limitationCodes: ["ankle"],
+    equipment: CORNER,
+    plates: { unit: "kg", step: 2 },
     camp: {
       daysOut: 4,
       weeks: 6,
@@ -186,6 +235,8 @@ export const ATHLETES: readonly DemoAthlete[] = [
     freeFrom: "07:00",
     freeTo: "17:00",
     limitations: "",
+    limitationCodes: [],
+    equipment: CLUB.filter((piece) => piece !== "landmine" && piece !== "extension-bench"),
     camp: {
       daysOut: 17,
       weeks: 3,
@@ -211,6 +262,9 @@ export const ATHLETES: readonly DemoAthlete[] = [
     freeFrom: "10:00",
     freeTo: "20:00",
     limitations: "Right knee: no deep lunges.",
+    limitationCodes: ["knee-deep"],
+    second: { base: "boxing", share: 0.4 },
+    equipment: [...EQUIPMENT],
     holdDaysAgo: 1,
     camp: {
       daysOut: 47,
@@ -237,6 +291,8 @@ export const ATHLETES: readonly DemoAthlete[] = [
     freeFrom: "15:00",
     freeTo: "20:00",
     limitations: "",
+    limitationCodes: [],
+    equipment: CORNER,
     camp: null,
   },
 ];
