@@ -50,6 +50,12 @@ async function insertAthletes(tx: Transaction, teamId: string): Promise<Map<stri
         sport: athlete.sport,
         dateOfBirth: athlete.dateOfBirth,
         limitations: athlete.limitations,
+        limitationCodes: [...athlete.limitationCodes],
+        secondBase: athlete.second?.base ?? null,
+        secondShare: athlete.second?.share ?? null,
+        equipment: [...athlete.equipment],
+        plateUnit: athlete.plates?.unit ?? "kg",
+        plateStep: athlete.plates?.step ?? 2.5,
         ...factsOf(athlete),
       })),
     )
