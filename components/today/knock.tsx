@@ -19,7 +19,7 @@ export function Knock({ taken, onTaken }: KnockProps) {
   if (taken)
     return (
       <Notice tone="caution" title="You took a knock to the head" className="mt-3">
-        <p>Stop for today. Sparring is not planned until the medic says otherwise.</p>
+        <p>Stop for today. No sparring and no lifting is planned until the medic says otherwise.</p>
         <p className="mt-1">{EMERGENCY}</p>
         <p className="mt-1 font-semibold">This is no medical clearance. See a licensed doctor.</p>
       </Notice>
@@ -35,7 +35,7 @@ export function Knock({ taken, onTaken }: KnockProps) {
       <h3 className="font-semibold">A knock to the head?</h3>
       <ul className="mt-1 list-disc pl-5">
         <li>You stop for today. The session’s load is kept.</li>
-        <li>Sparring stops being planned until the medic says otherwise.</li>
+        <li>Sparring and lifting stop being planned until the medic says otherwise.</li>
         <li>Your head coach and the medic are told.</li>
         <li>You cannot take it back here; the medic decides.</li>
       </ul>

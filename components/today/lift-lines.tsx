@@ -1,9 +1,9 @@
 import { dayFromIso } from "@/lib/engine/geometry";
 import type { Line } from "@/lib/engine/prescription/types";
 import { dayText } from "@/lib/format/civil";
-import type { MassUnit } from "@/lib/format/load";
+import { loadText, restText, spanText, type MassUnit } from "@/lib/format/load";
 import type { DaySession } from "@/lib/schemas/today";
-import { amountText, lastText, loadText, restText } from "./prescription-words";
+import { amountText, lastText } from "./prescription-words";
 
 interface LineProps {
   readonly line: Line;
@@ -17,12 +17,14 @@ export const cueOf = (line: Line): string => line.note ?? (line.tempo || (line.c
 /** An exercise as asked for: name and amount over how and what it was last time. */
 function LineRow({ line, session, unit }: LineProps) {
   const last = session.lastTime[line.exercise];
-  const how = line.load.of === "best" ? `${loadText(line, unit)}, ${restText(line.rest)} rest` : cueOf(line);
-  const right = [line.load.of === "best" ? "" : loadText(line, unit), lastText(last, unit)]
+  const { load } = line;
+  const how =
+    load.of === "best" ? `${spanText(load.percent)} % of best, ${restText(line.rest)} rest` : cueOf(line);
+  const right = [load.of === "best" ? "" : loadText(load, unit), lastText(last, unit)]
     .filter(Boolean)
     .join(" · ");
   return (
-    <li className="grid grid-cols-[minmax(0,1fr)_auto] gap-x-3 gap-y-0.5 border-t border-line-soft py-2.5">
+    <li className="grid grid-cols-[minmax(0,1fr)_fit-content(58%)] gap-x-3 gap-y-0.5 border-t border-line-soft py-2.5">
       <b className="font-semibold">{line.name}</b>
       <span className="text-right font-semibold">{amountText(line, unit)}</span>
       <span className="text-sm text-ink-2">{how}</span>

@@ -32,10 +32,10 @@ interface StateWordProps {
   readonly className?: string;
 }
 
-/** Where an answer is: on the server, or only here. Read out when it changes. */
+/** Where an answer is: on the server, or only here. The state line at the top is what is read out. */
 export function StateWord({ waiting, given, className }: StateWordProps) {
   return (
-    <p role="status" className={classNames("min-h-5 text-sm text-ink-2", className)}>
+    <p className={classNames("min-h-5 text-sm text-ink-2", className)}>
       {given ? (waiting ? "Kept on this phone" : "Saved") : ""}
     </p>
   );

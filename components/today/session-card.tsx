@@ -1,5 +1,6 @@
 "use client";
 
+import Link from "next/link";
 import { useState } from "react";
 import { Button } from "@/components/ui/button";
 import { contentOf, type Queue } from "@/lib/offline/queue";
@@ -126,7 +127,18 @@ export function SessionCard(props: SessionCardProps) {
     );
   return (
     <Section title={title} look={lookOf(session)} lead={leadOf(session)}>
-      {session.source === "lift" ? <LiftLines session={session} unit={unit} /> : null}
+      {session.source === "lift" ? (
+        <>
+          <LiftLines session={session} unit={unit} />
+          <Link
+            prefetch={false}
+            href={`/camps/${session.campId}/sessions/${encodeURIComponent(session.id)}`}
+            className="inline-flex min-h-11 items-center text-sm font-semibold underline underline-offset-4"
+          >
+            Why this, and swaps
+          </Link>
+        </>
+      ) : null}
       {open ? <LogPart session={session} unit={unit} queue={queue} acts={acts} /> : null}
       {!open && log ? <LogSummary log={contentOf(log)} unit={unit} /> : null}
       {!open && logged && date < today && !log ? (

@@ -17,6 +17,7 @@ function wordsOf({ queue, online, signedOut, opens, durable }: StateLineProps): 
   if (waiting > 0 && !durable)
     return `${entriesText(waiting)} not sent. This browser keeps nothing: leave the page open.`;
   if (waiting > 0 && signedOut) return `${entriesText(waiting)} kept on this phone.`;
+  if (waiting > 0 && online) return "Saving";
   if (waiting > 0) return `${entriesText(waiting)} ${waiting === 1 ? "waits" : "wait"} for the net`;
   if (!online) return "No net. What you log is kept on this phone.";
   return opens ? "Saved. Opens without a net too." : "Saved";

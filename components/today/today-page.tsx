@@ -113,7 +113,7 @@ export function TodayPage({ initial, userId }: TodayPageProps) {
         </h2>
         {hold && onHold(hold, day.date) ? (
           <Notice tone="caution" title={`On a hold since ${dayText(dayFromIso(hold.from))}`}>
-            No sparring is planned{" "}
+            No sparring and no lifting is planned{" "}
             {hold.to === null ? "until the medic lifts it" : `up to ${dayText(dayFromIso(hold.to))}`}. Only
             the medic lifts a hold. This is no medical clearance.
           </Notice>

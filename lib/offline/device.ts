@@ -1,6 +1,8 @@
 import { del, get, set } from "idb-keyval";
 import type { TodayView } from "@/lib/schemas/today";
 import { CACHES } from "./cache-names";
+import type { Queue } from "./queue";
+import { queueKey } from "./queue-store";
 
 // What a phone keeps of one person. Raise the number when the shape of the view changes: an old copy is then not read.
 const viewKey = (userId: string): string => `bellward-today-1:${userId}`;
@@ -12,6 +14,16 @@ export const keptView = async (userId: string): Promise<TodayView | null> =>
 
 export const keepView = (userId: string, view: TodayView): Promise<void> =>
   set(viewKey(userId), view).catch(() => undefined);
+
+/** Entries of the person who uses this phone that the server has not taken. */
+export async function countWaiting(): Promise<number> {
+  try {
+    const owner = await get<string>(OWNER);
+    return owner === undefined ? 0 : ((await get<Queue>(queueKey(owner)))?.length ?? 0);
+  } catch {
+    return 0;
+  }
+}
 
 async function deleteCaches(): Promise<void> {
   if (typeof caches === "undefined") return;

@@ -64,7 +64,7 @@ export function placeOf(work: Work): string {
 
 /** A request as it goes over the wire. */
 export interface Wire {
-  readonly method: "POST" | "PUT" | "DELETE";
+  readonly method: "POST" | "PUT";
   readonly url: string;
   readonly body: unknown;
 }
@@ -88,8 +88,8 @@ export function wireOf({ key, work }: Entry): Wire {
       return { method: "POST", url: `${sessionUrl(work)}/request`, body: { key, reason: work.reason } };
     case "withdraw":
       return {
-        method: "DELETE",
-        url: `/api/requests/${encodeURIComponent(work.requestId)}`,
+        method: "POST",
+        url: `/api/requests/${encodeURIComponent(work.requestId)}/withdraw`,
         body: undefined,
       };
   }

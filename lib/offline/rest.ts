@@ -23,7 +23,7 @@ export function restAt(rest: Rest, now: number): { readonly seconds: number; rea
   if (left <= -FORGOTTEN) return null;
   return left > 0
     ? { seconds: Math.ceil(left / 1000), over: false }
-    : { seconds: Math.floor(-left / 1000), over: true };
+    : { seconds: Math.floor((now - rest.endsAt) / 1000), over: true };
 }
 
 /** Longer or shorter by `seconds`; what is then over may be told again. */

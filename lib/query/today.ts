@@ -24,7 +24,9 @@ const passing = (status: number): boolean =>
 
 /** The log in a refusal, where a write was refused for being older than that. */
 const theirLog = (problem: Problem): LogView | null =>
-  problem.status === 409 ? ((problem as Problem & { readonly log?: LogView }).log ?? null) : null;
+  problem.status === 409
+    ? ((problem as Problem & { readonly current?: LogView | null }).current ?? null)
+    : null;
 
 function outcomeOf({ problem, message }: ProblemError): Outcome {
   if (passing(problem.status)) return { is: "unreachable" };
