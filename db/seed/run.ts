@@ -11,6 +11,7 @@ import { openDatabase, type Database, type Transaction } from "../client";
 import { athletes, camps, holds, memberships, teams, timetableEntries, users } from "../schema";
 import demo from "./accounts.json";
 import { demoBook, factsOf, weeklyEntry } from "./book";
+import { seedLogs } from "./logs";
 import { ATHLETES, GYM_WEEK, TEAM, type DemoAthlete } from "./scenario";
 import type { Role } from "../../lib/policy/roles";
 
@@ -153,6 +154,7 @@ async function seed(db: Database, now: Date): Promise<boolean> {
       await replanAthlete(tx, actor("medic"), athleteId, "A hold was set");
     });
   }
+  await seedLogs(db, { teamId: base.teamId, today, now });
   return (await db.select({ id: camps.id }).from(camps).limit(1)).length > 0;
 }
 
