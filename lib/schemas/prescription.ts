@@ -116,6 +116,8 @@ export interface LineView extends Omit<Line, "load"> {
   readonly load: ShownLoad;
   /** Exercise whose turn it is, where a swap of this camp stands in for it. */
   readonly swappedFrom: Named | null;
+  /** What a swap may put in its place: shares a quality and may be done, best first; at most 8 ids. */
+  readonly swaps: readonly string[];
   /** Null where nobody wrote over the line. */
   readonly planned: PlannedLine | null;
 }

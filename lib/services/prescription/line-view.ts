@@ -14,6 +14,10 @@ export interface LineReader {
   readonly seesBests: boolean;
   readonly swaps: readonly Swap[];
   readonly names: ReadonlyMap<string, string>;
+  /** What the athlete may do. */
+  readonly allowed: readonly Exercise[];
+  /** Exercises of the session, which a swap would only double. */
+  readonly inSession: ReadonlySet<string>;
   /** The same lift without what a coach wrote over it; null where that is not known. */
   readonly planned: PrescribedLift | null;
 }
@@ -36,6 +40,28 @@ function swappedFrom(
   return null;
 }
 
+/** Swaps that a line is offered, at most. */
+const OFFERED = 8;
+
+/** The engine's alternatives that share a quality with whose turn it is, then others of the same main quality. */
+function swapsFor(line: Line, from: string, { allowed, inSession, names }: LineReader): string[] {
+  const was = allowed.find(({ id }) => id === from);
+  if (!was || !names.has(from) || was.qualities[0] === "mobility") return [];
+  const rank = (id: string): number => line.alternatives.indexOf(id) + 1 || Infinity;
+  const fits = ({ id, qualities }: Exercise): boolean =>
+    id !== from &&
+    id !== line.exercise &&
+    !inSession.has(id) &&
+    (qualities[0] === was.qualities[0] ||
+      (rank(id) < Infinity && qualities.some((one) => was.qualities.includes(one))));
+  // A stable sort: what the engine does not rank stays in the library's order.
+  return allowed
+    .filter(fits)
+    .sort((a, b) => Math.min(rank(a.id), 99) - Math.min(rank(b.id), 99))
+    .slice(0, OFFERED)
+    .map(({ id }) => id);
+}
+
 function plannedOf(line: Line, reader: LineReader): PlannedLine | null {
   if (line.edited.length === 0) return null;
   const planned = reader.planned?.lines.find(({ slot }) => slot === line.slot);
@@ -45,14 +71,19 @@ function plannedOf(line: Line, reader: LineReader): PlannedLine | null {
 }
 
 /** A line as one reader sees it. */
-export const lineView = (line: Line, reader: LineReader): LineView => ({
-  ...line,
-  load: shownLoad(line, reader),
-  // The sentence on percent says the best itself.
-  reasons: reader.seesBests ? line.reasons : line.reasons.filter(({ rule }) => rule !== "percent"),
-  swappedFrom: swappedFrom(line, reader),
-  planned: plannedOf(line, reader),
-});
+export function lineView(line: Line, reader: LineReader): LineView {
+  const from = swappedFrom(line, reader);
+  return {
+    ...line,
+    load: shownLoad(line, reader),
+    // The sentence on percent says the best itself.
+    reasons: reader.seesBests ? line.reasons : line.reasons.filter(({ rule }) => rule !== "percent"),
+    swappedFrom: from,
+    // A coach's own choice is changed by the coach, not swapped under it.
+    swaps: line.edited.includes("exercise") ? [] : swapsFor(line, from?.id ?? line.exercise, reader),
+    planned: plannedOf(line, reader),
+  };
+}
 
 export const bestView = (row: BestRow, names: ReadonlyMap<string, string>): BestView => ({
   id: row.id,

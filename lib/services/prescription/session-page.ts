@@ -5,10 +5,10 @@ import { listBests } from "@/db/queries/prescription";
 import { findUser } from "@/db/queries/users";
 import { dayFromIso, daysOutOf, isAllowed, isoFromDay } from "@/lib/engine";
 import type { Day } from "@/lib/engine/types";
-import type { PrescribedLift } from "@/lib/engine";
+import type { Exercise, Line, PrescribedLift } from "@/lib/engine";
 import { notFound } from "@/lib/errors";
 import { can, type Action } from "@/lib/policy";
-import type { LiftView, SessionLink, SessionPageView } from "@/lib/schemas/prescription";
+import type { LiftView, LineView, SessionLink, SessionPageView } from "@/lib/schemas/prescription";
 import { loadCamp, type LoadedCamp } from "@/lib/services/camps/load";
 import type { TeamContext } from "@/lib/services/context";
 import { logView } from "@/lib/services/logs/log-view";
@@ -55,26 +55,29 @@ interface Loaded {
   readonly prescription: PrescribedLift | null;
 }
 
-function namesFor({ log, parts, prescription }: Loaded): Record<string, string> {
+function namesFor({ log, parts }: Loaded, lines: readonly LineView[]): Record<string, string> {
   const all = namesOf(parts.exercises);
-  const lines = prescription ? [...prescription.warmUp, ...prescription.lines] : [];
   const own = new Map(lines.map((line) => [line.exercise, line.name]));
   const wanted = [
-    ...lines.flatMap((line) => [line.exercise, ...line.alternatives]),
+    ...lines.flatMap((line) => [line.exercise, ...line.alternatives, ...line.swaps]),
     ...(log?.sets ?? []).map((set) => set.exerciseId),
   ];
   return Object.fromEntries(wanted.map((id) => [id, own.get(id) ?? all.get(id) ?? id]));
 }
 
-/** Exercises that the athlete may do, warm-ups left out, by name. */
-function choicesOf({ exercises, athlete }: PrescriptionParts): LiftView["choices"] {
+/** Exercises that the athlete may do. */
+function allowedOf({ exercises, athlete }: PrescriptionParts): Exercise[] {
   const equipment = new Set(athlete.equipment);
   const limitations = new Set(athlete.limitationCodes);
-  return exercises
-    .filter((exercise) => exercise.qualities[0] !== "mobility" && isAllowed(exercise, equipment, limitations))
+  return exercises.filter((exercise) => isAllowed(exercise, equipment, limitations));
+}
+
+/** What a coach may choose from, warm-ups left out, by name. */
+const choicesOf = (allowed: readonly Exercise[]): LiftView["choices"] =>
+  allowed
+    .filter(({ qualities }) => qualities[0] !== "mobility")
     .map(({ id, name }) => ({ id, name }))
     .sort((a, b) => a.name.localeCompare(b.name, "en"));
-}
 
 async function liftViewOf(ctx: TeamContext, loaded: Loaded): Promise<LiftView | null> {
   const { camp, row, log, parts, prescription } = loaded;
@@ -87,25 +90,30 @@ async function liftViewOf(ctx: TeamContext, loaded: Loaded): Promise<LiftView | 
   ]);
   const bare = edit && !log ? prescribeFrom(withoutEdit(parts, campId, row.id), camp, ctx.now) : [];
   const names = namesOf(parts.exercises);
+  const lines = [...prescription.warmUp, ...prescription.lines];
+  const allowed = allowedOf(parts);
   const reader: LineReader = {
     item: row.lift.item,
     seesBests,
     swaps: parts.overrides.get(campId)?.swaps ?? [],
     names,
+    allowed,
+    inSession: new Set(lines.map((line) => line.exercise)),
     planned: bare.find(({ id }) => id === row.id) ?? null,
   };
-  const lines = [...prescription.warmUp, ...prescription.lines];
+  const views = (of: readonly Line[]) => of.map((line) => lineView(line, reader));
+  const [warmUp, work] = [views(prescription.warmUp), views(prescription.lines)];
   return {
     lift: { ...row.lift, past: row.startsAt <= ctx.now },
     violations: camp.plan.violations.filter(({ ids }) => ids.includes(row.id)),
-    warmUp: prescription.warmUp.map((line) => lineView(line, reader)),
-    lines: prescription.lines.map((line) => lineView(line, reader)),
+    warmUp,
+    lines: work,
     empty: prescription.empty,
     note: prescription.note,
     edit: edit && { changedAt: edit.changedAt.toISOString(), by: edit.by, edit: edit.edit },
     closed: whyClosed(camp, row, log),
-    names: namesFor(loaded),
-    choices: can(ctx.member, "prescription.write", camp.athlete.id) ? choicesOf(parts) : [],
+    names: namesFor(loaded, [...warmUp, ...work]),
+    choices: can(ctx.member, "prescription.write", camp.athlete.id) ? choicesOf(allowed) : [],
     bests: bestsBehind(lines, rows).map((best) => bestView(best, names)),
   };
 }
