@@ -70,3 +70,15 @@ export function turnsOf(
     return next.quality;
   });
 }
+
+/**
+ * What a slot's part of the sets is multiplied by: up to half as much again where the style lives on what it trains. Common
+ * practice, no published source.
+ */
+export function leanOf(wanted: Readonly<Partial<Record<Quality, number>>>, weights: Weights): number {
+  const most = QUALITIES.reduce(
+    (top, quality) => (wanted[quality] === undefined ? top : Math.max(top, weights[quality])),
+    PLAIN,
+  );
+  return 1 + (0.5 * (most - PLAIN)) / (LIVES_ON - PLAIN);
+}

@@ -19,6 +19,8 @@ export interface Candidate {
   readonly tier: number;
   /** Fit, without the week's turn. */
   readonly score: number;
+  /** Place among the candidates of its tier and main quality: even ones belong to even weeks, odd ones to odd. */
+  readonly number: number;
 }
 
 /* Weights of the choice: common practice, no published source. */
@@ -33,6 +35,8 @@ const TURN = 3;
 const AGAIN = 0.4;
 /** Work that belongs to this part of the camp: Lee & McGill 2017, J Sports Sci 35:1768-1780 (direction only). */
 const TIMELY = 1.4;
+/** An exercise that belongs to the other weeks, so that accessories change from one week to the next. */
+const OTHER_WEEK = 0.4;
 /** A lift whose kilograms can be said. */
 const SAYS_LOAD = 1.25;
 /** Within this share of the best score, exercises take turns. */
@@ -116,12 +120,20 @@ export function candidatesOf(
   weights: Weights,
   early: boolean,
 ): readonly Candidate[] {
+  const seen = new Map<string, number>();
   return allowed
     .flatMap((exercise): Candidate[] => {
       const fit = fitOf(slot, exercise);
-      return fit ? [{ exercise, ...fit, score: scoreOf(slot, exercise, fit.aim, weights, early) }] : [];
+      if (!fit) return [];
+      return [{ exercise, ...fit, score: scoreOf(slot, exercise, fit.aim, weights, early), number: 0 }];
     })
-    .sort(byRank);
+    .sort(byRank)
+    .map((candidate): Candidate => {
+      const key = `${candidate.tier} ${candidate.exercise.qualities[0]}`;
+      const number = seen.get(key) ?? 0;
+      seen.set(key, number + 1);
+      return { ...candidate, number };
+    });
 }
 
 /** The order in which a slot's qualities take their turns; empty for slots that the base does not weigh. */
@@ -161,14 +173,14 @@ export function* inTurn(
   const turn = turns.length > 0 ? turns[(week * 5 + shift * 7 + place) % turns.length] : undefined;
   const open = candidates.filter(({ exercise }) => !used.has(exercise.id));
   const first = open[0]?.tier;
-  const scoreOfTurn = ({ exercise, score, tier }: Candidate): number => {
+  const scoreOfTurn = ({ exercise, score, tier, number }: Candidate): number => {
     if (tier !== first) return 0;
     const quality = exercise.qualities[0];
     return (
       score *
       (quality === turn ? TURN : 1) *
       (slot.byBase && !slot.stays && usedQualities.has(quality) ? AGAIN : 1) *
-      (slot.stays && known(exercise) ? SAYS_LOAD : 1)
+      (slot.stays ? (known(exercise) ? SAYS_LOAD : 1) : (number + week) % 2 === 0 ? 1 : OTHER_WEEK)
     );
   };
   const scores = open.map(scoreOfTurn);
@@ -179,7 +191,7 @@ export function* inTurn(
     if (candidate.tier === first && score >= least) near.push({ ...candidate, score });
   }
   const pool = near.sort(byRank).slice(0, slot.stays ? POOL.stays : POOL.rotates);
-  const start = pool.length > 0 ? (slot.stays ? block.index : week + shift) % pool.length : 0;
+  const start = pool.length > 0 ? (slot.stays ? block.index : Math.floor(week / 2) + shift) % pool.length : 0;
   yield* pool.slice(start);
   yield* pool.slice(0, start);
   const taken = new Set(pool.map(({ exercise }) => exercise));

@@ -2,6 +2,7 @@ import type { Lift, Reason } from "../types";
 import { baseFor } from "./base-weights";
 import type { Candidate } from "./choose";
 import type { Aim, BaseMix, Exercise, Range } from "./exercise";
+import { GOALS } from "./loading-tables";
 import { bestOn, heavyRow, loadOf, repsOf } from "./loads";
 import { KG_PER_LB } from "./plates";
 import type { Slot } from "./slots";
@@ -27,8 +28,8 @@ export interface LineContext {
   readonly plates: Plates;
 }
 
-/** Rest between heavy sets, seconds: 2 to 5 minutes, NSCA goal table (Essentials; from memory). */
-const HEAVY_REST: Range = { low: 120, high: 300 };
+/** Rest between heavy sets: strength in the goal table. */
+const HEAVY_REST: Range = GOALS.strength.rest;
 
 const clamp = (value: number, { low, high }: Range): number => Math.min(high, Math.max(low, value));
 

@@ -1,4 +1,5 @@
 import { ITEMS, type Lift, type Reason } from "../types";
+import { leanOf } from "./base-weights";
 import type { Block } from "./blocks";
 import { aimIn, inTurn, isEarly, type Candidate, type Moment } from "./choose";
 import { whyNot } from "./empty";
@@ -126,7 +127,8 @@ function open(lift: Lift, edits: Readonly<Record<string, LineEdit>>, library: Li
       return;
     }
     filled.push(one);
-    claims.push(claimOf(one, slot.share, lift, edits[slot.id] !== undefined));
+    const lean = slot.byBase && !slot.stays ? leanOf(slot.wanted, library.weights) : 1;
+    claims.push(claimOf(one, slot.share * lean, lift, edits[slot.id] !== undefined));
   };
   const closed: Slot[] = [];
   for (const slot of slots) {
