@@ -1,3 +1,4 @@
+import { ChevronDown } from "@/components/ui/icons";
 import { dayFromIso } from "@/lib/engine/geometry";
 import type { Line } from "@/lib/engine/prescription/types";
 import { dayText } from "@/lib/format/civil";
@@ -48,9 +49,10 @@ export function LiftLines({ session, unit }: { readonly session: DaySession; rea
     <>
       {note ? <p className="mt-2 border-l-4 border-ink-3 pl-3 text-sm">{note}</p> : null}
       {warmUp.length > 0 ? (
-        <details className="mt-2.5 border-t border-line-soft">
-          <summary className="flex min-h-11 items-center text-sm font-semibold">
-            Warm-up, {warmUp.length} exercises
+        <details className="group mt-2.5 border-t border-line-soft">
+          <summary className="flex min-h-11 items-center justify-between text-sm font-semibold">
+            Warm-up, {warmUp.length === 1 ? "1 exercise" : `${warmUp.length} exercises`}
+            <ChevronDown className="group-open:rotate-180" />
           </summary>
           <ul className="pb-2 text-sm text-ink-2">
             {warmUp.map((line) => (

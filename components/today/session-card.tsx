@@ -34,6 +34,20 @@ function leadOf({ start, minutes, source, sets, effort, place, kind }: DaySessio
   return [when, work, hard, place].filter(Boolean).join(" · ");
 }
 
+/** What is asked for, and the way to why and to swaps. */
+const LiftPart = ({ session, unit }: Pick<SessionCardProps, "session" | "unit">) => (
+  <>
+    <LiftLines session={session} unit={unit} />
+    <Link
+      prefetch={false}
+      href={`/camps/${session.campId}/sessions/${encodeURIComponent(session.id)}`}
+      className="inline-flex min-h-11 items-center text-sm font-semibold underline underline-offset-4"
+    >
+      Why this, and swaps
+    </Link>
+  </>
+);
+
 /** What one can do with a session that may be logged: begin, go on, say it was missed. */
 function LogPart({ session, unit, queue, acts }: Omit<SessionCardProps, "today">) {
   const given = session.log;
@@ -66,9 +80,11 @@ function LogPart({ session, unit, queue, acts }: Omit<SessionCardProps, "today">
         </Button>
       </>
     );
+  const asked = isLift ? <LiftPart session={session} unit={unit} /> : null;
   if (log.state === "missed")
     return (
       <>
+        {asked}
         <p className="mt-2.5 text-sm font-semibold">You missed it.</p>
         {word}
         <Button
@@ -86,6 +102,7 @@ function LogPart({ session, unit, queue, acts }: Omit<SessionCardProps, "today">
   const begun = given !== null;
   return (
     <>
+      {asked}
       {begun ? <LogSummary log={log} unit={unit} /> : null}
       {log.knock ? knock : null}
       {begun ? word : null}
@@ -118,6 +135,7 @@ export function SessionCard(props: SessionCardProps) {
   const { date, editableUntil, log } = session;
   const logged = isLogged(session);
   const open = logged && date <= today && today <= editableUntil;
+  const isLift = session.source === "lift";
   const ahead = logged && date >= today && (log === null || log.state === "open");
   const title =
     session.source === "bout" ? (
@@ -127,18 +145,7 @@ export function SessionCard(props: SessionCardProps) {
     );
   return (
     <Section title={title} look={lookOf(session)} lead={leadOf(session)}>
-      {session.source === "lift" ? (
-        <>
-          <LiftLines session={session} unit={unit} />
-          <Link
-            prefetch={false}
-            href={`/camps/${session.campId}/sessions/${encodeURIComponent(session.id)}`}
-            className="inline-flex min-h-11 items-center text-sm font-semibold underline underline-offset-4"
-          >
-            Why this, and swaps
-          </Link>
-        </>
-      ) : null}
+      {isLift && !open ? <LiftPart session={session} unit={unit} /> : null}
       {open ? <LogPart session={session} unit={unit} queue={queue} acts={acts} /> : null}
       {!open && log ? <LogSummary log={contentOf(log)} unit={unit} /> : null}
       {!open && logged && date < today && !log ? (
