@@ -52,7 +52,9 @@ const LiftPart = ({ session, unit }: Pick<SessionCardProps, "session" | "unit">)
 function LogPart({ session, unit, queue, acts }: Omit<SessionCardProps, "today">) {
   const given = session.log;
   const log = given ? contentOf(given) : EMPTY_LOG;
-  const [open, setOpen] = useState(given?.state === "open");
+  // Until a button says otherwise a begun log stands open, also when it comes out of this phone's memory after a reload.
+  const [said, setOpen] = useState<boolean | null>(null);
+  const open = said ?? given?.state === "open";
   const change = (state: "open" | "missed"): void => acts.log(session, () => ({ state }));
   const isLift = session.source === "lift";
   const close = (): void => {

@@ -13,12 +13,13 @@ interface StateLineProps {
 export const entriesText = (count: number): string => (count === 1 ? "1 entry" : `${count} entries`);
 
 function wordsOf({ queue, online, signedOut, opens, durable }: StateLineProps): string {
-  const { waiting } = countOf(queue);
+  const { waiting, stale, refused } = countOf(queue);
   if (waiting > 0 && !durable)
     return `${entriesText(waiting)} not sent. This browser keeps nothing: leave the page open.`;
   if (waiting > 0 && signedOut) return `${entriesText(waiting)} kept on this phone.`;
   if (waiting > 0 && online) return "Saving";
   if (waiting > 0) return `${entriesText(waiting)} ${waiting === 1 ? "waits" : "wait"} for the net`;
+  if (stale + refused > 0) return `${entriesText(stale + refused)} to look at`;
   if (!online) return "No net. What you log is kept on this phone.";
   return opens ? "Saved. Opens without a net too." : "Saved";
 }
