@@ -113,27 +113,30 @@ function scoreOf(slot: Slot, exercise: Exercise, aim: Aim, weights: Weights, ear
 const byRank = (a: Candidate, b: Candidate): number =>
   a.tier - b.tier || b.score - a.score || (a.exercise.id < b.exercise.id ? -1 : 1);
 
-/** Legal candidates of a slot, best first, whatever the week. */
+/** Legal candidates of a slot, best first, whatever the week; `allowed` by main quality. */
 export function candidatesOf(
   slot: Slot,
-  allowed: readonly Exercise[],
+  allowed: ReadonlyMap<Quality, readonly Exercise[]>,
   weights: Weights,
   early: boolean,
 ): readonly Candidate[] {
-  const seen = new Map<string, number>();
-  return allowed
-    .flatMap((exercise): Candidate[] => {
+  const fitting: Candidate[] = [];
+  for (const quality of QUALITIES) {
+    if (slot.wanted[quality] === undefined) continue;
+    for (const exercise of allowed.get(quality) ?? []) {
       const fit = fitOf(slot, exercise);
-      if (!fit) return [];
-      return [{ exercise, ...fit, score: scoreOf(slot, exercise, fit.aim, weights, early), number: 0 }];
-    })
-    .sort(byRank)
-    .map((candidate): Candidate => {
-      const key = `${candidate.tier} ${candidate.exercise.qualities[0]}`;
-      const number = seen.get(key) ?? 0;
-      seen.set(key, number + 1);
-      return { ...candidate, number };
-    });
+      if (!fit) continue;
+      const { tier, aim } = fit;
+      fitting.push({ exercise, tier, aim, score: scoreOf(slot, exercise, aim, weights, early), number: 0 });
+    }
+  }
+  const seen = new Map<string, number>();
+  return fitting.sort(byRank).map((candidate): Candidate => {
+    const key = `${candidate.tier} ${candidate.exercise.qualities[0]}`;
+    const number = seen.get(key) ?? 0;
+    seen.set(key, number + 1);
+    return { ...candidate, number };
+  });
 }
 
 /** The order in which a slot's qualities take their turns; empty for slots that the base does not weigh. */

@@ -33,6 +33,12 @@ export function libraryOf(input: PrescriptionInput): Library {
   const limitations = new Set(input.limitations);
   const allowed = exercises.filter((exercise) => isAllowed(exercise, equipment, limitations));
   const allowedIds = new Set(allowed.map(({ id }) => id));
+  const byQuality = new Map<Quality, Exercise[]>();
+  for (const exercise of allowed) {
+    const rows = byQuality.get(exercise.qualities[0]);
+    if (rows) rows.push(exercise);
+    else byQuality.set(exercise.qualities[0], [exercise]);
+  }
   const byId = new Map(exercises.map((exercise) => [exercise.id, exercise]));
   const weights = weightsOf(mix);
   const bounds = { equipment, limitations };
@@ -46,15 +52,13 @@ export function libraryOf(input: PrescriptionInput): Library {
     edits,
     exercises,
     byId,
-    mobility: allowed
-      .filter(({ qualities }) => qualities[0] === "mobility")
-      .sort((a, b) => (a.id < b.id ? -1 : 1)),
+    mobility: [...(byQuality.get("mobility") ?? [])].sort((a, b) => (a.id < b.id ? -1 : 1)),
     weights,
     ranked(item, slot, early) {
       const key = `${item} ${slot.id} ${String(early)}`;
       let ranked = cache.get(key);
       if (!ranked) {
-        const candidates = candidatesOf(slot, allowed, weights, early);
+        const candidates = candidatesOf(slot, byQuality, weights, early);
         ranked = { candidates, turns: slotTurns(slot, weights) };
         cache.set(key, ranked);
       }
