@@ -43,17 +43,17 @@ export function DoseFields() {
                 }
               />
               {dose ? (
-                <div className="grid gap-2 pb-2 pl-7 sm:grid-cols-2">
+                <div className="grid gap-1.5 pb-2 pl-7">
                   <RangeInput
                     label={`${AIM_WORDS[aim]}, sets`}
-                    unit="sets"
+                    shown="Sets"
                     value={dose.sets}
                     onChange={(sets) => field.onChange({ ...doses, [aim]: { ...dose, sets } })}
                     errors={errors?.[aim]?.sets}
                   />
                   <RangeInput
                     label={`${AIM_WORDS[aim]}, ${aim === "hold" ? "seconds" : "repetitions"}`}
-                    unit={aim === "hold" ? "s" : "reps"}
+                    shown={aim === "hold" ? "Seconds" : "Repetitions"}
                     value={dose.reps}
                     onChange={(reps) => field.onChange({ ...doses, [aim]: { ...dose, reps } })}
                     errors={errors?.[aim]?.reps}

@@ -50,7 +50,8 @@ export function ExercisePage({ initial, edits }: ExercisePageProps) {
   const [editing, setEditing] = useState(false);
   if (editing) return <EditPanel view={view} onClose={() => setEditing(false)} />;
   const { exercise, shelved, use } = view;
-  const lines = [originText(view), usedText(use)].filter(Boolean);
+  const used = usedText(use);
+  const lines = [originText(view), used && `Chosen or logged: ${used}`].filter(Boolean);
   return (
     <Panel
       title={exercise.name}

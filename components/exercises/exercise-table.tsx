@@ -15,6 +15,9 @@ interface ExerciseTableProps {
   readonly query: string;
 }
 
+/** On a phone a row is the name with what it trains and needs, and the sets. */
+const WIDE = "hidden sm:table-cell";
+
 const STEPS: Readonly<Record<string, number>> = { ArrowDown: 1, ArrowUp: -1 };
 
 /** Arrow keys go from row to row; Home and End to the ends. */
@@ -33,7 +36,7 @@ function Row({ summary, href, open }: { summary: ExerciseSummary; href: string; 
   const origin = originText(summary);
   return (
     <tr className={classNames("align-top", open && "bg-line-soft")}>
-      <HeadCell scope="row" className="min-w-44 py-1.5!">
+      <HeadCell scope="row" className="py-1.5! sm:min-w-44">
         <Link
           href={href}
           data-row
@@ -43,21 +46,24 @@ function Row({ summary, href, open }: { summary: ExerciseSummary; href: string; 
         >
           {exercise.name}
         </Link>
+        <span className="block text-xs font-normal text-ink-2 sm:hidden">
+          {qualitiesText(exercise.qualities)}; needs {equipmentText(exercise.equipment).toLowerCase()}
+        </span>
         {origin ? <span className="block text-xs font-normal text-ink-2">{origin}</span> : null}
       </HeadCell>
-      <Cell>{qualitiesText(exercise.qualities)}</Cell>
-      <Cell>{equipmentText(exercise.equipment)}</Cell>
+      <Cell className={WIDE}>{qualitiesText(exercise.qualities)}</Cell>
+      <Cell className={WIDE}>{equipmentText(exercise.equipment)}</Cell>
       <Cell>
         {AIMS.map((aim) => {
           const dose = exercise.doses[aim];
           return dose ? (
-            <span key={aim} className="block whitespace-nowrap">
+            <span key={aim} className="block sm:whitespace-nowrap">
               {AIM_WORDS[aim]} {doseText(aim, dose, exercise.sides)}
             </span>
           ) : null;
         })}
       </Cell>
-      <Cell>{usedText(use)}</Cell>
+      <Cell className={WIDE}>{usedText(use)}</Cell>
     </tr>
   );
 }
@@ -70,10 +76,10 @@ export function ExerciseTable({ exercises, query }: ExerciseTableProps) {
       <thead>
         <tr>
           <HeadCell>Exercise</HeadCell>
-          <HeadCell>Trains</HeadCell>
-          <HeadCell>Needs</HeadCell>
+          <HeadCell className={WIDE}>Trains</HeadCell>
+          <HeadCell className={WIDE}>Needs</HeadCell>
           <HeadCell>For</HeadCell>
-          <HeadCell>Chosen or logged</HeadCell>
+          <HeadCell className={WIDE}>Chosen or logged</HeadCell>
         </tr>
       </thead>
       <tbody onKeyDown={moveFocus}>

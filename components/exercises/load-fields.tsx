@@ -21,14 +21,20 @@ function PowerZone() {
   const zone = field.value;
   const error = formState.errors.powerZone;
   return (
-    <FieldGroup label="Most power" error={error?.message}>
+    <FieldGroup label="Most power" error={error?.message} className="sm:col-span-2">
       <Checkbox
         label="At a known percent of best"
         checked={zone !== null}
         onChange={(event) => field.onChange(event.target.checked ? FRESH_ZONE : null)}
       />
       {zone ? (
-        <RangeInput label="Most power" unit="%" value={zone} onChange={field.onChange} errors={error} />
+        <RangeInput
+          label="Most power"
+          shown="Percent"
+          value={zone}
+          onChange={field.onChange}
+          errors={error}
+        />
       ) : null}
     </FieldGroup>
   );
@@ -81,7 +87,7 @@ export function LoadFields({ id }: { readonly id: string | null }) {
           />
         </Field>
       ) : null}
-      <FieldGroup label="Main lift" error={errors.main?.message}>
+      <FieldGroup label="Main lift" error={errors.main?.message} className="sm:col-span-2">
         <Checkbox label="May be the main lift of a strength session" {...register("main")} />
       </FieldGroup>
     </div>

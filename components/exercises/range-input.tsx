@@ -10,11 +10,12 @@ interface EndErrors {
 }
 
 interface RangeInputProps {
-  /** "Heavy sets": the two fields say "from" and "to" behind it. */
+  /** "Heavy, sets": the two fields say "from" and "to" behind it. */
   readonly label: string;
+  /** The same as it is shown before the fields: "Sets". */
+  readonly shown: string;
   readonly value: Range;
   readonly onChange: (value: Range) => void;
-  readonly unit?: string;
   readonly errors?: EndErrors;
 }
 
@@ -23,12 +24,14 @@ const asText = (value: number): string => (Number.isNaN(value) ? "" : String(val
 const asNumber = (text: string): number => (text.trim() === "" ? Number.NaN : Number(text));
 
 /** A from and a to, whole numbers. */
-export function RangeInput({ label, value, onChange, unit, errors }: RangeInputProps) {
+export function RangeInput({ label, shown, value, onChange, errors }: RangeInputProps) {
   return (
-    <div className="grid grid-cols-[minmax(0,1fr)_auto_minmax(0,1fr)] items-start gap-2">
+    <div className="grid grid-cols-[6.5rem_minmax(0,1fr)_auto_minmax(0,1fr)] items-start gap-2">
+      <span aria-hidden="true" className="py-2 text-sm">
+        {shown}
+      </span>
       <Field label={`${label}, from`} hideLabel error={errors?.low?.message}>
         <NumberInput
-          unit={unit}
           value={asText(value.low)}
           onChange={(event) => onChange({ ...value, low: asNumber(event.target.value) })}
         />
@@ -38,7 +41,6 @@ export function RangeInput({ label, value, onChange, unit, errors }: RangeInputP
       </span>
       <Field label={`${label}, to`} hideLabel error={errors?.high?.message}>
         <NumberInput
-          unit={unit}
           value={asText(value.high)}
           onChange={(event) => onChange({ ...value, high: asNumber(event.target.value) })}
         />
