@@ -37,6 +37,8 @@ const AGAIN = 0.4;
 const TIMELY = 1.4;
 /** An exercise that belongs to the other weeks, so that accessories change from one week to the next. */
 const OTHER_WEEK = 0.4;
+/** A main lift as an accessory: it tires more than the session is placed for. */
+const BIG_LIFT = 0.4;
 /** A lift whose kilograms can be said. */
 const SAYS_LOAD = 1.25;
 /** Within this share of the best score, exercises take turns. */
@@ -107,7 +109,8 @@ function scoreOf(slot: Slot, exercise: Exercise, aim: Aim, weights: Weights, ear
     score += wanted(quality) * (index === 0 ? 1 : SECOND) + BASE_BONUS * weights[quality];
   }
   const said = slot.work === "heavy" && exercise.load === "best" ? SAYS_LOAD : 1;
-  return score * said * timely(slot, exercise, aim, early) * loaded(slot, exercise);
+  const big = slot.work === "accessory" && exercise.main ? BIG_LIFT : 1;
+  return score * said * big * timely(slot, exercise, aim, early) * loaded(slot, exercise);
 }
 
 const byRank = (a: Candidate, b: Candidate): number =>
