@@ -1,54 +1,30 @@
+import { randomUUID } from "node:crypto";
 import { eq } from "drizzle-orm";
 import { describe, expect, it } from "vitest";
 import { athletes, auditLog, users } from "@/db/schema";
 import { isoFromDay } from "@/lib/engine";
 import type { Day } from "@/lib/engine/types";
-import type { LineView, SaveEdit, SessionPageView } from "@/lib/schemas/prescription";
+import type { SaveEdit } from "@/lib/schemas/prescription";
 import { createCamp } from "@/lib/services/camps/create";
 import { readCamp } from "@/lib/services/camps/read";
 import { saveChange } from "@/lib/services/camps/save-change";
 import type { TeamContext } from "@/lib/services/context";
-import { addBest, dropBest, listAthleteBests } from "@/lib/services/prescription/bests";
+import { addBest } from "@/lib/services/prescription/bests";
 import { saveEdit } from "@/lib/services/prescription/save-edit";
-import { readSession } from "@/lib/services/prescription/session-page";
 import { dropSwap, saveSwap } from "@/lib/services/prescription/swap";
 import { readToday } from "@/lib/services/today/read-today";
-import { randomUUID } from "node:crypto";
 import { campForm } from "../factories/camp-book";
 import { testDatabase } from "../setup/database";
 import { dayScene, done, keep, NOW, refusal, type DayScene } from "./day-scene";
+import { coming, first, liftOf, lineOf, read } from "./prescription-scene";
 
 const { db } = await testDatabase();
-
-const read = (ctx: TeamContext, scene: Pick<DayScene, "campId">, sid: string) =>
-  readSession(ctx, { params: { id: scene.campId, sid } });
 
 const put = (ctx: TeamContext, scene: DayScene, sid: string, body: SaveEdit) =>
   saveEdit(ctx, { params: { id: scene.campId, sid }, body });
 
 const swap = (ctx: TeamContext, scene: DayScene, body: Parameters<typeof saveSwap>[1]["body"]) =>
   saveSwap(ctx, { params: { id: scene.campId }, body });
-
-const liftOf = (view: SessionPageView) => {
-  if (!view.lift) throw new Error("no prescription");
-  return view.lift;
-};
-const lineOf = (view: SessionPageView, slot: string): LineView => {
-  const line = liftOf(view).lines.find((one) => one.slot === slot);
-  if (!line) throw new Error(`no ${slot}`);
-  return line;
-};
-
-/** The lifts to come of one item, in time. */
-async function coming(scene: DayScene, item: string) {
-  const rows = await scene.lifts();
-  return rows.filter((row) => row.kind === item && row.startsAt > NOW && row.status === "confirmed");
-}
-async function first(scene: DayScene, item: string) {
-  const [row] = await coming(scene, item);
-  if (!row) throw new Error(`no ${item} to come`);
-  return row;
-}
 
 describe("the page of a session", () => {
   it("gives the coach lines whose sets add up to the lift's, with reasons, and what stands before and after", async () => {
@@ -259,9 +235,7 @@ describe("a swap", () => {
   async function swappable(scene: DayScene) {
     const row = await first(scene, "strength-a");
     const view = await read(scene.as("athlete"), scene, row.id);
-    const line = liftOf(view).lines.find(
-      ({ slot, swaps }) => slot !== "main-lower" && swaps.length > 0,
-    );
+    const line = liftOf(view).lines.find(({ slot, swaps }) => slot !== "main-lower" && swaps.length > 0);
     const to = line?.swaps[0];
     if (!line || to === undefined) throw new Error("nothing to swap");
     return { row, slot: line.slot, from: line.exercise, to };
@@ -333,86 +307,5 @@ describe("a swap", () => {
       expect(await refusal(swap(scene.as(role), scene, body))).toMatchObject({ code: "forbidden" });
     const other = await dayScene(db);
     expect(await refusal(swap(other.as("athlete"), scene, body))).toMatchObject({ code: "not-found" });
-  });
-});
-
-describe("a best", () => {
-  const params = (scene: DayScene) => ({ params: { id: scene.athlete.id } });
-  const record = { exerciseId: "back-squat", day: "2026-11-03", kg: 110, reps: 4, formula: "epley" } as const;
-
-  it("added by the athlete loads the sessions to come at once, with what it comes from", async () => {
-    const scene = await dayScene(db);
-    await db
-      .update(athletes)
-      .set({ equipment: ["barbell", "rack", "plate"] })
-      .where(eq(athletes.id, scene.athlete.id));
-    const loads = async () => {
-      const views = [];
-      for (const { id } of await coming(scene, "strength-a"))
-        views.push(await read(scene.as("athlete"), scene, id));
-      return views.flatMap((view) =>
-        liftOf(view).lines.flatMap(({ load }) =>
-          load.of === "best" ? [{ load, bests: liftOf(view).bests }] : [],
-        ),
-      );
-    };
-    expect(await loads()).toEqual([]);
-    const best = await addBest(scene.as("athlete"), { ...params(scene), body: record });
-    // 110 x (1 + 4 / 30), the equation as LeSuer et al. 1997 list it (from memory).
-    expect(best.kg).toBeCloseTo(124.667, 3);
-    const loaded = await loads();
-    expect(loaded.length).toBeGreaterThan(0);
-    for (const { load, bests } of loaded) {
-      expect(load.best.from).toBe("epley");
-      expect(load.kg % 2.5).toBe(0);
-      expect(bests).toContainEqual(best);
-    }
-  });
-
-  it("newest of its lift counts, and taken away the older one counts again", async () => {
-    const scene = await dayScene(db);
-    const head = scene.as("head");
-    const older = await addBest(head, { ...params(scene), body: record });
-    const newer = await addBest(head, {
-      ...params(scene),
-      body: { ...record, day: "2026-11-20", kg: 130, reps: 1, formula: null },
-    });
-    expect(newer).toMatchObject({ formula: null, kg: 130 });
-    const list = async () => (await listAthleteBests(head, params(scene))).bests.map(({ id }) => id);
-    expect(await list()).toEqual([newer.id, older.id]);
-    await dropBest(head, { params: { id: newer.id } });
-    expect(await list()).toEqual([older.id]);
-    expect(await refusal(dropBest(head, { params: { id: newer.id } }))).toMatchObject({ code: "not-found" });
-  });
-
-  it("is refused beside its field: a day to come, an exercise without a best, one that takes another's", async () => {
-    const scene = await dayScene(db);
-    const ask = async (over: Partial<Parameters<typeof addBest>[1]["body"]>) =>
-      (await refusal(addBest(scene.as("head"), { ...params(scene), body: { ...record, ...over } }))).extra
-        .errors;
-    expect(await ask({ day: "2026-12-02" })).toMatchObject([{ pointer: "/day" }]);
-    expect(await ask({ exerciseId: "wall-sit" })).toMatchObject([{ pointer: "/exerciseId" }]);
-    expect(await ask({ exerciseId: "nothing" })).toMatchObject([{ pointer: "/exerciseId" }]);
-    // The schema stops it before; the engine would too (Reynolds et al. 2006: at most 10 repetitions).
-    expect(await ask({ reps: 11 })).toMatchObject([{ pointer: "/reps" }]);
-  });
-
-  it("of another athlete or team cannot be added, seen or taken away", async () => {
-    const scene = await dayScene(db);
-    const other = await dayScene(db);
-    const best = await addBest(scene.as("head"), { ...params(scene), body: record });
-    for (const ctx of [other.as("head"), other.as("athlete")]) {
-      expect(await refusal(addBest(ctx, { ...params(scene), body: record }))).toMatchObject({
-        code: "not-found",
-      });
-      expect(await refusal(listAthleteBests(ctx, params(scene)))).toMatchObject({ code: "not-found" });
-      expect(await refusal(dropBest(ctx, { params: { id: best.id } }))).toMatchObject({ code: "not-found" });
-    }
-    expect(await refusal(addBest(scene.as("skills"), { ...params(scene), body: record }))).toMatchObject({
-      code: "forbidden",
-    });
-    expect(await refusal(dropBest(scene.as("medic"), { params: { id: best.id } }))).toMatchObject({
-      code: "forbidden",
-    });
   });
 });
