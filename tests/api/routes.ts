@@ -221,6 +221,12 @@ export const TEAM_ROUTES: readonly RouteRow[] = [
     body: () => ({ uploadId: randomUUID(), rows: [TRIAL] }),
     params: ({ athleteId }) => ({ id: athleteId }),
   },
+  {
+    path: "athletes/[id]/csv/[what]",
+    method: "GET",
+    may: null,
+    params: ({ athleteId }) => ({ id: athleteId, what: "tests" }),
+  },
   { path: "tests/[id]", method: "DELETE", may: "tests.write", params: ({ trialId }) => ({ id: trialId }) },
   {
     path: "tests/[id]/restore",
@@ -299,6 +305,20 @@ export const TEAM_ROUTES: readonly RouteRow[] = [
     body: () => ({ camp: "bout=2027-01-09&at=20:00&zone=Europe/Lisbon&weeks=6" }),
   },
   { path: "camps/[id]", method: "GET", may: "camps.read", params: ({ campId }) => ({ id: campId }) },
+  { path: "camps/[id]/report", method: "GET", may: "report.read", params: ({ campId }) => ({ id: campId }) },
+  {
+    path: "camps/[id]/report/csv",
+    method: "GET",
+    may: "report.read",
+    params: ({ campId }) => ({ id: campId }),
+  },
+  {
+    path: "camps/[id]/result",
+    method: "PUT",
+    may: "result.write",
+    body: () => ({ result: null }),
+    params: ({ campId }) => ({ id: campId }),
+  },
   {
     path: "camps/[id]/events",
     method: "GET",

@@ -225,13 +225,13 @@ describe("change against noise (Hopkins 2000, Sports Med 30:1-15)", () => {
     const { add, read, team } = await scene();
     const stranger = await scene();
     for (const value of [39, 40, 41, 40, 39, 41]) await add({ value, day: "2026-10-01" });
-    const base = {
+    const base: Omit<typeof athletes.$inferInsert, "name"> = {
       teamId: team.id,
       trainingAge: "novice",
       strikingBase: "boxing",
       liftsPerWeek: 2,
       freeHours: [],
-    } as const;
+    };
     const others = await db
       .insert(athletes)
       .values([1, 2, 3, 4].map((n) => ({ ...base, name: `Other ${n}` })))
