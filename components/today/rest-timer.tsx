@@ -44,14 +44,14 @@ export function RestTimer() {
         <div
           role="group"
           aria-label="Rest"
-          className="on-bar sticky bottom-0 z-10 flex items-center gap-3 border-t border-bar-line bg-bar px-4.5 py-2.5 text-bar-text"
+          className="on-bar sticky bottom-0 z-10 flex items-center gap-3 border-t border-bar-line bg-bar px-4.5 pt-2.5 pb-[max(0.625rem,env(safe-area-inset-bottom))] text-bar-text"
         >
           <p role="timer" aria-live="off" className="min-w-20 text-2xl font-semibold">
             {state.over ? "+" : ""}
             {clockText(state.seconds)}
           </p>
-          <p className="min-w-0 flex-1 truncate text-sm text-bar-quiet">
-            {state.over ? "Rest is over" : "Rest"}, then {rest.next}
+          <p className="min-w-0 flex-1 text-sm leading-tight text-bar-quiet">
+            {state.over ? "Rest is over." : "Rest."} Next: {rest.next}
           </p>
           <button type="button" className={BUTTON} onClick={() => restStore.stretch(30)}>
             +30 s

@@ -47,17 +47,24 @@ const STAFF_PAGES = [
   "OTHER",
   "OWN/changes",
 ];
-const PLANNING = ["/camps/new", "/athletes/new", "/house-rules"];
+const PLANNING = ["/camps/new", "/athletes/new", "/house-rules", "/today"];
 
 const SEES: Record<Role, Sees> = {
-  head: { nav: NAV, pages: [...COACH, ...STAFF_PAGES], missing: [] },
-  strength: { nav: NAV, pages: [...COACH, ...STAFF_PAGES], missing: [] },
+  head: { nav: NAV, pages: [...COACH, ...STAFF_PAGES], missing: ["/today"] },
+  strength: { nav: NAV, pages: [...COACH, ...STAFF_PAGES], missing: ["/today"] },
   skills: { nav: NAV.slice(0, 4), pages: STAFF_PAGES, missing: PLANNING },
   medic: { nav: NAV.slice(0, 4), pages: STAFF_PAGES, missing: PLANNING },
   athlete: {
-    nav: ["Camps"],
-    pages: ["OWN", "OWN-ATHLETE", "/settings"],
-    missing: [...PLANNING, "/timetable", "OTHER", "OTHER-ATHLETE", "OWN/changes", "OTHER/changes"],
+    nav: ["Today", "Camps"],
+    pages: ["/today", "OWN", "OWN-ATHLETE", "/settings"],
+    missing: [
+      ...PLANNING.filter((path) => path !== "/today"),
+      "/timetable",
+      "OTHER",
+      "OTHER-ATHLETE",
+      "OWN/changes",
+      "OTHER/changes",
+    ],
   },
   guest: {
     nav: ["Camps"],
@@ -100,15 +107,19 @@ for (const [role, { nav, pages, missing }] of Object.entries(SEES) as [Role, See
   });
 }
 
-test("the first pages of an athlete and a guest are the one camp they have", async ({ browser }) => {
-  for (const role of ["athlete", "guest"] as const) {
-    const page = await demoPage(browser, role);
-    await page.goto("/board");
-    await expect(heading(page)).toContainText("Tamsin Velloso");
-    expect(new URL(page.url()).pathname).toBe(`/camps/${demo.own.id}`);
-    await page.context().close();
-  }
+test("the first page of an athlete is their day, that of a guest the one camp they follow", async ({
+  browser,
+}) => {
+  const guest = await demoPage(browser, "guest");
+  await guest.goto("/board");
+  await expect(heading(guest)).toContainText("Tamsin Velloso");
+  expect(new URL(guest.url()).pathname).toBe(`/camps/${demo.own.id}`);
+  await guest.context().close();
   const athlete = await demoPage(browser, "athlete");
+  await athlete.goto("/board");
+  expect(new URL(athlete.url()).pathname).toBe("/today");
+  await athlete.goto("/camps");
+  expect(new URL(athlete.url()).pathname).toBe(`/camps/${demo.own.id}`);
   await athlete.goto("/athletes");
   expect(new URL(athlete.url()).pathname).toBe(`/athletes/${demo.own.athlete.id}`);
   await athlete.context().close();
