@@ -61,6 +61,11 @@ export function CampHead({ view, book, today, onBout, onAdd }: CampHeadProps) {
             Changes
           </LinkButton>
         ) : null}
+        {may.includes("report.read") && (book.status === "off" || dayFromIso(book.bout.date) <= today) ? (
+          <LinkButton size="small" href={`/camps/${view.id}/report`}>
+            Report
+          </LinkButton>
+        ) : null}
         {may.includes("sport.write") && book.status === "on" ? (
           <Button size="small" onClick={onAdd}>
             Add a session
