@@ -2,6 +2,7 @@ import { and, asc, desc, eq, gte, sql } from "drizzle-orm";
 import type { Exercise } from "../../lib/engine/prescription/exercise";
 import type { Tx } from "../client";
 import {
+  athletes,
   camps,
   exerciseEdits,
   libraryExercises,
@@ -177,17 +178,29 @@ export interface ExerciseUse {
  * Where a team's exercises are used; those that are not used are left out.
  * @param today YYYY-MM-DD: camps with their bout on it or later are current.
  * @param setsFrom YYYY-MM-DD: first day of the sets that are counted.
+ * @param exerciseId only this one; all where it is left out.
  */
 export async function listExerciseUse(
   tx: Tx,
   teamId: string,
-  { today, setsFrom }: { readonly today: string; readonly setsFrom: string },
+  {
+    today,
+    setsFrom,
+    exerciseId,
+  }: { readonly today: string; readonly setsFrom: string; readonly exerciseId?: string },
 ): Promise<ExerciseUse[]> {
   const current = tx
     .select({ id: camps.id })
     .from(camps)
     .where(and(eq(camps.teamId, teamId), eq(camps.status, "on"), gte(camps.boutDate, today)));
   const written = sql`jsonb_path_query(${liftEdits.edit}, '$.lines.*.exercise') #>> '{}'`;
+  // Naming the athletes lets the index by athlete and exercise find one exercise's sets.
+  const roster = tx.select({ id: athletes.id }).from(athletes).where(eq(athletes.teamId, teamId));
+  const wanted =
+    exerciseId === undefined
+      ? sql``
+      : sql`and ${loggedSets.exerciseId} = ${exerciseId} and ${loggedSets.athleteId} in ${roster}`;
+  const named = exerciseId === undefined ? sql`` : sql`where exercise_id = ${exerciseId}`;
   const rows = await tx.execute<{ exercise_id: string; camps: number; sets: number }>(sql`
     with used as (
       select ${swaps.toExercise} as exercise_id, ${swaps.campId} as camp_id, 0 as sets
@@ -198,13 +211,13 @@ export async function listExerciseUse(
       select ${loggedSets.exerciseId}, ${loggedSets.campId},
         (count(*) filter (where ${loggedSets.day} >= ${setsFrom}))::int
       from ${loggedSets} where ${loggedSets.teamId} = ${teamId}
-        and (${loggedSets.day} >= ${setsFrom} or ${loggedSets.campId} in ${current})
+        and (${loggedSets.day} >= ${setsFrom} or ${loggedSets.campId} in ${current}) ${wanted}
       group by 1, 2
     )
     select exercise_id,
       count(distinct camp_id) filter (where camp_id in ${current})::int as camps,
       sum(sets)::int as sets
-    from used group by 1`);
+    from used ${named} group by 1`);
   return rows
     .map((row) => ({ exerciseId: row.exercise_id, camps: row.camps, sets: row.sets }))
     .filter((use) => use.camps > 0 || use.sets > 0);

@@ -85,6 +85,7 @@ describe("the team's list", () => {
     }
     const use = (await listed()).find((one) => one.exercise.id === id)?.use;
     expect(use).toEqual({ camps: 1, sets: 2 });
+    expect((await read(id)).use).toEqual(use);
   });
 });
 

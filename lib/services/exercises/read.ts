@@ -17,10 +17,13 @@ const SET_DAYS = 56;
 
 export type ById = { params: Record<string, string> };
 
-async function countUse(ctx: TeamContext): Promise<(exerciseId: string) => ExerciseSummary["use"]> {
+async function countUse(
+  ctx: TeamContext,
+  exerciseId?: string,
+): Promise<(exerciseId: string) => ExerciseSummary["use"]> {
   const today = await todayOf(ctx);
   const setsFrom = isoFromDay((dayFromIso(today) - SET_DAYS) as Day);
-  const rows = await listExerciseUse(ctx.db, ctx.teamId, { today, setsFrom });
+  const rows = await listExerciseUse(ctx.db, ctx.teamId, { today, setsFrom, exerciseId });
   const byId = new Map(rows.map(({ exerciseId, camps, sets }) => [exerciseId, { camps, sets }]));
   return (exerciseId) => byId.get(exerciseId) ?? { camps: 0, sets: 0 };
 }
@@ -42,7 +45,7 @@ export async function readExercise(ctx: TeamContext, { params }: ById): Promise<
   if (!row) throw notFound();
   const [edits, countOf] = await Promise.all([
     listExerciseEdits(ctx.db, ctx.teamId, row.exercise.id),
-    countUse(ctx),
+    countUse(ctx, row.exercise.id),
   ]);
   return {
     ...summaryOf(row, countOf(row.exercise.id)),
