@@ -20,6 +20,8 @@ export const LIMITS = {
   "reset-confirm-address": { points: 30, seconds: 15 * MINUTES },
   "invite-accept-address": { points: 30, seconds: 15 * MINUTES },
   "invite-send-team": { points: 50, seconds: 24 * 60 * MINUTES },
+  // Each question mails the coaches: enough for a phone that tries again, too little to flood a mailbox.
+  "request-ask-account": { points: 40, seconds: 24 * 60 * MINUTES },
   "password-account": { points: 10, seconds: 15 * MINUTES },
 } as const;
 export type LimitName = keyof typeof LIMITS;

@@ -1,7 +1,7 @@
 import { randomUUID } from "node:crypto";
 import { and, eq } from "drizzle-orm";
 import { describe, expect, it } from "vitest";
-import { auditLog, holds, loggedSets, mails, notices, sessionLogs, sessions } from "@/db/schema";
+import { auditLog, holds, loggedSets, mails, notices, revisions, sessionLogs, sessions } from "@/db/schema";
 import { sessionLogSchema } from "@/lib/schemas/today";
 import { liftHold } from "@/lib/services/holds/holds";
 import { testDatabase } from "../setup/database";
@@ -199,7 +199,9 @@ describe("a knock to the head", () => {
         expect(body.includes("Left temple")).toBe(nameOf(mail.recipient) === "medic");
       }
     }
-    // The plan that changed is told in the usual way: the knock stands in no summary.
+    // The plan that changed is told in the usual way, to people who may not read of a knock: no summary says it.
+    const saved = await db.select().from(revisions).where(eq(revisions.campId, campId));
+    expect(saved.at(-1)?.summary).toBe("A hold was set");
     const noticed = await db.select().from(notices).where(eq(notices.campId, campId));
     expect(noticed.map(({ userId }) => userId)).toContain(as("head").userId);
   });

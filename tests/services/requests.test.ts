@@ -2,6 +2,7 @@ import { randomUUID } from "node:crypto";
 import { eq } from "drizzle-orm";
 import { describe, expect, it } from "vitest";
 import { camps, mails, requests } from "@/db/schema";
+import { LIMITS, rateLimit } from "@/lib/auth/limits";
 import { readToday } from "@/lib/services/today/read-today";
 import { answerRequest, askRequest, withdrawRequest } from "@/lib/services/requests/requests";
 import { testDatabase } from "../setup/database";
@@ -88,6 +89,16 @@ describe("I can't make it", () => {
     await answer(scene, again.id, "accepted");
     const late = withdrawRequest(scene.as("athlete"), { params: { id: again.id } });
     expect((await refusal(late)).code).toBe("conflict");
+  });
+
+  it("cannot be used to flood the coaches with mail", async () => {
+    const scene = await dayScene(db);
+    const { id: sid } = await scene.sessionOn("2026-12-01");
+    const { points } = LIMITS["request-ask-account"];
+    for (let tried = 0; tried < points; tried++)
+      await rateLimit(db, "request-ask-account", scene.as("athlete").userId);
+    expect((await refusal(ask(scene, sid))).code).toBe("too-many");
+    expect(await mailsOf(scene)).toEqual([]);
   });
 
   it("only the athlete asks and takes back, only coaches answer, and a foreign request is missing", async () => {

@@ -53,7 +53,7 @@ const saidIn = ({ note, pain, painPlace }: SessionLog): string[] => [
  */
 export async function actOnKnock(tx: Tx, ctx: TeamContext, knock: KnockIn): Promise<void> {
   const from = await holdFor(tx, ctx, knock);
-  if (from !== null) await replanAthlete(tx, ctx, knock.athlete.id, "A hold after a knock to the head");
+  if (from !== null) await replanAthlete(tx, ctx, knock.athlete.id, "A hold was set");
   const members = await listMembers(tx, ctx.teamId);
   for (const { userId, email, role } of members) {
     if ((role !== "head" && role !== "medic") || userId === ctx.userId) continue;

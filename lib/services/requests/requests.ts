@@ -9,6 +9,7 @@ import {
   type RequestRow,
 } from "@/db/queries/requests";
 import type { Tx } from "@/db/client";
+import { rateLimit } from "@/lib/auth/limits";
 import { AppError, notFound } from "@/lib/errors";
 import { queueMail } from "@/lib/mail/queue";
 import { requestAnswerMail, requestMail } from "@/lib/mail/templates/request";
@@ -64,6 +65,7 @@ export async function askRequest(
   ctx: TeamContext,
   { params, body }: ById & { body: { key: string; reason: string } },
 ): Promise<RequestView> {
+  await rateLimit(ctx.db, "request-ask-account", ctx.userId);
   return ctx.db.transaction(async (tx) => {
     const camp = await loadCamp(tx, ctx, params.id ?? "", { lock: true });
     if (!can(ctx.member, "requests.ask", camp.athlete.id))
