@@ -59,6 +59,15 @@ describe("kilograms on the athlete's plates", () => {
     expect(loadOnPlates(140, { low: 0, high: 0 }, { unit: "kg", step: 2.5 })).toBeNull();
   });
 
+  it("never asks for less than an empty bar, and for none where the bar alone is above the range", () => {
+    const plates = { unit: "kg", step: 2.5 } as const;
+    expect(loadOnPlates(120, { low: 0, high: 30 }, plates, { bar: true })).toBe(20);
+    expect(loadOnPlates(120, { low: 0, high: 30 }, plates)).toBe(17.5);
+    expect(loadOnPlates(60, { low: 0, high: 30 }, plates, { bar: true })).toBeNull();
+    const pounds = { unit: "lb", step: 10 } as const;
+    expect(loadOnPlates(150, { low: 0, high: 30 }, pounds, { bar: true })).toBeCloseTo(50 * KG_PER_LB, 9);
+  });
+
   it("always a multiple of the step and never above the range; inside it wherever a step is (5,000 loads)", () => {
     fc.assert(
       fc.property(

@@ -113,8 +113,9 @@ export interface LoadParts {
 
 const withoutBest = (reserve: Range): LineLoad => ({ of: "reserve", reserve, kg: null });
 
-function ofBest(percent: Range, { best, plates }: LoadParts): LineLoad | null {
-  const kg = best && loadOnPlates(best.kg, percent, plates);
+function ofBest(percent: Range, { exercise, best, plates }: LoadParts): LineLoad | null {
+  const bar = exercise.equipment.some((thing) => thing === "barbell" || thing === "trap-bar");
+  const kg = best && loadOnPlates(best.kg, percent, plates, { bar });
   return best && kg !== null ? { of: "best", percent, kg, best } : null;
 }
 
