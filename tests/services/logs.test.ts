@@ -4,6 +4,8 @@ import { describe, expect, it } from "vitest";
 import { auditLog, holds, loggedSets, mails, notices, revisions, sessionLogs, sessions } from "@/db/schema";
 import { sessionLogSchema } from "@/lib/schemas/today";
 import { liftHold } from "@/lib/services/holds/holds";
+import { createCamp } from "@/lib/services/camps/create";
+import { campForm } from "../factories/camp-book";
 import { testDatabase } from "../setup/database";
 import { NOW, dayScene, done, keep, refusal } from "./day-scene";
 
@@ -201,9 +203,45 @@ describe("a knock to the head", () => {
     }
     // The plan that changed is told in the usual way, to people who may not read of a knock: no summary says it.
     const saved = await db.select().from(revisions).where(eq(revisions.campId, campId));
-    expect(saved.at(-1)?.summary).toBe("A hold was set");
+    expect(saved.map(({ summary }) => summary).sort()).toEqual([
+      "A hold was set",
+      "Laid out the camp, 8 weeks",
+    ]);
     const noticed = await db.select().from(notices).where(eq(notices.campId, campId));
     expect(noticed.map(({ userId }) => userId)).toContain(as("head").userId);
+  });
+
+  it("plans every open camp of the athlete again, also where two knocks arrive at once", async () => {
+    const scene = await dayScene(db);
+    const { as, athlete, campId, sessionOn } = scene;
+    const later = campForm({ athlete: { id: athlete.id }, weighIn: null });
+    const second = await createCamp(as("head", new Date("2026-11-20T12:00:00Z")), {
+      body: { ...later, weeks: 10, bout: { ...later.bout, date: "2027-01-30" } },
+    });
+    const rows = await db.select().from(sessions).where(eq(sessions.campId, second.id));
+    const other = rows.find((row) => row.source === "sport" && row.startsAt < NOW);
+    const { id } = await sessionOn("2026-11-30");
+    await Promise.all([
+      keep(as("athlete"), campId, id, knock),
+      keep(as("head"), second.id, other?.id ?? "", knock),
+    ]);
+    const standing = await db.select().from(holds).where(eq(holds.athleteId, athlete.id));
+    expect(standing.filter((hold) => hold.toDay === null).length).toBeGreaterThan(0);
+    for (const camp of [campId, second.id]) {
+      const ahead = (await db.select().from(sessions).where(eq(sessions.campId, camp))).filter(
+        (row) => row.startsAt > NOW && row.status === "confirmed" && row.source === "lift",
+      );
+      expect(ahead).toEqual([]);
+    }
+  });
+
+  it("in the bout itself is logged with the bout, and tells like any other", async () => {
+    const { as, team, athlete, campId } = await dayScene(db);
+    const after = as("athlete", new Date("2027-01-09T23:00:00Z"));
+    expect(await keep(after, campId, "bout", { ...knock, hardRounds: 3 })).toMatchObject({ knock: true });
+    expect(await mailsOf(team.id)).toHaveLength(2);
+    const standing = await db.select().from(holds).where(eq(holds.athleteId, athlete.id));
+    expect(standing).toMatchObject([{ fromDay: "2027-01-10", toDay: null }]);
   });
 
   it("a retry, a later edit and a second knock set no second hold and send no second mail", async () => {
