@@ -3,9 +3,10 @@
 import { useQueryClient } from "@tanstack/react-query";
 import { useCallback, useEffect, useState } from "react";
 import { keepView } from "@/lib/offline/device";
+import type { Entry } from "@/lib/offline/entry";
 import { flush, type Round } from "@/lib/offline/flush";
 import { settled } from "@/lib/offline/overlay";
-import type { Queue } from "@/lib/offline/queue";
+import { contentOf, type Queue } from "@/lib/offline/queue";
 import type { QueueStore } from "@/lib/offline/queue-store";
 import { deliver, todayQuery } from "@/lib/query/today";
 
@@ -31,16 +32,22 @@ export function useFlushing(store: QueueStore, queue: Queue): Round | null {
     const { userId } = store;
     const { queryKey } = todayQuery(userId);
     let any = false;
+    const show = async (entry: Entry, version: number | null): Promise<void> => {
+      any = true;
+      // A read that began before this write must not undo it on the screen.
+      await client.cancelQueries({ queryKey });
+      const view = client.setQueryData(queryKey, (shown) => shown && settled(shown, entry, version));
+      if (view) await keepView(userId, view);
+    };
     const result = await alone(`bellward-send:${userId}`, () =>
       flush(store, {
         send: deliver,
-        onSent: async (entry, version) => {
-          any = true;
-          // A read that began before this write must not undo it on the screen.
-          await client.cancelQueries({ queryKey });
-          const view = client.setQueryData(queryKey, (shown) => shown && settled(shown, entry, version));
-          if (view) await keepView(userId, view);
-        },
+        onSent: show,
+        // Below what waits here stands from now on what the other device said.
+        onStale: (entry, theirs) =>
+          entry.work.kind === "log"
+            ? show({ ...entry, work: { ...entry.work, log: contentOf(theirs) } }, theirs.version)
+            : Promise.resolve(),
       }),
     );
     if (result) setRound(result);

@@ -1,5 +1,6 @@
 import type { Entry, Stuck } from "./entry";
 import { nextToSend, refused, sent, trying } from "./queue";
+import type { LogView } from "@/lib/schemas/today";
 import type { QueueStore } from "./queue-store";
 
 /** What became of one write. */
@@ -14,6 +15,8 @@ export interface Delivery {
   readonly send: (entry: Entry) => Promise<Outcome>;
   /** Called before the entry leaves the queue, so that the page never shows neither. */
   readonly onSent: (entry: Entry, version: number | null) => Promise<void>;
+  /** Called before a stale entry is put aside: the page then knows what it was changed to. */
+  readonly onStale: (entry: Entry, theirs: LogView) => Promise<void>;
 }
 
 /** How a round ended: all that could be sent is sent, or what stood in the way. */
@@ -39,6 +42,7 @@ export async function flush(store: Pick<QueueStore, "read" | "change">, delivery
       await delivery.onSent(entry, outcome.version);
       await store.change((waiting) => sent(waiting, entry.key, outcome.version));
     } else {
+      if (outcome.stuck.why === "stale") await delivery.onStale(entry, outcome.stuck.theirs);
       await store.change((waiting) => refused(waiting, entry.key, outcome.stuck));
     }
   }

@@ -35,7 +35,7 @@ describe("sending what waits", () => {
       keys.push(entry.key);
       return Promise.resolve({ is: "sent", version: 1 });
     };
-    expect(await flush(store, { send, onSent: nothing })).toBe("done");
+    expect(await flush(store, { send, onSent: nothing, onStale: nothing })).toBe("done");
     expect(keys).toEqual(["a", "b"]);
     expect(store.read()).toEqual([]);
   });
@@ -48,17 +48,17 @@ describe("sending what waits", () => {
       keys.push(entry.key);
       return Promise.resolve(reachable ? { is: "sent", version: 1 } : { is: "unreachable" });
     };
-    expect(await flush(store, { send, onSent: nothing })).toBe("unreachable");
+    expect(await flush(store, { send, onSent: nothing, onStale: nothing })).toBe("unreachable");
     expect(store.read().map(({ tried }) => tried)).toEqual([true, false]);
     reachable = true;
-    expect(await flush(store, { send, onSent: nothing })).toBe("done");
+    expect(await flush(store, { send, onSent: nothing, onStale: nothing })).toBe("done");
     expect(keys).toEqual(["a", "a", "b"]);
   });
 
   it("keeps everything when the session has ended", async () => {
     const store = memoryStore([logOf("a", "1")]);
     const send = (): Promise<Outcome> => Promise.resolve({ is: "signed-out" });
-    expect(await flush(store, { send, onSent: nothing })).toBe("signed-out");
+    expect(await flush(store, { send, onSent: nothing, onStale: nothing })).toBe("signed-out");
     expect(store.read()).toHaveLength(1);
   });
 
@@ -70,8 +70,25 @@ describe("sending what waits", () => {
           ? { is: "stuck", stuck: { why: "refused", text: "Too late.", errors: [] } }
           : { is: "sent", version: 1 },
       );
-    expect(await flush(store, { send, onSent: nothing })).toBe("done");
+    expect(await flush(store, { send, onSent: nothing, onStale: nothing })).toBe("done");
     expect(store.read().map(({ key, stuck }) => [key, stuck?.why])).toEqual([["a", "refused"]]);
+  });
+
+  it("shows what a stale write was changed to before it is put aside", async () => {
+    const store = memoryStore([logOf("a", "mine")]);
+    const theirs = { ...EMPTY_LOG, note: "theirs", version: 4, loggedAt: "", changedAt: "" };
+    const shown: [string, number][] = [];
+    await flush(store, {
+      send: () => Promise.resolve({ is: "stuck", stuck: { why: "stale", theirs } }),
+      onSent: nothing,
+      onStale: (entry, { version }) => {
+        expect(store.read()[0]?.stuck).toBeNull();
+        shown.push([entry.key, version]);
+        return nothing();
+      },
+    });
+    expect(shown).toEqual([["a", 4]]);
+    expect(store.read()[0]?.stuck?.why).toBe("stale");
   });
 
   it("sends what is written while it sends, on top of the version that was just given", async () => {
@@ -83,7 +100,7 @@ describe("sending what waits", () => {
       if (entry.key === "a") await store.change((queue) => enqueue(queue, logOf("b", "2")));
       return { is: "sent", version: entry.work.baseVersion + 1 };
     };
-    await flush(store, { send, onSent: nothing });
+    await flush(store, { send, onSent: nothing, onStale: nothing });
     expect(seen).toEqual([
       ["a", 0],
       ["b", 1],
