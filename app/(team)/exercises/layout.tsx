@@ -1,11 +1,8 @@
-import type { Metadata } from "next";
 import type { ReactNode } from "react";
 import { ExerciseDesk } from "@/components/exercises/exercise-desk";
 import { pageContext } from "@/lib/http/page";
 import { can } from "@/lib/policy";
 import { listTeamExercises } from "@/lib/services/exercises/read";
-
-export const metadata: Metadata = { title: "Exercises" };
 
 /** The list stays while one exercise after the other is opened beside it. */
 export default async function ExercisesLayout({ children }: { readonly children: ReactNode }) {

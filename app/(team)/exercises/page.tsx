@@ -1,4 +1,7 @@
+import type { Metadata } from "next";
 import { EmptyState } from "@/components/ui/empty-state";
+
+export const metadata: Metadata = { title: "Exercises" };
 
 /** Beside the list, before one is picked. */
 export default function ExercisesPage() {
