@@ -1,6 +1,7 @@
 import type { Metadata } from "next";
 import { MessagePage } from "@/components/shell/message-page";
-import { LinkButton } from "@/components/ui/link-button";
+import { buttonLook } from "@/components/ui/button-look";
+import { PageLink } from "@/components/ui/page-link";
 
 export const metadata: Metadata = { title: "Not found" };
 
@@ -11,10 +12,12 @@ export default function NotFound() {
         title="There is nothing at this address"
         actions={
           <>
-            <LinkButton href="/camps" variant="primary">
+            <PageLink href="/camps" className={buttonLook({ variant: "primary" })}>
               To the camps
-            </LinkButton>
-            <LinkButton href="/">To the start page</LinkButton>
+            </PageLink>
+            <PageLink href="/" className={buttonLook({})}>
+              To the start page
+            </PageLink>
           </>
         }
       >

@@ -1,11 +1,11 @@
 import type { Metadata } from "next";
-import Link from "next/link";
 import { redirect } from "next/navigation";
 import { SignInForm } from "@/components/account/sign-in-form";
 import { NarrowPage } from "@/components/shell/narrow-page";
 import { Notice } from "@/components/ui/notice";
 import { safeNext } from "@/lib/auth/next-path";
 import { currentMember } from "@/lib/auth/page-member";
+import { PageLink } from "@/components/ui/page-link";
 
 export const metadata: Metadata = { title: "Sign in" };
 
@@ -31,12 +31,12 @@ export default async function SignInPage({ searchParams }: SignInProps) {
       title="Sign in"
       below={
         <p className="flex flex-wrap gap-x-6">
-          <Link href="/reset" className={LINK}>
+          <PageLink href="/reset" className={LINK}>
             Forgot the password?
-          </Link>
-          <Link href="/sign-up" className={LINK}>
+          </PageLink>
+          <PageLink href="/sign-up" className={LINK}>
             Make a team
-          </Link>
+          </PageLink>
         </p>
       }
     >

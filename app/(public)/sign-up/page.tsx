@@ -1,9 +1,9 @@
 import type { Metadata } from "next";
-import Link from "next/link";
 import { redirect } from "next/navigation";
 import { SignUpForm } from "@/components/account/sign-up-form";
 import { NarrowPage } from "@/components/shell/narrow-page";
 import { currentMember } from "@/lib/auth/page-member";
+import { PageLink } from "@/components/ui/page-link";
 
 export const metadata: Metadata = { title: "Make a team" };
 
@@ -25,12 +25,12 @@ export default async function SignUpPage({ searchParams }: SignUpProps) {
           : "Make a team and the camp is saved in it. You become its head coach and invite the others."
       }
       below={
-        <Link
+        <PageLink
           href={`/sign-in?next=${encodeURIComponent(carried)}`}
           className="inline-flex min-h-11 items-center font-semibold text-ink underline"
         >
           I have an account: sign in
-        </Link>
+        </PageLink>
       }
     >
       <SignUpForm camp={camp} />

@@ -1,5 +1,4 @@
 import type { Metadata } from "next";
-import Link from "next/link";
 import { InviteForm } from "@/components/account/invite-form";
 import { MessagePage } from "@/components/shell/message-page";
 import { NarrowPage } from "@/components/shell/narrow-page";
@@ -7,6 +6,7 @@ import { currentMember } from "@/lib/auth/page-member";
 import { publicContext } from "@/lib/http/page";
 import { ROLE_TITLES } from "@/lib/policy";
 import { readInvite } from "@/lib/services/accounts/accept-invite";
+import { PageLink } from "@/components/ui/page-link";
 
 export const metadata: Metadata = { title: "Invitation", robots: { index: false }, referrer: "no-referrer" };
 
@@ -32,9 +32,12 @@ export default async function InvitePage({ params }: InviteProps) {
       lead={`${invitedBy ?? "The team"} invites ${email}. Role: ${ROLE_TITLES[role]}.`}
       below={
         hasAccount && !signedIn ? (
-          <Link href="/reset" className="inline-flex min-h-11 items-center font-semibold text-ink underline">
+          <PageLink
+            href="/reset"
+            className="inline-flex min-h-11 items-center font-semibold text-ink underline"
+          >
             Forgot the password?
-          </Link>
+          </PageLink>
         ) : undefined
       }
     >
