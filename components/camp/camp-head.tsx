@@ -56,6 +56,9 @@ export function CampHead({ view, book, today, onBout, onAdd }: CampHeadProps) {
         <LinkButton size="small" href="/settings#feeds">
           Subscribe
         </LinkButton>
+        <LinkButton size="small" href={`/camps/${view.id}/sheet`}>
+          Sheet
+        </LinkButton>
         {may.includes("camps.history") ? (
           <LinkButton size="small" href={`/camps/${view.id}/changes`}>
             Changes

@@ -12,10 +12,11 @@ const MINUTE = 60_000;
 const OTHER_ZONES = ["America/Sao_Paulo", "Pacific/Apia", "Asia/Kolkata"];
 const TEST_CLUSTER = inData("test-pg");
 
-/** Chromium for the browser tests, and Python's iCalendar reader as a second opinion on the feed. */
+/** Chromium for the browser tests, a PDF reader for what it prints, and Python's iCalendar reader as a second opinion on the feed. */
 async function ensureDebianPackages() {
   if (!existsSync("/usr/bin/chromium"))
     await installPackages(["chromium", "fonts-liberation"], "Chromium", say);
+  if (!existsSync("/usr/bin/pdfinfo")) await installPackages(["poppler-utils"], "poppler-utils", say);
   const reader = await run("/usr/bin/python3", ["-c", "import icalendar"]);
   if (reader.code !== 0) await installPackages(["python3-icalendar"], "python3-icalendar", say);
 }

@@ -15,7 +15,7 @@ import { dropSwap, saveSwap } from "@/lib/services/prescription/swap";
 import { readToday } from "@/lib/services/today/read-today";
 import { campForm } from "../factories/camp-book";
 import { testDatabase } from "../setup/database";
-import { dayScene, done, keep, NOW, refusal, type DayScene } from "./day-scene";
+import { dayScene, done, keep, refusal, type DayScene } from "./day-scene";
 import { coming, first, liftOf, lineOf, read } from "./prescription-scene";
 
 const { db } = await testDatabase();

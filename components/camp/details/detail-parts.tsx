@@ -2,6 +2,7 @@ import type { ReactNode } from "react";
 import { KindMark } from "@/components/session/kind-mark";
 import type { WorkLook } from "@/components/session/kinds";
 import { Cross } from "@/components/ui/icons";
+import { LinkButton } from "@/components/ui/link-button";
 
 interface DetailHeadProps {
   readonly look: WorkLook;
@@ -32,6 +33,15 @@ export function DetailHead({ look, title, when, facts, onClose }: DetailHeadProp
     </header>
   );
 }
+
+/** To the page of a session: what is asked, and what was logged. */
+export const OpenSession = ({ campId, id }: { readonly campId: string; readonly id: string }) => (
+  <p className="px-4 pb-3">
+    <LinkButton size="small" href={`/camps/${campId}/sessions/${encodeURIComponent(id)}`}>
+      Open the session
+    </LinkButton>
+  </p>
+);
 
 interface PartProps {
   readonly title: string;

@@ -10,7 +10,7 @@ import { moveChange } from "../move-change";
 import { isPastAt } from "../picture";
 import type { Desk } from "../use-desk";
 import { CoachFactor } from "./coach-factor";
-import { DetailHead, DetailPart } from "./detail-parts";
+import { DetailHead, DetailPart, OpenSession } from "./detail-parts";
 import { MoveForm } from "./move-form";
 import { moveSpan } from "./move-span";
 
@@ -81,6 +81,9 @@ export function LiftDetails({ desk, lift, onClose }: LiftDetailsProps) {
         }
         onClose={onClose}
       />
+      {standing.plan.lifts.some(({ id }) => id === lift.id) ? (
+        <OpenSession campId={view.id} id={lift.id} />
+      ) : null}
       {past ? <p className="px-4 pb-3 text-sm">This is past, and what is past stays.</p> : null}
       {detail ? (
         <>

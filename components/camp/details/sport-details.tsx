@@ -10,7 +10,7 @@ import { campSpan } from "@/lib/book/camp-span";
 import { moveChange } from "../move-change";
 import { isPastAt } from "../picture";
 import type { Desk } from "../use-desk";
-import { DetailHead, DetailPart } from "./detail-parts";
+import { DetailHead, DetailPart, OpenSession } from "./detail-parts";
 import { MoveForm } from "./move-form";
 import { moveSpan } from "./move-span";
 import { ruleText } from "./recurrence";
@@ -47,6 +47,7 @@ export function SportDetails({ desk, session, onEdit, onClose }: SportDetailsPro
         {SPORT_LOOKS[session.kind].label}
         {entry?.rrule ? `, ${ruleText(entry.rrule)}` : ", once"}
       </p>
+      {saved ? <OpenSession campId={view.id} id={session.id} /> : null}
       {past ? <p className="px-4 pb-3 text-sm">This is past, and what is past stays.</p> : null}
       {broken.length > 0 ? (
         <DetailPart title="Rules it has to do with">
