@@ -1,6 +1,6 @@
-import { and, asc, desc, eq, inArray } from "drizzle-orm";
+import { and, desc, eq, inArray } from "drizzle-orm";
 import type { Tx } from "../client";
-import { athletes, requests } from "../schema";
+import { requests } from "../schema";
 
 export type RequestRow = typeof requests.$inferSelect;
 
@@ -16,16 +16,6 @@ export async function listRequestsOfCamps(
     .from(requests)
     .where(and(eq(requests.teamId, teamId), inArray(requests.campId, [...campIds])))
     .orderBy(desc(requests.createdAt), desc(requests.id));
-}
-
-/** Requests of a team that wait for an answer, oldest first, with the athlete's name. */
-export async function listOpenRequests(tx: Tx, teamId: string) {
-  return tx
-    .select({ request: requests, athleteName: athletes.name })
-    .from(requests)
-    .innerJoin(athletes, and(eq(athletes.id, requests.athleteId), eq(athletes.teamId, requests.teamId)))
-    .where(and(eq(requests.teamId, teamId), eq(requests.state, "asked")))
-    .orderBy(asc(requests.createdAt), asc(requests.id));
 }
 
 /** The request, locked. */
