@@ -35,31 +35,42 @@ interface Sees {
   readonly pages: readonly string[];
   readonly missing: readonly string[];
 }
-const NAV = ["Board", "Camps", "Athletes", "Timetable", "House rules"];
-const COACH = ["/board", "/camps", "/camps/new", "/athletes", "/athletes/new", "/timetable", "/house-rules"];
+const NAV = ["Board", "Camps", "Athletes", "Timetable", "Exercises", "House rules"];
+const COACH = [
+  "/board",
+  "/camps",
+  "/camps/new",
+  "/athletes",
+  "/athletes/new",
+  "/timetable",
+  "/exercises/new",
+  "/house-rules",
+];
 const STAFF_PAGES = [
   "/board",
   "/camps",
   "/athletes",
   "/timetable",
+  "/exercises",
   "/settings",
   "OWN",
   "OTHER",
   "OWN/changes",
 ];
-const PLANNING = ["/camps/new", "/athletes/new", "/house-rules", "/today"];
+const PLANNING = ["/camps/new", "/athletes/new", "/exercises/new", "/house-rules", "/today"];
 
 const SEES: Record<Role, Sees> = {
   head: { nav: NAV, pages: [...COACH, ...STAFF_PAGES], missing: ["/today"] },
   strength: { nav: NAV, pages: [...COACH, ...STAFF_PAGES], missing: ["/today"] },
-  skills: { nav: NAV.slice(0, 4), pages: STAFF_PAGES, missing: PLANNING },
-  medic: { nav: NAV.slice(0, 4), pages: STAFF_PAGES, missing: PLANNING },
+  skills: { nav: NAV.slice(0, 5), pages: STAFF_PAGES, missing: PLANNING },
+  medic: { nav: NAV.slice(0, 5), pages: STAFF_PAGES, missing: PLANNING },
   athlete: {
     nav: ["Today", "Camps"],
     pages: ["/today", "OWN", "OWN-ATHLETE", "/settings"],
     missing: [
       ...PLANNING.filter((path) => path !== "/today"),
       "/timetable",
+      "/exercises",
       "OTHER",
       "OTHER-ATHLETE",
       "OWN/changes",
@@ -69,7 +80,16 @@ const SEES: Record<Role, Sees> = {
   guest: {
     nav: ["Camps"],
     pages: ["OWN", "/settings"],
-    missing: [...PLANNING, "/timetable", "/athletes", "OTHER", "OWN-ATHLETE", "OTHER-ATHLETE", "OWN/changes"],
+    missing: [
+      ...PLANNING,
+      "/timetable",
+      "/exercises",
+      "/athletes",
+      "OTHER",
+      "OWN-ATHLETE",
+      "OTHER-ATHLETE",
+      "OWN/changes",
+    ],
   },
 };
 
