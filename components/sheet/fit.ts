@@ -1,5 +1,5 @@
 /** Type sizes of the sheet, points: what a wall is read at, and what a long week may shrink to. */
-export const LARGEST = 8.5;
+export const LARGEST = 10.5;
 export const SMALLEST = 4.5;
 export const STEP = 0.25;
 

@@ -66,7 +66,7 @@ export function Paper({ view }: { readonly view: SheetView }) {
         ref={paper}
         aria-label={`Sheet of ${athlete.name}`}
         style={{ fontSize: `${LARGEST}pt` }}
-        className="max-print:box-content max-print:p-[10mm] mx-auto flex h-[272mm] w-[190mm] flex-col gap-[1em] overflow-hidden bg-[#fff] leading-[1.25] text-[#000] [color-scheme:light]"
+        className="max-print:box-content max-print:p-[10mm] mx-auto flex h-[272mm] w-[190mm] flex-col gap-[1em] overflow-hidden bg-[#fff] px-[0.5mm] leading-[1.25] text-[#000] [color-scheme:light]"
       >
         <header className="flex items-end justify-between gap-[2em] border-b-2 border-[#000] pb-[0.6em]">
           <div className="min-w-0">

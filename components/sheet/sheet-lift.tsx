@@ -9,21 +9,24 @@ const CELL = "border border-[#000] px-[0.4em] py-[0.3em] align-top";
 const Boxes = ({ sets }: { readonly sets: number }) => (
   <span aria-hidden="true" className="flex flex-wrap gap-[0.25em]">
     {Array.from({ length: sets }, (_, index) => (
-      <span key={index} className="inline-block h-[2em] w-[3.1em] border border-[#000]" />
+      <span key={index} className="inline-block h-[1.9em] w-[3em] border border-[#000]" />
     ))}
   </span>
 );
 
 function LineRow({ line, unit }: { readonly line: LineView; readonly unit: MassUnit }) {
+  const load = loadText(line.load, unit);
   return (
     <tr className="break-inside-avoid">
       <th scope="row" className={`${CELL} text-left font-semibold [overflow-wrap:anywhere]`}>
         {line.name}
         {line.note ? <span className="block font-normal">Coach: {line.note}</span> : null}
       </th>
-      <td className={CELL}>{workText(line)}</td>
-      <td className={CELL}>{loadText(line.load, unit)}</td>
-      <td className={CELL}>{restText(line.rest)}</td>
+      <td className={CELL}>
+        <b className="font-semibold">{workText(line)}</b>
+        {load ? <span className="block">{load}</span> : null}
+        <span className="block">rest {restText(line.rest)}</span>
+      </td>
       <td className={CELL}>
         <Boxes sets={line.sets} />
       </td>
@@ -47,15 +50,19 @@ export function SheetLift({ session, lift, unit }: SheetLiftProps) {
       </h2>
       {lift.note ? <p>Coach: {lift.note}</p> : null}
       {lift.warmUp.length > 0 ? <p>Warm-up: {lift.warmUp.join(", ")}</p> : null}
-      <table className="mt-[0.3em] w-full border-collapse">
+      <table className="mt-[0.3em] w-full table-fixed border-collapse">
         <caption className="sr-only">{title}</caption>
         <thead>
           <tr>
-            {["Exercise", "Sets", "Load", "Rest", "Done"].map((head) => (
-              <th key={head} scope="col" className={`${CELL} text-left font-semibold`}>
-                {head}
-              </th>
-            ))}
+            <th scope="col" className={`${CELL} w-[36%] text-left font-semibold`}>
+              Exercise
+            </th>
+            <th scope="col" className={`${CELL} w-[27%] text-left font-semibold`}>
+              Asked
+            </th>
+            <th scope="col" className={`${CELL} text-left font-semibold`}>
+              Done
+            </th>
           </tr>
         </thead>
         <tbody>
