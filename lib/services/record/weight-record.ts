@@ -45,8 +45,8 @@ export function weightRecordOf(
   if (now.minor) return { off: "minor", reason: MINOR_WORDS };
   const weights = rows.map(({ day, kg }) => ({ date: day, kg }));
   const nearest = nearestOf(now);
-  const { limitKg, weighInDate } = nearest?.camp ?? {};
-  if (!nearest || limitKg == null || weighInDate == null) return { off: null, weights, to: null };
+  const { limitKg = null, weighInDate = null } = nearest?.camp ?? {};
+  if (!nearest || limitKg === null || weighInDate === null) return { off: null, weights, to: null };
   const weighIn = dayFromIso(weighInDate);
   const rules = withOverrides(now.rules);
   const points = rows.map(({ day, kg }) => ({ day: dayFromIso(day), kg: kg as Kg }));
