@@ -1,14 +1,44 @@
 import { and, asc, eq, gte, inArray, isNull, lte, or, sql } from "drizzle-orm";
 import type { PhaseSpan } from "../../lib/engine/types";
 import type { Tx } from "../client";
-import { athletes, camps, checkIns, holds, requests, sessionLogs, sessions, teams, users, weights } from "../schema";
+import {
+  athletes,
+  camps,
+  checkIns,
+  holds,
+  requests,
+  sessionLogs,
+  sessions,
+  suggestionDecisions,
+  teams,
+  users,
+  weights,
+} from "../schema";
 
 /*
- * What a whole team logged, a row per camp or athlete: lists come as JSON that PostgreSQL builds, since thousands of rows of a
- * driver cost more than the query. Days are civil, counted from 1970-01-01 as the engine does.
+ * What a whole team logged, a row per camp or athlete. Lists come as one JSON array a column, which PostgreSQL builds and the driver
+ * parses at once: a row of a driver for each session of two hundred camps costs more than the query. Days are civil, counted
+ * from 1970-01-01 as the engine does.
  */
 
 const dayNumber = (column: unknown) => sql`(${column} - date '1970-01-01')`;
+const list = (column: unknown) => sql`json_agg(${column})`;
+
+/** Camps that are on: of a team those with a bout on or after `boutsFrom`, or the one named whatever its bout. */
+export type BoardScope = { readonly boutsFrom: string } | { readonly campId: string };
+
+/** Inclusive. */
+interface Days {
+  readonly from: string;
+  readonly to: string;
+}
+
+const inScope = (teamId: string, scope: BoardScope) =>
+  and(
+    eq(camps.teamId, teamId),
+    eq(camps.status, "on"),
+    "campId" in scope ? eq(camps.id, scope.campId) : gte(camps.boutDate, scope.boutsFrom),
+  );
 
 /** Zone and own house rules of the team, and the unit that the reader chose. */
 export async function findBoardFrame(tx: Tx, teamId: string, userId: string) {
@@ -38,14 +68,10 @@ const SUMMARY = sql`json_build_object(
   'violations', (select coalesce(json_agg(v.value->'text'), '[]'::json) from jsonb_array_elements(p.violations) v))`;
 
 /**
- * Camps that are on, with a bout on or after `boutsFrom`, nearest first; of one camp where `campId` is given, whatever its bout.
- * The plan's summary is taken apart once, in the database: most of it is curves that nobody asked for.
+ * The camps of a scope, nearest bout first. The plan's summary is taken apart in the database: most of it is curves that nobody
+ * asked for.
  */
-export async function listBoardCamps(
-  tx: Tx,
-  teamId: string,
-  { boutsFrom, campId }: { readonly boutsFrom: string; readonly campId?: string },
-) {
+export async function listBoardCamps(tx: Tx, teamId: string, scope: BoardScope) {
   return tx
     .select({
       id: camps.id,
@@ -73,36 +99,10 @@ export async function listBoardCamps(
     })
     .from(camps)
     .innerJoin(athletes, and(eq(athletes.id, camps.athleteId), eq(athletes.teamId, camps.teamId)))
-    .where(
-      and(
-        eq(camps.teamId, teamId),
-        eq(camps.status, "on"),
-        campId === undefined ? gte(camps.boutDate, boutsFrom) : eq(camps.id, campId),
-      ),
-    )
+    .where(inScope(teamId, scope))
     .orderBy(asc(camps.boutDate), asc(athletes.name), asc(camps.id));
 }
 export type BoardCampRow = Awaited<ReturnType<typeof listBoardCamps>>[number];
-
-/** One session with its log; the last six are null where nothing was logged, or where logs were not asked for. */
-export type BoardSession = readonly [
-  day: number,
-  id: string,
-  start: string,
-  source: "lift" | "sport" | "bout" | "weigh-in",
-  kind: string,
-  title: string,
-  minutes: number,
-  effort: number,
-  /** Minutes since 1970-01-01T00:00Z. */
-  startsAt: number,
-  state: "open" | "done" | "missed" | null,
-  felt: number | null,
-  took: number | null,
-  pain: number | null,
-  painPlace: string | null,
-  knock: boolean | null,
-];
 
 const ofSession = and(
   eq(sessionLogs.teamId, sessions.teamId),
@@ -110,67 +110,94 @@ const ofSession = and(
   eq(sessionLogs.sessionId, sessions.id),
 );
 
-const PLANNED = sql`${dayNumber(sessions.day)}, ${sessions.id}, ${sessions.start}, ${sessions.source}, ${sessions.kind},
-  ${sessions.title}, ${sessions.minutes}, ${sessions.effort}, (extract(epoch from ${sessions.startsAt}) / 60)::int`;
+const planned = {
+  day: sql<number[]>`${list(dayNumber(sessions.day))}`,
+  id: sql<string[]>`${list(sessions.id)}`,
+  start: sql<string[]>`${list(sessions.start)}`,
+  source: sql<("lift" | "sport" | "bout" | "weigh-in")[]>`${list(sessions.source)}`,
+  kind: sql<string[]>`${list(sessions.kind)}`,
+  title: sql<string[]>`${list(sessions.title)}`,
+  minutes: sql<number[]>`${list(sessions.minutes)}`,
+  effort: sql<number[]>`${list(sessions.effort)}`,
+  /** Minutes since 1970-01-01T00:00Z. */
+  startsAt: sql<number[]>`${list(sql`(extract(epoch from ${sessions.startsAt}) / 60)::int`)}`,
+};
 
-/** Sessions of some camps on the days `from` to `to`, both inclusive: as planned, and those that left the plan and were logged. */
-export async function listBoardSessions(
-  tx: Tx,
-  teamId: string,
-  campIds: readonly string[],
-  { from, to, logs }: { readonly from: string; readonly to: string; readonly logs: boolean },
-): Promise<{ campId: string; sessions: readonly BoardSession[] }[]> {
-  if (campIds.length === 0) return [];
-  const inWindow = and(
-    eq(sessions.teamId, teamId),
-    inArray(sessions.campId, [...campIds]),
-    gte(sessions.day, from),
-    lte(sessions.day, to),
-  );
-  const order = sql`order by ${sessions.startsAt}, ${sessions.id}`;
-  if (!logs)
-    return tx
-      .select({
-        campId: sessions.campId,
-        sessions: sql<
-          BoardSession[]
-        >`json_agg(json_build_array(${PLANNED}, null, null, null, null, null, null) ${order})`,
-      })
-      .from(sessions)
-      .where(and(inWindow, eq(sessions.status, "confirmed")))
-      .groupBy(sessions.campId);
+/** Null where nothing was logged. */
+const logged = {
+  state: sql<("open" | "done" | "missed" | null)[]>`${list(sessionLogs.state)}`,
+  felt: sql<(number | null)[]>`${list(sessionLogs.effort)}`,
+  took: sql<(number | null)[]>`${list(sessionLogs.minutes)}`,
+  pain: sql<(number | null)[]>`${list(sessionLogs.pain)}`,
+  painPlace: sql<(string | null)[]>`${list(sessionLogs.painPlace)}`,
+  knock: sql<(boolean | null)[]>`${list(sessionLogs.knock)}`,
+};
+
+/** Sessions of the camps of a scope as planned, without their logs, in any order. */
+export async function listBoardPlanned(tx: Tx, teamId: string, scope: BoardScope, { from, to }: Days) {
   return tx
-    .select({
-      campId: sessions.campId,
-      sessions: sql<BoardSession[]>`json_agg(json_build_array(${PLANNED}, ${sessionLogs.state}, ${sessionLogs.effort},
-        ${sessionLogs.minutes}, ${sessionLogs.pain}, ${sessionLogs.painPlace}, ${sessionLogs.knock}) ${order})`,
-    })
+    .select({ campId: sessions.campId, ...planned })
     .from(sessions)
-    .leftJoin(sessionLogs, ofSession)
-    .where(and(inWindow, or(eq(sessions.status, "confirmed"), sql`${sessionLogs.state} is not null`)))
+    .innerJoin(camps, and(eq(camps.teamId, sessions.teamId), eq(camps.id, sessions.campId)))
+    .where(
+      and(
+        inScope(teamId, scope),
+        eq(sessions.teamId, teamId),
+        eq(sessions.status, "confirmed"),
+        gte(sessions.day, from),
+        lte(sessions.day, to),
+      ),
+    )
     .groupBy(sessions.campId);
 }
 
-/** Check-ins of some athletes on the days `from` to `to`, both inclusive: day, sleep, fatigue, soreness, stress. */
-export async function listBoardCheckIns(
-  tx: Tx,
-  teamId: string,
-  athleteIds: readonly string[],
-  { from, to }: { readonly from: string; readonly to: string },
-) {
-  if (athleteIds.length === 0) return [];
+/** The same with their logs, and with those that left the plan and were logged. */
+export async function listBoardSessions(tx: Tx, teamId: string, scope: BoardScope, { from, to }: Days) {
+  return (
+    tx
+      .select({ campId: sessions.campId, ...planned, ...logged })
+      .from(sessions)
+      .innerJoin(camps, and(eq(camps.teamId, sessions.teamId), eq(camps.id, sessions.campId)))
+      // A log lies on the day of its session: the days of the window keep the seasons before out of the join.
+      .leftJoin(
+        sessionLogs,
+        and(ofSession, eq(sessionLogs.teamId, teamId), gte(sessionLogs.day, from), lte(sessionLogs.day, to)),
+      )
+      .where(
+        and(
+          inScope(teamId, scope),
+          eq(sessions.teamId, teamId),
+          gte(sessions.day, from),
+          lte(sessions.day, to),
+          or(eq(sessions.status, "confirmed"), sql`${sessionLogs.state} is not null`),
+        ),
+      )
+      .groupBy(sessions.campId)
+  );
+}
+export type BoardSessionsRow = Awaited<ReturnType<typeof listBoardPlanned>>[number] &
+  Partial<Awaited<ReturnType<typeof listBoardSessions>>[number]>;
+
+const athletesIn = (tx: Tx, teamId: string, scope: BoardScope) =>
+  tx.select({ id: camps.athleteId }).from(camps).where(inScope(teamId, scope));
+
+/** Check-ins of the athletes of a scope, in any order. */
+export async function listBoardCheckIns(tx: Tx, teamId: string, scope: BoardScope, { from, to }: Days) {
+  const numbers = (column: unknown) => sql<number[]>`${list(column)}`;
   return tx
     .select({
       athleteId: checkIns.athleteId,
-      days: sql<
-        [day: number, sleep: number, fatigue: number, soreness: number, stress: number][]
-      >`json_agg(json_build_array(${dayNumber(checkIns.day)}, ${checkIns.sleep}, ${checkIns.fatigue}, ${checkIns.soreness}, ${checkIns.stress}))`,
+      day: numbers(dayNumber(checkIns.day)),
+      sleep: numbers(checkIns.sleep),
+      fatigue: numbers(checkIns.fatigue),
+      soreness: numbers(checkIns.soreness),
+      stress: numbers(checkIns.stress),
     })
     .from(checkIns)
     .where(
       and(
         eq(checkIns.teamId, teamId),
-        inArray(checkIns.athleteId, [...athleteIds]),
+        inArray(checkIns.athleteId, athletesIn(tx, teamId, scope)),
         gte(checkIns.day, from),
         lte(checkIns.day, to),
       ),
@@ -178,28 +205,41 @@ export async function listBoardCheckIns(
     .groupBy(checkIns.athleteId);
 }
 
-/** Day and kilograms. */
-export type BoardWeight = readonly [day: number, kg: number];
+interface WeightsRow extends Record<string, unknown> {
+  readonly campId: string;
+  /** The first one that the camp's line may start from; null where there is none. */
+  readonly firstDay: number | null;
+  readonly firstKg: number | null;
+  /** Of the days asked for, in any order; null where there is none. */
+  readonly day: readonly number[] | null;
+  readonly kg: readonly number[] | null;
+}
 
 /**
- * Weights of the athletes of some camps on the days `from` to `to`, both inclusive, and the first one from the day on that each
- * camp's line may start on: what lies between says nothing of now.
+ * Weights of the athletes of a scope, and the first one from `startBack` days before each camp on, where its line starts: what lies
+ * between says nothing of now.
  */
 export async function listBoardWeights(
   tx: Tx,
   teamId: string,
-  asked: readonly { readonly campId: string; readonly athleteId: string; readonly start: string }[],
-  { from, to }: { readonly from: string; readonly to: string },
-): Promise<{ campId: string; first: BoardWeight | null; recent: readonly BoardWeight[] | null }[]> {
-  if (asked.length === 0) return [];
-  const weight = sql`json_build_array(${dayNumber(sql`w.day`)}, w.kg)`;
-  const own = sql`from ${weights} w where w.team_id = ${teamId} and w.athlete_id = a."athleteId"`;
-  const rows = await tx.execute<{ campId: string; first: BoardWeight | null; recent: BoardWeight[] | null }>(
-    sql`select a."campId",
-      (select ${weight} ${own} and w.day between a.start and ${to}::date order by w.day limit 1) as first,
-      (select json_agg(${weight}) ${own} and w.day between ${from}::date and ${to}::date) as recent
-    from json_to_recordset(${JSON.stringify(asked)}::json) as a("campId" uuid, "athleteId" uuid, start date)`,
-  );
+  scope: BoardScope,
+  { from, to, startBack }: Days & { readonly startBack: number },
+): Promise<WeightsRow[]> {
+  const asked = "campId" in scope ? sql`c.id = ${scope.campId}` : sql`c.bout_date >= ${scope.boutsFrom}`;
+  const rows = await tx.execute<WeightsRow>(sql`
+    select c.id as "campId", ${dayNumber(sql`f.day`)} as "firstDay", f.kg as "firstKg", r.day, r.kg
+    from ${camps} c
+    left join lateral (
+      select w.day, w.kg from ${weights} w
+      where w.team_id = ${teamId} and w.athlete_id = c.athlete_id and w.day > c.bout_date - 7 * c.weeks - ${startBack}::int
+        and w.day <= ${to}
+      order by w.day limit 1) f on true
+    left join (
+      select w.athlete_id, ${list(dayNumber(sql`w.day`))} as day, ${list(sql`w.kg`)} as kg from ${weights} w
+      where w.team_id = ${teamId} and w.day between ${from} and ${to}
+        and w.athlete_id in (select c.athlete_id from ${camps} c where c.team_id = ${teamId} and c.status = 'on' and ${asked})
+      group by w.athlete_id) r on r.athlete_id = c.athlete_id
+    where c.team_id = ${teamId} and c.status = 'on' and ${asked}`);
   return [...rows];
 }
 
@@ -214,14 +254,13 @@ export async function listStandingHolds(tx: Tx, teamId: string, day: string) {
     .orderBy(asc(holds.fromDay));
 }
 
-/** Requests that wait for an answer, and accepted ones of sessions on or after `from`, with their session; oldest first. */
+/** Requests that wait for an answer in the camps of a scope, and accepted ones of sessions on or after `from`, with their session; oldest first. */
 export async function listBoardRequests(
   tx: Tx,
   teamId: string,
-  campIds: readonly string[],
-  { from }: { readonly from: string },
+  scope: BoardScope,
+  { from }: Pick<Days, "from">,
 ) {
-  if (campIds.length === 0) return [];
   return tx
     .select({
       id: requests.id,
@@ -235,6 +274,7 @@ export async function listBoardRequests(
       source: sessions.source,
     })
     .from(requests)
+    .innerJoin(camps, and(eq(camps.teamId, requests.teamId), eq(camps.id, requests.campId)))
     .innerJoin(
       sessions,
       and(
@@ -245,11 +285,23 @@ export async function listBoardRequests(
     )
     .where(
       and(
+        inScope(teamId, scope),
         eq(requests.teamId, teamId),
-        inArray(requests.campId, [...campIds]),
         or(eq(requests.state, "asked"), and(eq(requests.state, "accepted"), gte(sessions.day, from))),
       ),
     )
     .orderBy(asc(requests.createdAt), asc(requests.id));
 }
 export type BoardRequestRow = Awaited<ReturnType<typeof listBoardRequests>>[number];
+
+/** Keys of suggestions that were decided on in the camps of a scope. */
+export async function listDecidedKeys(tx: Tx, teamId: string, scope: BoardScope) {
+  return tx
+    .select({ campId: suggestionDecisions.campId, key: suggestionDecisions.key })
+    .from(suggestionDecisions)
+    .innerJoin(
+      camps,
+      and(eq(camps.teamId, suggestionDecisions.teamId), eq(camps.id, suggestionDecisions.campId)),
+    )
+    .where(and(inScope(teamId, scope), eq(suggestionDecisions.teamId, teamId)));
+}

@@ -1,23 +1,8 @@
-import { and, desc, eq, inArray } from "drizzle-orm";
+import { and, desc, eq } from "drizzle-orm";
 import type { Tx } from "../client";
 import { revisions, suggestionDecisions, users } from "../schema";
 
 type DecisionRow = typeof suggestionDecisions.$inferSelect;
-
-/** Keys that were decided on in some camps. */
-export async function listDecidedKeys(
-  tx: Tx,
-  teamId: string,
-  campIds: readonly string[],
-): Promise<{ campId: string; key: string }[]> {
-  if (campIds.length === 0) return [];
-  return tx
-    .select({ campId: suggestionDecisions.campId, key: suggestionDecisions.key })
-    .from(suggestionDecisions)
-    .where(
-      and(eq(suggestionDecisions.teamId, teamId), inArray(suggestionDecisions.campId, [...campIds])),
-    );
-}
 
 /** What was decided in a camp, newest first, with who did it and the revision that put an accepted one back. */
 export async function listDecisions(tx: Tx, teamId: string, campId: string) {

@@ -34,7 +34,10 @@ export interface SuggestionEffect {
 }
 
 /** `effect` is null for a talk, `problem` says why a change cannot be made as things stand. */
-export interface SuggestionView extends Pick<Suggestion, "key" | "kind" | "title" | "numbers" | "text" | "source"> {
+export interface SuggestionView extends Pick<
+  Suggestion,
+  "key" | "kind" | "title" | "numbers" | "text" | "source"
+> {
   readonly effect: SuggestionEffect | null;
   readonly problem: string | null;
 }

@@ -4,6 +4,7 @@ import { cpus } from "node:os";
 import { eq } from "drizzle-orm";
 import { openDatabase } from "@/db/client";
 import { athletes, camps } from "@/db/schema";
+import { benchBoard } from "./board";
 import { benchEngine } from "./engine";
 import { benchFeed } from "./feed";
 import { benchFirstLoad } from "./first-load";
@@ -37,6 +38,7 @@ const steps = {
   feed: () => benchFeed(url, databaseUrl),
   "first load": async () => benchFirstLoad(url, await campOfEightWeeks()),
   saving: () => benchSaving(databaseUrl),
+  board: () => benchBoard(databaseUrl),
 };
 
 const results: Record<string, unknown> = {};

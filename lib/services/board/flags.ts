@@ -4,22 +4,24 @@ import {
   minuteFromHhmm,
   suggestions,
   weightRemark,
+  type ResponseInput,
   type Suggestion,
   type WeightRemark,
 } from "@/lib/engine";
-import type { Day, Instant } from "@/lib/engine/types";
+import type { Day } from "@/lib/engine/types";
 import { dayText, momentText } from "@/lib/format/civil";
 import { massNumber, type MassUnit } from "@/lib/format/load";
 import type { BoardFlag, BoardRow, WaitingRequest } from "@/lib/schemas/board";
 import type { AnsweredSession, CampAnswers } from "@/lib/services/suggestions/answers";
-import { doneLoad, isWork, plannedLoad, responseInputOf } from "@/lib/services/suggestions/response-input";
+import { doneLoad, isWork, plannedLoad } from "@/lib/services/suggestions/response-input";
 
 /** Load is flagged when it is off what was due by so much of it; common practice, no published source. */
 const LOAD_OFF = 0.25;
 
 const times = (count: number, one: string, many: string): string =>
   count === 1 ? `1 ${one}` : `${count} ${many}`;
-const au = (load: number): string => Math.round(load).toLocaleString("en-GB");
+const whole = new Intl.NumberFormat("en-GB", { maximumFractionDigits: 0 });
+const au = (load: number): string => whole.format(load);
 
 const recentOf = ({ sessions, today, rules }: CampAnswers): AnsweredSession[] =>
   sessions.filter(({ day }) => day <= today && day > today - rules["response.recent"]);
@@ -79,9 +81,8 @@ function weightWords({ kind, numbers, text }: WeightRemark, unit: MassUnit): str
   return text.replace(/\.$/, "");
 }
 
-function weightFlags(answers: CampAnswers, now: Instant, unit: MassUnit): BoardFlag[] {
-  const { weight } = responseInputOf(answers, now);
-  const state = weight && weightRemark({ ...weight, today: answers.today, rules: answers.rules });
+function weightFlags({ weight, today, rules }: ResponseInput, unit: MassUnit): BoardFlag[] {
+  const state = weight && weightRemark({ ...weight, today, rules });
   if (!state || state.off !== null) return [];
   return state.remarks
     .filter(({ kind }) => kind !== "on-line")
@@ -137,18 +138,18 @@ const requestFlags = (requests: readonly WaitingRequest[]): BoardFlag[] =>
 
 /** What the engine suggests for a camp and nobody has decided on. */
 export function openSuggestions(
-  answers: CampAnswers,
+  { responses }: Pick<CampAnswers["camp"], "responses">,
+  input: ResponseInput,
   decided: ReadonlySet<string>,
-  now: Instant,
 ): readonly Suggestion[] {
   // A response in force under the same key was accepted, also where it was saved without a decision.
-  const inForce = new Set(answers.camp.responses.map(({ id }) => id));
-  return suggestions(responseInputOf(answers, now)).filter(({ key }) => !decided.has(key) && !inForce.has(key));
+  const inForce = new Set(responses.map(({ id }) => id));
+  return suggestions(input).filter(({ key }) => !decided.has(key) && !inForce.has(key));
 }
 
 export interface FlagFacts {
   readonly answers: CampAnswers;
-  readonly now: Instant;
+  readonly input: ResponseInput;
   readonly hold: StandingHold | null;
   readonly requests: readonly WaitingRequest[];
   readonly load: BoardRow["load"];
@@ -160,13 +161,13 @@ export interface FlagFacts {
 }
 
 /** Flags of one row in the order of `FLAG_KINDS`. */
-export function flagsOf({ answers, now, hold, requests, load, open, logs, unit }: FlagFacts): BoardFlag[] {
+export function flagsOf({ answers, input, hold, requests, load, open, logs, unit }: FlagFacts): BoardFlag[] {
   const waiting = open?.length ?? 0;
   return [
     ...holdFlag(hold),
     ...painFlags(answers),
     ...requestFlags(requests),
-    ...weightFlags(answers, now, unit),
+    ...weightFlags(input, unit),
     ...checkInFlag(answers),
     ...(logs ? missedFlag(answers) : []),
     ...(logs ? loadFlags(load, open ?? []) : []),

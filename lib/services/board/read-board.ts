@@ -2,35 +2,29 @@ import {
   findBoardFrame,
   listBoardCamps,
   listBoardRequests,
+  listDecidedKeys,
   listStandingHolds,
-  type BoardCampRow,
   type BoardFrame,
   type BoardRequestRow,
 } from "@/db/queries/board";
-import { listDecidedKeys } from "@/db/queries/suggestions";
 import { instantOf } from "@/lib/calendar/zones";
 import { DAY_MINUTES, dayFromIso, daysOutOf, isoFromDay } from "@/lib/engine";
 import type { Day, Instant } from "@/lib/engine/types";
 import { AppError, notFound } from "@/lib/errors";
 import { can, isStaff } from "@/lib/policy";
-import type { BoardAttendance, BoardDay, BoardMark, BoardRow, BoardView, WaitingRequest } from "@/lib/schemas/board";
+import type { BoardAttendance, BoardDay, BoardMark, BoardRow, BoardView } from "@/lib/schemas/board";
 import type { TeamContext } from "@/lib/services/context";
-import { loadAnswers, seesOf, type AnsweredSession, type CampAnswers } from "@/lib/services/suggestions/answers";
-import { isWork } from "@/lib/services/suggestions/response-input";
+import {
+  readAnswers,
+  seesOf,
+  type AnsweredSession,
+  type CampAnswers,
+} from "@/lib/services/suggestions/answers";
+import { isWork, responseInputOf } from "@/lib/services/suggestions/response-input";
 import { boardDaysOf, flagsOf, holdOn, loadOf, openSuggestions, type StandingHold } from "./flags";
+import { waitingRequest } from "./waiting-request";
 
 const FIGHT_WEEK_DAYS = 7;
-
-export const waitingRequest = (row: BoardRequestRow): WaitingRequest => ({
-  id: row.id,
-  campId: row.campId,
-  sessionId: row.sessionId,
-  source: row.source,
-  title: row.title,
-  date: row.day,
-  start: row.start,
-  reason: row.reason,
-});
 
 function grouped<T>(rows: readonly T[], keyOf: (row: T) => string): Map<string, T[]> {
   const found = new Map<string, T[]>();
@@ -112,6 +106,7 @@ function rowOf(answers: CampAnswers, around: Around): BoardRow {
   const requests = asked.filter(({ state }) => state === "asked").map(waitingRequest);
   const decided = new Set((around.decided.get(camp.id) ?? []).map(({ key }) => key));
   const load = logs ? loadOf(answers) : null;
+  const input = responseInputOf(answers, around.now);
   return {
     campId: camp.id,
     athlete: { id: camp.athleteId, name: camp.athleteName },
@@ -126,11 +121,11 @@ function rowOf(answers: CampAnswers, around: Around): BoardRow {
     load,
     flags: flagsOf({
       answers,
-      now: around.now,
+      input,
       hold,
       requests: around.answersRequests ? requests : [],
       load,
-      open: around.decides ? openSuggestions(answers, decided, around.now) : null,
+      open: around.decides ? openSuggestions(camp, input, decided) : null,
       logs,
       unit: around.unit,
     }),
@@ -138,12 +133,11 @@ function rowOf(answers: CampAnswers, around: Around): BoardRow {
   };
 }
 
-/** The nearest bout of each athlete. Rows come nearest first. */
-function nearestOf(camps: readonly BoardCampRow[], now: Instant): BoardCampRow[] {
+/** The nearest bout of each athlete that is not over where the athlete is. They come nearest first. */
+function nearestOf(all: readonly CampAnswers[]): CampAnswers[] {
   const seen = new Set<string>();
-  // A bout a civil day ago in UTC may still be today at the venue: what is over where the athlete is goes out below.
-  return camps.filter(({ athleteId, boutDate }) => {
-    if (seen.has(athleteId) || dayFromIso(boutDate) < Math.floor(now / DAY_MINUTES) - 1) return false;
+  return all.filter(({ camp: { athleteId, boutDate }, today }) => {
+    if (seen.has(athleteId) || dayFromIso(boutDate) < today) return false;
     seen.add(athleteId);
     return true;
   });
@@ -159,23 +153,23 @@ export async function readBoard(ctx: TeamContext): Promise<BoardView> {
   const now = instantOf(ctx.now);
   const utc = Math.floor(now / DAY_MINUTES);
   const before = isoFromDay((utc - 1) as Day);
-  const [frame, listed] = await Promise.all([
-    findBoardFrame(db, teamId, ctx.userId),
-    listBoardCamps(db, teamId, { boutsFrom: before }),
-  ]);
-  if (!frame) throw notFound();
+  const scope = { boutsFrom: before };
   const sees = seesOf(ctx);
   const answersRequests = can(member, "requests.answer");
   const decides = can(member, "suggestions.decide");
-  const camps = nearestOf(listed, now);
-  const ids = camps.map(({ id }) => id);
-  const [answers, holds, requests, decided] = await Promise.all([
-    loadAnswers(ctx, frame, camps, sees),
+  const beside = Promise.all([
+    listBoardCamps(db, teamId, scope),
     listStandingHolds(db, teamId, before),
-    answersRequests ? listBoardRequests(db, teamId, ids, { from: before }) : [],
-    decides ? listDecidedKeys(db, teamId, ids) : [],
+    answersRequests ? listBoardRequests(db, teamId, scope, { from: before }) : [],
+    decides ? listDecidedKeys(db, teamId, scope) : [],
   ]);
-  const running = answers.filter(({ camp, today }) => dayFromIso(camp.boutDate) >= today);
+  const frame = await findBoardFrame(db, teamId, ctx.userId);
+  if (!frame) throw notFound();
+  const [answersOf, [camps, holds, requests, decided]] = await Promise.all([
+    readAnswers(db, ctx, frame, scope, sees),
+    beside,
+  ]);
+  const answers = nearestOf(camps.map(answersOf));
   const around: Around = {
     now,
     unit: frame.unit,
@@ -186,5 +180,5 @@ export async function readBoard(ctx: TeamContext): Promise<BoardView> {
     requests: grouped(requests, ({ campId }) => campId),
     decided: grouped(decided, ({ campId }) => campId),
   };
-  return { rows: running.map((one) => rowOf(one, around)), together: togetherOf(running) };
+  return { rows: answers.map((one) => rowOf(one, around)), together: togetherOf(answers) };
 }

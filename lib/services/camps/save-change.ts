@@ -29,38 +29,47 @@ export async function saveChange(
   ctx: TeamContext,
   { body, params }: { body: SaveChange; params: Record<string, string> },
 ): Promise<SaveAnswer> {
-  return ctx.db.transaction(async (tx) => {
-    const camp = await loadCamp(tx, ctx, params.id ?? "", { lock: true });
-    if (!can(ctx.member, CHANGE_ACTION[body.change.kind], camp.athlete.id)) {
-      throw new AppError("forbidden", "Your role may not make this change.");
-    }
-    const earlier = await findRevisionByKey(tx, ctx.teamId, camp.row.id, body.idempotencyKey);
-    if (earlier) {
-      return {
-        revision: earlier.number,
-        view: await viewOf(tx, ctx, camp),
-        knockOn: earlier.knockOn ?? NOTHING,
-        told: 0,
-      };
-    }
-    if (body.baseRevision !== camp.row.revision) throw await staleError(tx, ctx, camp, body.baseRevision);
-    const { preview, putBackOf } = await previewOf(tx, ctx, camp, body.change);
-    if (!isPreview(preview))
-      throw new AppError("invalid", preview.problems[0]?.message ?? "This change cannot be made.", {
-        errors: preview.problems,
-      });
-    if (isDeepStrictEqual(preview.book, camp.book)) {
-      return { revision: camp.row.revision, view: await viewOf(tx, ctx, camp), knockOn: NOTHING, told: 0 };
-    }
-    const { revision, told } = await commitPreview(tx, ctx, camp, preview, {
-      change: body.change,
-      summary: changeWords(body.change, camp, preview.knockOn),
-      idempotencyKey: body.idempotencyKey,
-      putBackOf,
+  return ctx.db.transaction(async (tx) =>
+    saveChangeIn(tx, ctx, await loadCamp(tx, ctx, params.id ?? "", { lock: true }), body),
+  );
+}
+
+/** The same in the caller's transaction, for a camp that it has locked: what it writes beside the change stands or falls with it. */
+export async function saveChangeIn(
+  tx: Tx,
+  ctx: TeamContext,
+  camp: LoadedCamp,
+  body: SaveChange,
+): Promise<SaveAnswer> {
+  if (!can(ctx.member, CHANGE_ACTION[body.change.kind], camp.athlete.id)) {
+    throw new AppError("forbidden", "Your role may not make this change.");
+  }
+  const earlier = await findRevisionByKey(tx, ctx.teamId, camp.row.id, body.idempotencyKey);
+  if (earlier) {
+    return {
+      revision: earlier.number,
+      view: await viewOf(tx, ctx, camp),
+      knockOn: earlier.knockOn ?? NOTHING,
+      told: 0,
+    };
+  }
+  if (body.baseRevision !== camp.row.revision) throw await staleError(tx, ctx, camp, body.baseRevision);
+  const { preview, putBackOf } = await previewOf(tx, ctx, camp, body.change);
+  if (!isPreview(preview))
+    throw new AppError("invalid", preview.problems[0]?.message ?? "This change cannot be made.", {
+      errors: preview.problems,
     });
-    const view = await viewOf(tx, ctx, await loadCamp(tx, ctx, camp.row.id));
-    return { revision, view, knockOn: preview.knockOn, told };
+  if (isDeepStrictEqual(preview.book, camp.book)) {
+    return { revision: camp.row.revision, view: await viewOf(tx, ctx, camp), knockOn: NOTHING, told: 0 };
+  }
+  const { revision, told } = await commitPreview(tx, ctx, camp, preview, {
+    change: body.change,
+    summary: changeWords(body.change, camp, preview.knockOn),
+    idempotencyKey: body.idempotencyKey,
+    putBackOf,
   });
+  const view = await viewOf(tx, ctx, await loadCamp(tx, ctx, camp.row.id));
+  return { revision, view, knockOn: preview.knockOn, told };
 }
 
 async function previewOf(

@@ -6,7 +6,7 @@ import { dayText, momentText } from "@/lib/format/civil";
 export type SessionRow = LoadedCamp["sessions"][number];
 
 /** An id as it stood in a path: "@" and the like may come escaped. */
-const decoded = (text: string): string => {
+export const decoded = (text: string): string => {
   try {
     return decodeURIComponent(text);
   } catch {

@@ -1,16 +1,18 @@
 import {
   listBoardCheckIns,
+  listBoardPlanned,
   listBoardSessions,
   listBoardWeights,
   type BoardCampRow,
   type BoardFrame,
-  type BoardSession,
-  type BoardWeight,
+  type BoardScope,
+  type BoardSessionsRow,
 } from "@/db/queries/board";
+import type { Tx } from "@/db/client";
 import { campSpan, zoneOf } from "@/lib/book";
 import { civilNow } from "@/lib/calendar/zones";
-import { dayFromIso, isoFromDay, withOverrides, type CheckIn } from "@/lib/engine";
-import type { Day, HouseRules } from "@/lib/engine/types";
+import { dayFromIso, isoFromDay, withOverrides, type CheckIn, type Weighing } from "@/lib/engine";
+import type { Day, HouseRules, Kg } from "@/lib/engine/types";
 import { can } from "@/lib/policy";
 import { isMinor } from "@/lib/services/athletes/age";
 import type { TeamContext } from "@/lib/services/context";
@@ -64,7 +66,7 @@ export interface CampAnswers {
   readonly sessions: readonly AnsweredSession[];
   readonly checkIns: readonly CheckIn[];
   /** The first one that the line may start from, and those of late. */
-  readonly weights: { readonly first: BoardWeight | null; readonly recent: readonly BoardWeight[] };
+  readonly weights: { readonly first: Weighing | null; readonly recent: readonly Weighing[] };
 }
 
 /** A weight of so many days before a camp still says where its line starts. */
@@ -76,28 +78,32 @@ const AHEAD_DAYS = 14;
 /** Athletes may be a civil day before or behind the gym. */
 const ZONES = 1;
 
-function sessionOf(tuple: BoardSession, sees: Sees): AnsweredSession {
-  const [day, id, start, source, kind, title, minutes, effort, startsAt, state, felt, took, pain, place, knock] =
-    tuple;
-  return {
-    day: day as Day,
-    id,
-    start,
-    source,
-    kind,
-    title,
-    minutes,
-    effort,
-    startsAt,
-    log: state && {
-      state,
-      effort: felt,
-      minutes: took,
-      pain: sees.pain ? pain : null,
-      painPlace: sees.pain ? (place ?? "") : "",
-      knock: sees.pain && knock === true,
-    },
-  };
+/** Rows of columns as a list of sessions, in the order of the day. */
+function sessionsIn(row: BoardSessionsRow | undefined, sees: Sees): AnsweredSession[] {
+  if (!row) return [];
+  const all = row.id.map((id, n): AnsweredSession => {
+    const state = row.state?.[n] ?? null;
+    return {
+      id,
+      day: (row.day[n] ?? 0) as Day,
+      start: row.start[n] ?? "",
+      source: row.source[n] ?? "sport",
+      kind: row.kind[n] ?? "",
+      title: row.title[n] ?? "",
+      minutes: row.minutes[n] ?? 0,
+      effort: row.effort[n] ?? 0,
+      startsAt: row.startsAt[n] ?? 0,
+      log: state && {
+        state,
+        effort: row.felt?.[n] ?? null,
+        minutes: row.took?.[n] ?? null,
+        pain: sees.pain ? (row.pain?.[n] ?? null) : null,
+        painPlace: sees.pain ? (row.painPlace?.[n] ?? "") : "",
+        knock: sees.pain && row.knock?.[n] === true,
+      },
+    };
+  });
+  return all.sort((a, b) => a.startsAt - b.startsAt || (a.id < b.id ? -1 : 1));
 }
 
 /** Today where the athlete is: at the gym, or at the venue after the travel. */
@@ -116,67 +122,67 @@ export function campToday(camp: BoardCampRow, now: Date): Day {
   return civilDayAt(zone, now);
 }
 
-/** What was logged, checked in and weighed around now in some camps: three queries for any number of them. */
-export async function loadAnswers(
+const checkInsIn = (row: Awaited<ReturnType<typeof listBoardCheckIns>>[number] | undefined): CheckIn[] =>
+  (row?.day ?? []).map((day, n) => ({
+    day: day as Day,
+    sleep: row?.sleep[n] ?? 0,
+    fatigue: row?.fatigue[n] ?? 0,
+    soreness: row?.soreness[n] ?? 0,
+    stress: row?.stress[n] ?? 0,
+  }));
+
+const weighing = (day: number, kg: number): Weighing => ({ day: day as Day, kg: kg as Kg });
+
+function weightsIn(
+  row: Awaited<ReturnType<typeof listBoardWeights>>[number] | undefined,
+): CampAnswers["weights"] {
+  const { firstDay = null, firstKg = null, day, kg } = row ?? {};
+  return {
+    first: firstDay !== null && firstKg !== null ? weighing(firstDay, firstKg) : null,
+    recent: (day ?? []).map((one, n) => weighing(one, kg?.[n] ?? 0)),
+  };
+}
+
+/** What was logged, checked in and weighed around now in the camps of a scope: three queries for any number of them. */
+export async function readAnswers(
+  tx: Tx,
   ctx: TeamContext,
   frame: BoardFrame,
-  camps: readonly BoardCampRow[],
+  scope: BoardScope,
   sees: Sees,
-): Promise<CampAnswers[]> {
-  const { db, teamId } = ctx;
+) {
+  const { teamId } = ctx;
   const rules = withOverrides(frame.rules);
   const base = civilNow(frame.zone, ctx.now).day;
   const days = (back: number, ahead: number) => ({
     from: isoFromDay((base - back - ZONES) as Day),
     to: isoFromDay((base + ahead + ZONES) as Day),
   });
-  const spanOf = (camp: BoardCampRow) =>
-    campSpan({ bout: { date: camp.boutDate }, weeks: camp.weeks });
-  const athleteIds = [...new Set(camps.map(({ athleteId }) => athleteId))];
   // The week that ended within what still counts is needed from its first day on.
-  const back = rules["response.recent"] + 6;
+  const around = days(rules["response.recent"] + 6, AHEAD_DAYS);
   const [sessions, checkIns, weights] = await Promise.all([
-    listBoardSessions(
-      db,
-      teamId,
-      camps.map(({ id }) => id),
-      { ...days(back, AHEAD_DAYS), logs: sees.logs || sees.pain },
-    ),
-    sees.checkIns ? listBoardCheckIns(db, teamId, athleteIds, days(rules["response.checkin-days"] + 1, 0)) : [],
+    sees.logs || sees.pain
+      ? listBoardSessions(tx, teamId, scope, around)
+      : listBoardPlanned(tx, teamId, scope, around),
+    sees.checkIns ? listBoardCheckIns(tx, teamId, scope, days(rules["response.checkin-days"] + 1, 0)) : [],
     sees.weight
-      ? listBoardWeights(
-          db,
-          teamId,
-          camps.map((camp) => ({
-            campId: camp.id,
-            athleteId: camp.athleteId,
-            start: isoFromDay((spanOf(camp).from - START_BACK_DAYS) as Day),
-          })),
-          days(WEIGHT_BACK_DAYS, 0),
-        )
+      ? listBoardWeights(tx, teamId, scope, { ...days(WEIGHT_BACK_DAYS, 0), startBack: START_BACK_DAYS })
       : [],
   ]);
-  const sessionsOf = new Map(sessions.map((row) => [row.campId, row.sessions]));
-  const checkInsOf = new Map(checkIns.map((row) => [row.athleteId, row.days]));
+  const sessionsOf = new Map(sessions.map((row) => [row.campId, row]));
+  const checkInsOf = new Map(checkIns.map((row) => [row.athleteId, row]));
   const weightsOf = new Map(weights.map((row) => [row.campId, row]));
-  return camps.map((camp) => {
+  return (camp: BoardCampRow): CampAnswers => {
     const today = campToday(camp, ctx.now);
-    const weighed = weightsOf.get(camp.id);
     return {
       camp,
-      span: spanOf(camp),
+      span: campSpan({ bout: { date: camp.boutDate }, weeks: camp.weeks }),
       today,
       minor: isMinor(camp.dateOfBirth, isoFromDay(today)),
       rules,
-      sessions: (sessionsOf.get(camp.id) ?? []).map((tuple) => sessionOf(tuple, sees)),
-      checkIns: (checkInsOf.get(camp.athleteId) ?? []).map(([day, sleep, fatigue, soreness, stress]) => ({
-        day: day as Day,
-        sleep,
-        fatigue,
-        soreness,
-        stress,
-      })),
-      weights: { first: weighed?.first ?? null, recent: weighed?.recent ?? [] },
+      sessions: sessionsIn(sessionsOf.get(camp.id), sees),
+      checkIns: checkInsIn(checkInsOf.get(camp.athleteId)),
+      weights: weightsIn(weightsOf.get(camp.id)),
     };
-  });
+  };
 }

@@ -5,7 +5,6 @@ import {
   type LoggedSession,
   type ResponseInput,
   type WeekAnswer,
-  type Weighing,
 } from "@/lib/engine";
 import type { Au, Day, Instant, Kg } from "@/lib/engine/types";
 import type { AnsweredSession, CampAnswers } from "./answers";
@@ -61,14 +60,13 @@ export function weightFactsOf({ camp, weights, minor, rules }: CampAnswers): Res
   if (limitKg === null || weighInDate === null) return null;
   const weighIn = dayFromIso(weighInDate);
   const limit = limitKg as Kg;
-  const weighing = ([day, kg]: readonly [number, number]): Weighing => ({ day: day as Day, kg: kg as Kg });
-  const start = weights.first && weights.first[0] < weighIn ? weighing(weights.first) : null;
+  const start = weights.first && weights.first.day < weighIn ? weights.first : null;
   return {
     minor,
     limitKg: limit,
     weighIn,
     line: start ? descentLine(start, limit, weighIn, rules) : null,
-    weights: weights.recent.map(weighing),
+    weights: weights.recent,
   };
 }
 
