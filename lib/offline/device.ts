@@ -1,4 +1,4 @@
-import { del, get, set } from "idb-keyval";
+import { delMany, get, set } from "idb-keyval";
 import type { TodayView } from "@/lib/schemas/today";
 import { CACHES } from "./cache-names";
 import type { Queue } from "./queue";
@@ -8,21 +8,29 @@ import { queueKey } from "./queue-store";
 const viewKey = (userId: string): string => `bellward-today-1:${userId}`;
 const OWNER = "bellward-owner";
 
+/** A browser without a database, or that refuses it, keeps nothing and says nothing. */
+async function tried<T>(work: () => Promise<T>): Promise<T | undefined> {
+  try {
+    return await work();
+  } catch {
+    return undefined;
+  }
+}
+
 /** The last view this phone has seen; null where there is none, or no database. */
 export const keptView = async (userId: string): Promise<TodayView | null> =>
-  (await get<TodayView>(viewKey(userId)).catch(() => undefined)) ?? null;
+  (await tried(() => get<TodayView>(viewKey(userId)))) ?? null;
 
 export const keepView = (userId: string, view: TodayView): Promise<void> =>
-  set(viewKey(userId), view).catch(() => undefined);
+  tried(() => set(viewKey(userId), view));
+
+const ownerOf = (): Promise<string | undefined> => tried(() => get<string>(OWNER));
 
 /** Entries of the person who uses this phone that the server has not taken. */
 export async function countWaiting(): Promise<number> {
-  try {
-    const owner = await get<string>(OWNER);
-    return owner === undefined ? 0 : ((await get<Queue>(queueKey(owner)))?.length ?? 0);
-  } catch {
-    return 0;
-  }
+  const owner = await ownerOf();
+  if (owner === undefined) return 0;
+  return (await tried(() => get<Queue>(queueKey(owner))))?.length ?? 0;
 }
 
 async function deleteCaches(): Promise<void> {
@@ -35,16 +43,15 @@ async function deleteCaches(): Promise<void> {
  * author's key: they are sent when that person signs in again.
  */
 export async function forgetReader(): Promise<void> {
-  const owner = await get<string>(OWNER).catch(() => undefined);
+  const owner = await ownerOf();
   await deleteCaches();
-  if (owner === undefined) return;
-  await Promise.all([del(viewKey(owner)), del(OWNER)]).catch(() => undefined);
+  if (owner !== undefined) await tried(() => delMany([viewKey(owner), OWNER]));
 }
 
 /** Says who uses this phone now; what another person left to read goes. */
 export async function claimDevice(userId: string): Promise<void> {
-  const owner = await get<string>(OWNER).catch(() => undefined);
+  const owner = await ownerOf();
   if (owner === userId) return;
   if (owner !== undefined) await forgetReader();
-  await set(OWNER, userId).catch(() => undefined);
+  await tried(() => set(OWNER, userId));
 }

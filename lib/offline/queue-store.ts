@@ -22,7 +22,8 @@ export interface QueueStore {
 function openStore(userId: string): QueueStore {
   const key = queueKey(userId);
   const listeners = new Set<() => void>();
-  const channel = typeof BroadcastChannel === "undefined" ? null : new BroadcastChannel(key);
+  let channel: BroadcastChannel | null = null;
+  let opened = false;
   let queue = NOTHING;
   let durable = true;
   let pending = 0;
@@ -32,12 +33,24 @@ function openStore(userId: string): QueueStore {
     for (const listener of listeners) listener();
   };
   const load = async (): Promise<void> => {
-    const stored = await get<Queue>(key).catch(() => undefined);
-    // A change under way knows better.
-    if (pending === 0 && stored) show(stored);
+    try {
+      const stored = await get<Queue>(key);
+      // A change under way knows better.
+      if (pending === 0 && stored) show(stored);
+    } catch {
+      durable = false;
+    }
   };
-  if (channel) channel.onmessage = () => void load();
-  void load();
+  /** With the first listener, which only a browser has: a page is rendered on the server as well. */
+  const open = (): void => {
+    if (opened) return;
+    opened = true;
+    if (typeof BroadcastChannel !== "undefined") {
+      channel = new BroadcastChannel(key);
+      channel.onmessage = () => void load();
+    }
+    void load();
+  };
 
   const store = async (change: (queue: Queue) => Queue): Promise<Queue> => {
     let next = queue;
@@ -54,6 +67,7 @@ function openStore(userId: string): QueueStore {
     userId,
     subscribe: (listener) => {
       listeners.add(listener);
+      open();
       return () => listeners.delete(listener);
     },
     read: () => queue,
@@ -77,6 +91,7 @@ const stores = new Map<string, QueueStore>();
 /** The one store of a person in this page. */
 export function queueOf(userId: string): QueueStore {
   const store = stores.get(userId) ?? openStore(userId);
-  stores.set(userId, store);
+  // On the server it lives as long as the rendering: nobody's queue is there.
+  if (typeof window !== "undefined") stores.set(userId, store);
   return store;
 }
