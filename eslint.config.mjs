@@ -11,6 +11,7 @@ export default defineConfig([
     "next-env.d.ts",
     "test-results/",
     "playwright-report/",
+    "public/sw.js",
   ]),
   ...nextVitals,
   ...nextTypescript,

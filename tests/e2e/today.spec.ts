@@ -207,7 +207,7 @@ test("in a basement: the page opens, logs and finishes without a net, and the lo
   expect(log?.sets).toHaveLength((prescription?.lines ?? []).reduce((sum, { sets }) => sum + sets, 0));
 
   // What the phone kept to read goes with the person.
-  await page.getByRole("button", { name: "You" }).tap();
+  await page.getByRole("button", { name: "You", exact: true }).tap();
   await page.getByRole("button", { name: "Sign out" }).tap();
   await expect(page).toHaveURL(/\/$/);
   expect(await page.evaluate(() => caches.has("bellward-pages"))).toBe(false);
