@@ -54,10 +54,10 @@ export function SheetLift({ session, lift, unit }: SheetLiftProps) {
         <caption className="sr-only">{title}</caption>
         <thead>
           <tr>
-            <th scope="col" className={`${CELL} w-[36%] text-left font-semibold`}>
+            <th scope="col" className={`${CELL} w-[33%] text-left font-semibold`}>
               Exercise
             </th>
-            <th scope="col" className={`${CELL} w-[27%] text-left font-semibold`}>
+            <th scope="col" className={`${CELL} w-[31%] text-left font-semibold`}>
               Asked
             </th>
             <th scope="col" className={`${CELL} text-left font-semibold`}>

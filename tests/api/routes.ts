@@ -23,6 +23,9 @@ export interface Scene {
   /** A lifting session that is still to come. */
   readonly liftId: string;
   readonly bestId: string;
+  /** A trial of a test, and the upload that brought it. */
+  readonly trialId: string;
+  readonly uploadId: string;
 }
 
 export interface RouteRow {

@@ -102,6 +102,8 @@ export async function sceneOf(db: Database, now: Date) {
     sessionId: session?.id ?? "",
     liftId: only(lifts).id,
     bestId: best.id,
+    trialId: trial.id,
+    uploadId,
   };
   return { ...team, teamId, scene, cookie: (role: Role) => cookieOf(team.as(role).userId) };
 }
