@@ -69,13 +69,19 @@ interface OneSeriesProps {
 
 function OneSeries({ series, unit, power, onRemove }: OneSeriesProps) {
   const title = seriesTitle(series, unit, series.side);
+  const table = <SeriesTable series={series} title={title} unit={unit} power={power} onRemove={onRemove} />;
   return (
     <article aria-label={title} className="grid gap-2 border-t border-line-soft pt-4">
-      <SeriesChart
-        series={series}
-        title={title}
-        table={<SeriesTable series={series} title={title} unit={unit} power={power} onRemove={onRemove} />}
-      />
+      {series.days.length > 1 ? (
+        <SeriesChart series={series} title={title} table={table} />
+      ) : (
+        <>
+          <p className="text-sm">
+            <b className="font-semibold">{title}</b> <span className="text-ink-2">{series.measure}</span>
+          </p>
+          {table}
+        </>
+      )}
       <p className="font-semibold">{series.verdict?.sentence ?? "One day so far: nothing to compare."}</p>
       <p className="text-xs text-ink-2">
         {series.error.text} {series.worthwhileText}
