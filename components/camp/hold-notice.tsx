@@ -1,4 +1,5 @@
 import { Notice } from "@/components/ui/notice";
+import { holdOnDay } from "@/lib/book/hold-on-day";
 import { dayFromIso, isoFromDay } from "@/lib/engine/geometry";
 import type { Day } from "@/lib/engine/types";
 import { dayText } from "@/lib/format/civil";
@@ -12,7 +13,7 @@ interface HoldNoticeProps {
 /** A hold that is on: what it stops, and who lifts it. Its reason is the medic's. */
 export function HoldNotice({ book, today }: HoldNoticeProps) {
   const date = isoFromDay(today);
-  const hold = book.holds.find(({ from, to }) => from <= date && (to === null || date <= to));
+  const hold = holdOnDay(book, date);
   if (!hold) return null;
   return (
     <Notice title={`On a hold since ${dayText(dayFromIso(hold.from))}`} className="mb-3">

@@ -6,7 +6,10 @@ import type { camps, holds, pins, sportEntries } from "../schema";
 type CampRow = typeof camps.$inferSelect;
 type SportRow = Omit<typeof sportEntries.$inferSelect, "teamId" | "campId">;
 type PinRow = typeof pins.$inferSelect;
-type HoldRow = Pick<typeof holds.$inferSelect, "fromDay" | "toDay">;
+type HoldRow = Pick<typeof holds.$inferSelect, "fromDay" | "toDay"> & {
+  readonly setAt: string | null;
+  readonly liftedAt: string | null;
+};
 
 const oneOf = <T extends string>(values: readonly T[], text: string): T => {
   const value = values.find((candidate) => candidate === text);
@@ -86,7 +89,12 @@ export function bookOf(rows: {
     pins: rows.pins.map(pinOf),
     coachFactors: camp.coachFactors,
     responses: camp.responses,
-    holds: rows.holds.map((hold) => ({ from: hold.fromDay, to: hold.toDay })),
+    holds: rows.holds.map(({ fromDay, toDay, setAt, liftedAt }) => ({
+      from: fromDay,
+      to: toDay,
+      ...(setAt !== null && { setAt }),
+      ...(liftedAt !== null && { liftedAt }),
+    })),
     rules: rows.rules,
   };
 }

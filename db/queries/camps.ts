@@ -47,7 +47,11 @@ export async function listOpenCampIds(
   return rows.map((row) => row.id);
 }
 
-/** What stands beside the camp's own row. */
+/** An instant as the wall clock of a zone shows it, YYYY-MM-DDTHH:MM. */
+const onTheClock = (at: typeof holds.createdAt | typeof holds.liftedAt, zone: string) =>
+  sql<string | null>`to_char(${at} at time zone ${zone}, 'YYYY-MM-DD"T"HH24:MI')`;
+
+/** What stands beside the camp's own row. Lifted holds too: what they took out of the past stays out. */
 export async function loadCampParts(tx: Tx, camp: CampRow) {
   const inCamp = <T extends typeof sportEntries | typeof pins | typeof sessions>(table: T) =>
     and(eq(table.teamId, camp.teamId), eq(table.campId, camp.id));
@@ -55,10 +59,15 @@ export async function loadCampParts(tx: Tx, camp: CampRow) {
     tx.select().from(sportEntries).where(inCamp(sportEntries)).orderBy(asc(sportEntries.id)),
     tx.select().from(pins).where(inCamp(pins)).orderBy(asc(pins.liftId)),
     tx
-      .select({ fromDay: holds.fromDay, toDay: holds.toDay })
+      .select({
+        fromDay: holds.fromDay,
+        toDay: holds.toDay,
+        setAt: onTheClock(holds.createdAt, camp.homeZone),
+        liftedAt: onTheClock(holds.liftedAt, camp.homeZone),
+      })
       .from(holds)
-      .where(and(eq(holds.teamId, camp.teamId), eq(holds.athleteId, camp.athleteId), isNull(holds.liftedAt)))
-      .orderBy(asc(holds.fromDay)),
+      .where(and(eq(holds.teamId, camp.teamId), eq(holds.athleteId, camp.athleteId)))
+      .orderBy(asc(holds.fromDay), asc(holds.createdAt)),
     tx.select().from(sessions).where(inCamp(sessions)).orderBy(asc(sessions.startsAt), asc(sessions.id)),
     tx.select({ rules: teams.ruleOverrides }).from(teams).where(eq(teams.id, camp.teamId)),
     tx

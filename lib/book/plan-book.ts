@@ -1,8 +1,9 @@
 import { expandEntries } from "@/lib/calendar/recurrence";
-import { dayFromIso, instantAt, isoFromDay, minuteFromHhmm, plan, withOverrides } from "@/lib/engine";
+import { dayFromIso, hhmm, instantAt, isoFromDay, minuteFromHhmm, plan, withOverrides } from "@/lib/engine";
 import type {
   Base,
   Day,
+  Hold,
   Instant,
   Pin,
   Plan,
@@ -11,7 +12,7 @@ import type {
   SportSession,
   Weekday,
 } from "@/lib/engine/types";
-import type { BookPin, CampBook } from "@/lib/schemas/camp-book";
+import type { BookPin, CampBook, CampHold } from "@/lib/schemas/camp-book";
 import { campSpan } from "./camp-span";
 import { zoneOf } from "./camp-zone";
 
@@ -23,16 +24,35 @@ export interface PlannedCamp {
 
 const CONTACT: ReadonlySet<SportKind> = new Set(["hard-sparring", "technical-sparring"]);
 
+/** True where a hold stands, or stood, over the start of a session. */
+function takesOut(hold: CampHold, { day, start }: Pick<SportSession, "day" | "start">): boolean {
+  const date = isoFromDay(day);
+  const at = `${date}T${hhmm(start)}`;
+  return (
+    hold.from <= date &&
+    (hold.to === null || date <= hold.to) &&
+    (hold.setAt === undefined || hold.setAt < at) &&
+    (hold.liftedAt === undefined || at <= hold.liftedAt)
+  );
+}
+
+/** Days on which the engine may plan no lifting; null for a hold that was lifted before its first day was over. */
+function engineHold({ from, to, liftedAt }: CampHold): Hold | null {
+  const first = dayFromIso(from);
+  const lifted = liftedAt === undefined ? null : ((dayFromIso(liftedAt.slice(0, 10)) - 1) as Day);
+  const planned = to === null ? null : dayFromIso(to);
+  const last = lifted === null ? planned : planned === null ? lifted : (Math.min(lifted, planned) as Day);
+  return last !== null && last < first ? null : { from: first, to: last };
+}
+
 /**
  * Sport sessions of the camp's days, in order. A hold stops contact from being planned: sparring on held days is left out
- * until the medic lifts the hold. Throws `RecurrenceError` for a recurrence that cannot be expanded.
+ * until the medic lifts the hold. What began before it was set had been; what it took out does not come back into the past. Throws `RecurrenceError` for a recurrence that cannot be expanded.
  */
 export function sportOf(book: CampBook): SportSession[] {
   const { from, to } = campSpan(book);
-  const held = (date: string): boolean =>
-    book.holds.some((hold) => hold.from <= date && (hold.to === null || date <= hold.to));
   return expandEntries(book.sport, from, to).filter(
-    (session) => !CONTACT.has(session.kind) || !held(isoFromDay(session.day)),
+    (session) => !CONTACT.has(session.kind) || !book.holds.some((hold) => takesOut(hold, session)),
   );
 }
 
@@ -64,10 +84,7 @@ export function planInputOf(book: CampBook, now: Instant): PlanInput {
     },
     sport,
     pins: book.pins.map(pinOf),
-    holds: book.holds.map((hold) => ({
-      from: dayFromIso(hold.from),
-      to: hold.to === null ? null : dayFromIso(hold.to),
-    })),
+    holds: book.holds.flatMap((hold) => engineHold(hold) ?? []),
     rules: withOverrides(book.rules),
     coachFactors: book.coachFactors,
     responses: book.responses.map(({ from, to, factor }) => ({

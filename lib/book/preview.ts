@@ -33,12 +33,20 @@ function rewritesPast(before: PlanInput, after: PlanInput, spanFrom: number): bo
   return old.size !== fresh.size || [...old].some((key) => !fresh.has(key));
 }
 
-/** Applies an edit and plans again, measured against the standing plan (or `base`, where a put-back gives its own). */
+/** What an edit is measured against, where that is not the standing plan and the book's own sport. */
+export interface Before {
+  /** A put-back gives its own. */
+  readonly base?: Base;
+  /** Sport as it stands, where the book already holds what changed (a hold). */
+  readonly sport?: readonly SportSession[];
+}
+
+/** Applies an edit and plans again, measured against the standing plan. */
 export function previewEdit(
   standing: StandingCamp,
   edit: BookEdit,
   now: Instant,
-  base?: Base,
+  { base, sport }: Before = {},
 ): PreviewResult {
   const book = applyEdit(standing.book, edit);
   try {
@@ -55,10 +63,11 @@ export function previewEdit(
         ],
       };
     }
+    const stands = sport ?? before.sport;
     const sportBefore =
       standing.book.status === "off"
-        ? before.sport.filter((s) => instantAt(before.zone, s.day, s.start) <= now)
-        : before.sport;
+        ? stands.filter((s) => instantAt(before.zone, s.day, s.start) <= now)
+        : stands;
     return {
       edit,
       book,

@@ -91,6 +91,16 @@ export const DATES_IN_ORDER = { path: ["to"], message: "The last day must not be
 export const campResponseSchema = z.object(campResponseFields).refine(datesInOrder, DATES_IN_ORDER);
 export type CampResponse = z.infer<typeof campResponseSchema>;
 
+/** A medical hold on the clock of the gym. It takes out nothing that began before it was set or after it was lifted. */
+export const campHoldSchema = z.object({
+  from: civilDate,
+  /** Inclusive; null until it is lifted. */
+  to: civilDate.nullable(),
+  setAt: civilDateTime.optional(),
+  liftedAt: civilDateTime.optional(),
+});
+export type CampHold = z.infer<typeof campHoldSchema>;
+
 export const campBookSchema = z.object({
   status: z.enum(["on", "off"]),
   /** Zone of the gym; sessions are in it until the travel day, in the venue's after. */
@@ -103,7 +113,7 @@ export const campBookSchema = z.object({
   pins: z.array(pinSchema).max(100),
   coachFactors: z.record(z.string(), coachFactor),
   responses: z.array(campResponseSchema).max(100),
-  holds: z.array(z.object({ from: civilDate, to: civilDate.nullable() })).max(50),
+  holds: z.array(campHoldSchema).max(50),
   /** The team's own values of house rules, by key. */
   rules: z.record(z.string(), z.number()),
 });

@@ -68,12 +68,9 @@ describe("accepting a suggestion", () => {
   it("put back, the plan and the book that stood before are there again, to the byte", () => {
     const saved = savedOf(camp, made);
     expect(putBackProblem(made.book, saved)).toBeNull();
-    const back = previewEdit(
-      { book: made.book, plan: made.plan },
-      saved.inverse,
-      NOW,
-      putBackBase(made.plan, saved),
-    );
+    const back = previewEdit({ book: made.book, plan: made.plan }, saved.inverse, NOW, {
+      base: putBackBase(made.plan, saved),
+    });
     if (!isPreview(back)) throw new Error("not planned");
     expect(JSON.stringify(back.plan.lifts)).toBe(JSON.stringify(camp.plan.lifts));
     expect(JSON.stringify(back.book)).toBe(JSON.stringify(camp.book));

@@ -2,6 +2,7 @@ import { randomUUID } from "node:crypto";
 import { insertCamp, insertRevision, writeEdit } from "@/db/queries/camps";
 import { findAthlete, insertAthlete } from "@/db/queries/athletes";
 import { writeAudit } from "@/db/queries/audit";
+import { listHolds } from "@/db/queries/holds";
 import { sessionWrites, writeSessions } from "@/db/queries/sessions";
 import { findTeam } from "@/db/queries/teams";
 import { sessionsOf } from "@/db/mappers/sessions";
@@ -74,7 +75,17 @@ export async function createCamp(
 }
 
 /** Writes a new camp in the caller's transaction. */
-export async function keepCamp(tx: Tx, ctx: TeamContext, athleteId: string, book: CampBook): Promise<string> {
+export async function keepCamp(
+  tx: Tx,
+  ctx: TeamContext,
+  athleteId: string,
+  draft: CampBook,
+): Promise<string> {
+  // A hold follows the athlete into a new camp.
+  const holds = (await listHolds(tx, ctx.teamId, athleteId)).flatMap(({ hold }) =>
+    hold.liftedAt === null ? [{ from: hold.fromDay, to: hold.toDay }] : [],
+  );
+  const book = { ...draft, holds };
   const { input, plan } = planned(book, ctx.now);
   const { lifts, ...summary } = plan;
   const camp = await insertCamp(tx, ctx.teamId, { athleteId, book, summary, now: ctx.now });

@@ -3,6 +3,8 @@ import { listOpenCampIds } from "@/db/queries/camps";
 import type { Tx } from "@/db/client";
 import { isPreview, previewEdit } from "@/lib/book";
 import { instantOf } from "@/lib/calendar/zones";
+import { dayFromIso, minuteFromHhmm } from "@/lib/engine";
+import type { SportKind, SportSession } from "@/lib/engine/types";
 import { AppError } from "@/lib/errors";
 import type { TeamContext } from "@/lib/services/context";
 import { commitPreview } from "./commit";
@@ -19,7 +21,7 @@ export async function replan(tx: Tx, ctx: TeamContext, summary: string, athleteI
   for (const id of ids) {
     const camp = await loadCamp(tx, ctx, id, { lock: true });
     if (boutIsOver(camp, ctx.now)) continue;
-    const preview = previewEdit(camp, {}, instantOf(ctx.now));
+    const preview = previewEdit(camp, {}, instantOf(ctx.now), { sport: sportOfRows(camp.sessions) });
     if (!isPreview(preview))
       throw new AppError("invalid", preview.problems[0]?.message ?? "A camp cannot be planned.", {
         errors: preview.problems,
@@ -36,6 +38,24 @@ export async function replan(tx: Tx, ctx: TeamContext, summary: string, athleteI
   }
   return changed;
 }
+
+/** Sport as it stands in the calendar: the book already holds what changed, so it cannot say what was there before. */
+const sportOfRows = (rows: LoadedCamp["sessions"]): SportSession[] =>
+  rows.flatMap(({ source, status, id, kind, title, day, start, minutes, effort }) =>
+    source === "sport" && status === "confirmed"
+      ? [
+          {
+            id,
+            kind: kind as SportKind,
+            title,
+            day: dayFromIso(day),
+            start: minuteFromHhmm(start),
+            minutes,
+            effort,
+          },
+        ]
+      : [],
+  );
 
 const boutIsOver = (camp: LoadedCamp, now: Date): boolean =>
   camp.sessions.some((session) => session.source === "bout" && session.startsAt <= now);

@@ -93,7 +93,7 @@ async function previewOf(
   const problem = putBackProblem(camp.book, past);
   if (problem) return refused(problem);
   return {
-    preview: previewEdit(camp, past.inverse, now, putBackBase(camp.plan, past)),
+    preview: previewEdit(camp, past.inverse, now, { base: putBackBase(camp.plan, past) }),
     putBackOf: change.revision,
   };
 }
