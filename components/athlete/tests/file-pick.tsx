@@ -34,6 +34,10 @@ function FileInput({ onPick }: Pick<FilePickProps, "onPick">) {
       type="file"
       accept=".csv,.txt,.tsv,text/csv,text/plain"
       className="block min-h-control w-full text-sm"
+      // The same file, mended, can be chosen again.
+      onClick={(event) => {
+        event.currentTarget.value = "";
+      }}
       onChange={(event) => {
         const [file] = event.target.files ?? [];
         if (file) onPick(file);

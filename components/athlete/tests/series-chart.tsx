@@ -2,8 +2,8 @@ import { Chart, LegendItem } from "@/components/charts/chart";
 import { BandMark, DotMarks, LevelMark, LineMark } from "@/components/charts/marks";
 import { plotOf } from "@/components/charts/plot";
 import { dayFromIso } from "@/lib/engine/geometry";
+import { measureText } from "@/lib/format/measure";
 import type { TestSeries } from "@/lib/schemas/test-trial";
-import { measureText } from "./words";
 
 interface SeriesChartProps {
   readonly series: TestSeries;

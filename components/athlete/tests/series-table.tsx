@@ -3,9 +3,9 @@ import { Cell, HeadCell, Table } from "@/components/ui/table";
 import { POWER_REGRESSIONS, type PowerMethod } from "@/lib/engine/measures/jump-power";
 import { TEST_SPECS } from "@/lib/engine/measures/test-kinds";
 import { massText, type MassUnit } from "@/lib/format/load";
+import { measureText } from "@/lib/format/measure";
 import type { TestDay, TestSeries, TrialView } from "@/lib/schemas/test-trial";
 import { dateText } from "../words";
-import { measureText } from "./words";
 
 interface SeriesTableProps {
   readonly series: TestSeries;

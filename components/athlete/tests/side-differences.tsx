@@ -1,9 +1,10 @@
 import { Cell, HeadCell, Table } from "@/components/ui/table";
 import { ASYMMETRY_CAUTION } from "@/lib/engine/measures/asymmetry";
 import type { MassUnit } from "@/lib/format/load";
+import { measureText } from "@/lib/format/measure";
 import type { SideDifference } from "@/lib/schemas/test-trial";
 import { dateText } from "../words";
-import { measureText, seriesTitle } from "./words";
+import { seriesTitle } from "./words";
 
 const against = (beyond: boolean | null): string =>
   beyond === null

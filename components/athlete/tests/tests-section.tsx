@@ -9,14 +9,15 @@ import { Select } from "@/components/ui/select";
 import { showToast } from "@/components/ui/toasts";
 import { POWER_METHODS, POWER_REGRESSIONS, type PowerMethod } from "@/lib/engine/measures/jump-power";
 import type { MassUnit } from "@/lib/format/load";
-import { useRemoveTrial, useRestoreTrial, useTests } from "@/lib/query/record";
+import { measureText } from "@/lib/format/measure";
+import { useRemoveTrial, useRestoreTrial, useTakeBackUpload, useTests } from "@/lib/query/record";
 import type { TestSeries, TestsView, TrialView } from "@/lib/schemas/test-trial";
 import { Section } from "../record/section";
 import { SeriesChart } from "./series-chart";
 import { SeriesTable } from "./series-table";
 import { SideDifferences } from "./side-differences";
 import { TrialDialog } from "./trial-dialog";
-import { measureText, seriesTitle } from "./words";
+import { seriesTitle } from "./words";
 
 // Reading files needs a parser that nothing else on the page needs.
 const UploadDialog = dynamic(() => import("./upload-dialog").then((loaded) => loaded.UploadDialog));
@@ -97,6 +98,7 @@ export function TestsSection({ athleteId, initial, today, unit, writes }: TestsS
   const [power, setPower] = useState<PowerMethod>("sayers-countermovement");
   const remove = useRemoveTrial(athleteId);
   const restore = useRestoreTrial(athleteId);
+  const takeBack = useTakeBackUpload(athleteId);
   const failed = (error: Error): void => showToast(error.message, { tone: "error" });
   const putBack = (id: string): void =>
     restore.mutate(id, { onError: failed, onSuccess: () => showToast("The trial is back.") });
@@ -108,6 +110,18 @@ export function TestsSection({ athleteId, initial, today, unit, writes }: TestsS
           action: { label: "Put back", run: () => putBack(trial.id) },
         }),
     });
+  // Here, not in the dialog: it is closed by then, and nobody would say how it went.
+  const takeBackFile = (uploadId: string): void =>
+    takeBack.mutate(uploadId, {
+      onError: failed,
+      onSuccess: ({ count }) => showToast(`${count} trials are taken back.`),
+    });
+  const imported = ({ uploadId, count }: { uploadId: string; count: number }): void => {
+    showToast(`${count} trials are imported.`, {
+      action: { label: "Take back", run: () => takeBackFile(uploadId) },
+    });
+    setShown(null);
+  };
   const hasPower = data.series.some(({ days }) => days.some(({ powers }) => powers.length > 0));
   const close = (): void => setShown(null);
   return (
@@ -151,7 +165,7 @@ export function TestsSection({ athleteId, initial, today, unit, writes }: TestsS
         <TrialDialog athleteId={athleteId} today={today} unit={unit} onClose={close} />
       ) : null}
       {shown === "upload" ? (
-        <UploadDialog athleteId={athleteId} known={data} unit={unit} onClose={close} />
+        <UploadDialog athleteId={athleteId} known={data} unit={unit} onDone={imported} onClose={close} />
       ) : null}
     </Section>
   );

@@ -6,9 +6,8 @@ import { Actions, Dialog } from "@/components/ui/dialog";
 import { Field } from "@/components/ui/field";
 import { Notice } from "@/components/ui/notice";
 import { Select } from "@/components/ui/select";
-import { showToast } from "@/components/ui/toasts";
 import type { MassUnit } from "@/lib/format/load";
-import { useTakeBackUpload, useUploadTrials } from "@/lib/query/record";
+import { useUploadTrials } from "@/lib/query/record";
 import { ProblemError } from "@/lib/query/send";
 import { MOST_ROWS, type TestsView, type TrialForm } from "@/lib/schemas/test-trial";
 import {
@@ -32,6 +31,7 @@ interface UploadDialogProps {
   /** What stands already, to say where a file repeats it. */
   readonly known: TestsView;
   readonly unit: MassUnit;
+  readonly onDone: (saved: { readonly uploadId: string; readonly count: number }) => void;
   readonly onClose: () => void;
 }
 
@@ -45,6 +45,8 @@ interface Chosen {
 
 /** Bytes that the server reads at most. */
 const MOST_BYTES = 256 * 1024;
+/** A larger file is no list of trials: reading it would only freeze the page. Bytes. */
+const MOST_FILE_BYTES = 2 * 1024 * 1024;
 
 const sameAs = (trial: TrialForm): string =>
   [trial.kind, trial.side, trial.day, trial.value, trial.second].join(" ");
@@ -128,11 +130,11 @@ function HabitFields({
 }
 
 /** Trials from a CSV file: columns, preview, and all rows or none. */
-export function UploadDialog({ athleteId, known, unit, onClose }: UploadDialogProps) {
+export function UploadDialog({ athleteId, known, unit, onDone, onClose }: UploadDialogProps) {
   const [chosen, setChosen] = useState<Chosen | null>(null);
   const [habits, setHabits] = useState<FileHabits>({ dates: "iso", masses: unit });
+  const [refused, setRefused] = useState(false);
   const upload = useUploadTrials(athleteId);
-  const takeBack = useTakeBackUpload(athleteId);
   const read = useMemo(() => (chosen ? readRows(chosen.table, chosen.map, habits) : []), [chosen, habits]);
   const rows = withRefusals(read, upload.error);
   const trials = read.flatMap(({ trial }) => trial ?? []);
@@ -144,6 +146,8 @@ export function UploadDialog({ athleteId, known, unit, onClose }: UploadDialogPr
 
   const pick = async (file: File): Promise<void> => {
     upload.reset();
+    setRefused(file.size > MOST_FILE_BYTES);
+    if (file.size > MOST_FILE_BYTES) return setChosen(null);
     const table = tableOf(textOf(await file.arrayBuffer()));
     setChosen({ name: file.name, uploadId: crypto.randomUUID(), table, map: guessColumns(table.head) });
   };
@@ -151,21 +155,9 @@ export function UploadDialog({ athleteId, known, unit, onClose }: UploadDialogPr
     upload.reset();
     next();
   };
-  const undo = (uploadId: string): void =>
-    takeBack.mutate(uploadId, {
-      onSuccess: ({ count }) => showToast(`${count} trials are taken back.`),
-      onError: (error) => showToast(error.message, { tone: "error" }),
-    });
   const send = (): void => {
     if (!body || wrong > 0 || tooLarge || trials.length === 0) return;
-    upload.mutate(body, {
-      onSuccess: ({ uploadId, count }) => {
-        showToast(`${count} trials are imported.`, {
-          action: { label: "Take back", run: () => undo(uploadId) },
-        });
-        onClose();
-      },
-    });
+    upload.mutate(body, { onSuccess: onDone });
   };
   return (
     <Dialog
@@ -177,6 +169,9 @@ export function UploadDialog({ athleteId, known, unit, onClose }: UploadDialogPr
     >
       <div className="grid gap-4">
         <FilePick name={chosen?.name ?? null} unit={unit} onPick={(file) => void pick(file)} />
+        {refused ? (
+          <Notice tone="error" role="alert" title="That file is above 2 MiB: this is no list of trials." />
+        ) : null}
         {chosen && read.length === 0 ? (
           <Notice tone="error" role="alert" title="The file has no rows under its head." />
         ) : null}

@@ -15,9 +15,3 @@ export function seriesTitle(
     .filter(Boolean)
     .join(", ");
 }
-
-const DECIMALS: Readonly<Record<string, number>> = { cm: 1, ms: 0, m: 2, "m/s": 2 };
-
-/** "41.0 cm". */
-export const measureText = (value: number, unit: string): string =>
-  `${value.toFixed(DECIMALS[unit] ?? 1)} ${unit}`;

@@ -6,8 +6,9 @@ import {
   smallestWorthwhile,
   type TestKind,
 } from "@/lib/engine/measures";
+import { measureText } from "@/lib/format/measure";
 import type { TestError } from "@/lib/schemas/test-trial";
-import { measureText, measuredOf } from "./measure";
+import { measuredOf } from "./measure";
 
 /**
  * The error of one measurement: the athlete's own where there are enough repeated trials, else a published one where the

@@ -36,9 +36,3 @@ export const seriesKeyOf = (kind: TestKind, side: TestSide, second: number | nul
 });
 
 export const keyText = ({ kind, side, at }: SeriesKey): string => `${kind} ${side} ${at ?? ""}`.trim();
-
-const DECIMALS: Readonly<Record<string, number>> = { cm: 1, ms: 0, m: 2, "m/s": 2, kg: 1 };
-
-/** "41.0 cm", "1.75 m/s". */
-export const measureText = (value: number, unit: string): string =>
-  `${value.toFixed(DECIMALS[unit] ?? 1)} ${unit}`;

@@ -12,6 +12,7 @@ import {
   type TestKind,
   type TestSide,
 } from "@/lib/engine/measures";
+import { measureText } from "@/lib/format/measure";
 import type {
   SideDifference,
   TestDay,
@@ -21,7 +22,7 @@ import type {
   TrialView,
 } from "@/lib/schemas/test-trial";
 import { errorOf, worthwhileOf } from "./error";
-import { keyText, measureOf, measureText, measuredOf, seriesKeyOf, type SeriesKey } from "./measure";
+import { keyText, measureOf, measuredOf, seriesKeyOf, type SeriesKey } from "./measure";
 
 /** A trial as the summary needs it. `kind` is checked against the engine's list: what it does not know is left out. */
 export interface SummaryTrial {

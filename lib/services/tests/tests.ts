@@ -24,7 +24,7 @@ type ById = { params: Record<string, string> };
 
 /** Trials of an athlete with what can be said of them. */
 export async function listTests(ctx: TeamContext, { params }: ById): Promise<TestsView> {
-  const { athlete } = await athleteFor(ctx.db, ctx, params.id, "tests.read");
+  const { athlete, minor } = await athleteFor(ctx.db, ctx, params.id, "tests.read");
   const [trials, people] = await Promise.all([
     listTrials(ctx.db, ctx.teamId, athlete.id),
     listNewestOfTeam(ctx.db, ctx.teamId),
@@ -32,7 +32,7 @@ export async function listTests(ctx: TeamContext, { params }: ById): Promise<Tes
   const [first, last] = [trials[0]?.day, trials.at(-1)?.day];
   const seesWeights = can(ctx.member, "weight.read", athlete.id);
   const weights =
-    first !== undefined && last !== undefined && seesWeights
+    first !== undefined && last !== undefined && seesWeights && !minor
       ? await listWeights(ctx.db, ctx.teamId, athlete.id, { from: first, to: last })
       : [];
   const shown = seesWeights ? trials : trials.map((trial) => ({ ...trial, massKg: null }));
