@@ -133,8 +133,17 @@ const logged = {
   knock: sql<(boolean | null)[]>`${list(sessionLogs.knock)}`,
 };
 
+/** The same days by the clock, with room for every zone: the team's index is by time. */
+const around = ({ from, to }: Days) =>
+  and(
+    sql`${sessions.startsAt} >= ${from}::date - 1`,
+    sql`${sessions.startsAt} < ${to}::date + 2`,
+    gte(sessions.day, from),
+    lte(sessions.day, to),
+  );
+
 /** Sessions of the camps of a scope as planned, without their logs, in any order. */
-export async function listBoardPlanned(tx: Tx, teamId: string, scope: BoardScope, { from, to }: Days) {
+export async function listBoardPlanned(tx: Tx, teamId: string, scope: BoardScope, days: Days) {
   return tx
     .select({ campId: sessions.campId, ...planned })
     .from(sessions)
@@ -144,15 +153,14 @@ export async function listBoardPlanned(tx: Tx, teamId: string, scope: BoardScope
         inScope(teamId, scope),
         eq(sessions.teamId, teamId),
         eq(sessions.status, "confirmed"),
-        gte(sessions.day, from),
-        lte(sessions.day, to),
+        around(days),
       ),
     )
     .groupBy(sessions.campId);
 }
 
 /** The same with their logs, and with those that left the plan and were logged. */
-export async function listBoardSessions(tx: Tx, teamId: string, scope: BoardScope, { from, to }: Days) {
+export async function listBoardSessions(tx: Tx, teamId: string, scope: BoardScope, days: Days) {
   return (
     tx
       .select({ campId: sessions.campId, ...planned, ...logged })
@@ -161,14 +169,18 @@ export async function listBoardSessions(tx: Tx, teamId: string, scope: BoardScop
       // A log lies on the day of its session: the days of the window keep the seasons before out of the join.
       .leftJoin(
         sessionLogs,
-        and(ofSession, eq(sessionLogs.teamId, teamId), gte(sessionLogs.day, from), lte(sessionLogs.day, to)),
+        and(
+          ofSession,
+          eq(sessionLogs.teamId, teamId),
+          gte(sessionLogs.day, days.from),
+          lte(sessionLogs.day, days.to),
+        ),
       )
       .where(
         and(
           inScope(teamId, scope),
           eq(sessions.teamId, teamId),
-          gte(sessions.day, from),
-          lte(sessions.day, to),
+          around(days),
           or(eq(sessions.status, "confirmed"), sql`${sessionLogs.state} is not null`),
         ),
       )

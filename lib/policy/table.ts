@@ -17,6 +17,7 @@ export const POLICY = {
     own: ["athlete"],
   },
   "athletes.write": { description: "Add and edit athletes", roles: ["head", "strength"] },
+  "board.read": { description: "See the board", roles: ["head", "strength", "skills", "medic"] },
   "camps.create": { description: "Set a bout and lay out a camp", roles: ["head", "strength"] },
   "camps.read": {
     description: "See a camp's calendar",

@@ -134,6 +134,27 @@ export const TRIAL = {
 
 /** Every route for members of a team. */
 export const TEAM_ROUTES: readonly RouteRow[] = [
+  { path: "board", method: "GET", may: "board.read" },
+  {
+    path: "camps/[id]/suggestions",
+    method: "GET",
+    may: "suggestions.decide",
+    params: ({ campId }) => ({ id: campId }),
+  },
+  {
+    path: "camps/[id]/suggestions/[key]/accept",
+    method: "POST",
+    may: "suggestions.decide",
+    params: ({ campId }) => ({ id: campId, key: "pain:mon@2026-11-30" }),
+    body: () => ({ baseRevision: 1, idempotencyKey: "5d1f0a52-6f0e-4b57-9a55-0c7f3a1f7b9a", note: "" }),
+  },
+  {
+    path: "camps/[id]/suggestions/[key]/dismiss",
+    method: "POST",
+    may: "suggestions.decide",
+    params: ({ campId }) => ({ id: campId, key: "pain:mon@2026-11-30" }),
+    body: () => ({ reason: "Talked about it." }),
+  },
   { path: "account", method: "GET", may: "account.own" },
   { path: "account", method: "PUT", may: "account.own", body: () => ACCOUNT },
   {

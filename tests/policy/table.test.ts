@@ -11,6 +11,7 @@ const EXPECTED: Record<Action, string> = {
   "team.people": "xxxx..",
   "athletes.read": "xxxxo.",
   "athletes.write": "xx....",
+  "board.read": "xxxx..",
   "camps.create": "xx....",
   "camps.read": "xxxxoo",
   "camps.history": "xxxx..",

@@ -1,25 +1,24 @@
 import type { Metadata } from "next";
 import { redirect } from "next/navigation";
-import { BoardList } from "@/components/board/board-list";
+import { BoardDesk } from "@/components/board/board-desk";
 import { PageHead } from "@/components/shell/page-head";
 import { LinkButton } from "@/components/ui/link-button";
-import { civilNow } from "@/lib/calendar/zones";
 import { pageContext } from "@/lib/http/page";
-import { can, isStaff } from "@/lib/policy";
-import { listCampSummaries } from "@/lib/services/camps/read";
+import { can } from "@/lib/policy";
+import { readBoard } from "@/lib/services/board/read-board";
 
 export const metadata: Metadata = { title: "Board" };
 
 export default async function Page() {
   const ctx = await pageContext();
-  if (!isStaff(ctx.member.role)) redirect(ctx.member.role === "athlete" ? "/today" : "/camps");
-  const { camps } = await listCampSummaries(ctx);
+  if (!can(ctx.member, "board.read")) redirect(ctx.member.role === "athlete" ? "/today" : "/camps");
+  const board = await readBoard(ctx);
   const creates = can(ctx.member, "camps.create");
   return (
     <>
       <PageHead
         title="Board"
-        lead="Every camp by days out, and the next 14 days."
+        lead="Everyone in camp by days out: three days back, today, ten ahead, and what to look at."
         actions={
           creates ? (
             <LinkButton href="/camps/new" variant="primary">
@@ -28,7 +27,7 @@ export default async function Page() {
           ) : undefined
         }
       />
-      <BoardList camps={camps} today={civilNow(ctx.person.timeZone, ctx.now).day} creates={creates} />
+      <BoardDesk initial={board} creates={creates} />
     </>
   );
 }

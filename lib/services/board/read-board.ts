@@ -11,7 +11,7 @@ import { instantOf } from "@/lib/calendar/zones";
 import { DAY_MINUTES, dayFromIso, daysOutOf, isoFromDay } from "@/lib/engine";
 import type { Day, Instant } from "@/lib/engine/types";
 import { AppError, notFound } from "@/lib/errors";
-import { can, isStaff } from "@/lib/policy";
+import { can } from "@/lib/policy";
 import type { BoardAttendance, BoardDay, BoardMark, BoardRow, BoardView } from "@/lib/schemas/board";
 import type { TeamContext } from "@/lib/services/context";
 import {
@@ -149,7 +149,7 @@ function nearestOf(all: readonly CampAnswers[]): CampAnswers[] {
  */
 export async function readBoard(ctx: TeamContext): Promise<BoardView> {
   const { db, teamId, member } = ctx;
-  if (!isStaff(member.role)) throw new AppError("forbidden", "Your role may not do this.");
+  if (!can(member, "board.read")) throw new AppError("forbidden", "Your role may not do this.");
   const now = instantOf(ctx.now);
   const utc = Math.floor(now / DAY_MINUTES);
   const before = isoFromDay((utc - 1) as Day);

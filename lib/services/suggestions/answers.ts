@@ -73,8 +73,8 @@ export interface CampAnswers {
 const START_BACK_DAYS = 7;
 /** With a day to spare over the 28 that the engine looks back for a rate. */
 const WEIGHT_BACK_DAYS = 35;
-/** The longest that a suggestion reaches; see `response.effort-days`. */
-const AHEAD_DAYS = 14;
+/** Days ahead that the board shows; a suggestion may reach further. */
+const AHEAD_DAYS = 10;
 /** Athletes may be a civil day before or behind the gym. */
 const ZONES = 1;
 
@@ -159,7 +159,8 @@ export async function readAnswers(
     to: isoFromDay((base + ahead + ZONES) as Day),
   });
   // The week that ended within what still counts is needed from its first day on.
-  const around = days(rules["response.recent"] + 6, AHEAD_DAYS);
+  const reach = Math.max(AHEAD_DAYS, rules["response.effort-days"], rules["response.checkin-span"]);
+  const around = days(rules["response.recent"] + 6, reach);
   const [sessions, checkIns, weights] = await Promise.all([
     sees.logs || sees.pain
       ? listBoardSessions(tx, teamId, scope, around)
