@@ -47,7 +47,7 @@ function Reasons({ line }: { readonly line: LineView }) {
   const shown = line.reasons.filter(({ rule }) => rule !== "percent");
   return (
     <details className="mt-2 text-sm">
-      <summary className="flex min-h-control-small items-center font-semibold">How, and why this</summary>
+      <summary className="py-3 font-semibold">How, and why this</summary>
       <ul className="list-disc space-y-0.5 pl-5">
         {line.cues.map((cue) => (
           <li key={cue}>{cue}</li>

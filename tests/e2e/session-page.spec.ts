@@ -28,8 +28,8 @@ test("a coach's edit stands beside what was planned, and goes back by the messag
   if (!line) throw new Error("There is no line.");
   const sets = line.sets === 4 ? 3 : 4;
   const edit = async () => {
-    await page.getByRole("button", { name: `Edit ${line.name}` }).click();
-    const form = page.getByRole("form", { name: `Edit ${line.name}` });
+    await page.getByRole("button", { name: `Edit ${line.name}`, exact: true }).click();
+    const form = page.getByRole("form", { name: `Edit ${line.name}`, exact: true });
     await form.getByLabel("Sets").fill(String(sets));
     await form.getByLabel("Note").fill("Stop two short.");
     await form.getByRole("button", { name: "Save the line" }).click();
@@ -51,11 +51,11 @@ test("a swap says for how many sessions it holds, and is put back", async ({ pag
   const to = line?.swaps[0];
   if (!lift || !line || to === undefined) throw new Error("There is nothing to swap.");
   const name = lift.names[to] ?? to;
-  await page.getByRole("button", { name: `Swap ${line.name}` }).click();
+  await page.getByRole("button", { name: `Swap ${line.name}`, exact: true }).click();
   await page.getByRole("button", { name: "Swap for all Strength A of this camp" }).click();
   await expect(page.getByText(`Instead of ${line.name} in all Strength A of this camp.`)).toBeVisible();
   await expect(page.getByRole("heading", { level: 3, name })).toBeVisible();
-  await page.getByRole("button", { name: `Put ${line.name} back` }).click();
+  await page.getByRole("button", { name: `Put ${line.name} back`, exact: true }).click();
   await expect(page.getByRole("heading", { level: 3, name: line.name })).toBeVisible();
 });
 
