@@ -16,8 +16,8 @@ async function printed(page: Page, info: TestInfo, name: string) {
   await page.evaluate(() => document.fonts.ready);
   const file = info.outputPath(`${name}.pdf`);
   writeFileSync(file, await page.pdf({ preferCSSPageSize: true, printBackground: true }));
-  const facts = execFileSync("pdfinfo", [file], { encoding: "utf8" });
-  const text = execFileSync("pdftotext", ["-layout", file, "-"], { encoding: "utf8" });
+  const facts = execFileSync("/usr/bin/pdfinfo", [file], { encoding: "utf8" });
+  const text = execFileSync("/usr/bin/pdftotext", ["-layout", file, "-"], { encoding: "utf8" });
   return {
     pages: Number(/^Pages:\s+(\d+)$/m.exec(facts)?.[1]),
     size: /^Page size:\s+(.+)$/m.exec(facts)?.[1] ?? "",
