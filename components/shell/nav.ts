@@ -28,6 +28,13 @@ const ENTRIES: readonly NavEntry[] = [
 
 export type NavItem = Pick<NavEntry, "href" | "label">;
 
-/** The pages that the bar leads this member to. */
-export const navFor = (member: Member): NavItem[] =>
-  ENTRIES.filter(({ shows }) => shows(member)).map(({ href, label }) => ({ href, label }));
+/** The pages that the bar leads this member to; an athlete's own page has its own address. */
+export const navFor = (member: Member): NavItem[] => {
+  const { role, athleteId } = member;
+  const own =
+    role === "athlete" && athleteId !== null ? [{ href: `/athletes/${athleteId}`, label: "My page" }] : [];
+  return [
+    ...ENTRIES.filter(({ shows }) => shows(member)).map(({ href, label }) => ({ href, label })),
+    ...own,
+  ];
+};
