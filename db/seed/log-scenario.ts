@@ -65,9 +65,12 @@ export const STORIES: Readonly<Record<string, AthleteStory>> = {
 /** Best lifted for so many repetitions, as a share of body mass; one of several repetitions gives an estimate. */
 export const BEST_LIFTS: Readonly<Record<string, { readonly share: number; readonly reps: number }>> = {
   "trap-bar-deadlift": { share: 1.6, reps: 3 },
+  "wide-stance-deadlift": { share: 1.5, reps: 3 },
+  "conventional-deadlift": { share: 1.55, reps: 3 },
   "back-squat": { share: 1.2, reps: 3 },
   "front-squat": { share: 1.05, reps: 3 },
   "bench-press": { share: 0.9, reps: 3 },
+  "incline-press": { share: 0.75, reps: 3 },
   "bent-row": { share: 0.75, reps: 5 },
   "barbell-hip-thrust": { share: 1.5, reps: 5 },
 };

@@ -57,18 +57,18 @@ const STAFF_PAGES = [
   "OTHER",
   "OWN/changes",
 ];
-const PLANNING = ["/camps/new", "/athletes/new", "/exercises/new", "/house-rules", "/today"];
+const PLANNING = ["/camps/new", "/athletes/new", "/exercises/new", "/house-rules"];
 
 const SEES: Record<Role, Sees> = {
-  head: { nav: NAV, pages: [...COACH, ...STAFF_PAGES], missing: ["/today"] },
-  strength: { nav: NAV, pages: [...COACH, ...STAFF_PAGES], missing: ["/today"] },
+  head: { nav: NAV, pages: [...COACH, ...STAFF_PAGES], missing: [] },
+  strength: { nav: NAV, pages: [...COACH, ...STAFF_PAGES], missing: [] },
   skills: { nav: NAV.slice(0, 5), pages: STAFF_PAGES, missing: PLANNING },
   medic: { nav: NAV.slice(0, 5), pages: STAFF_PAGES, missing: PLANNING },
   athlete: {
-    nav: ["Today", "Camps"],
+    nav: ["Today", "Camps", "My page"],
     pages: ["/today", "OWN", "OWN-ATHLETE", "/settings"],
     missing: [
-      ...PLANNING.filter((path) => path !== "/today"),
+      ...PLANNING,
       "/timetable",
       "/exercises",
       "OTHER",
