@@ -2,6 +2,7 @@
 
 import dynamic from "next/dynamic";
 import { useCallback, useEffect, useState } from "react";
+import { Waiting } from "@/components/suggestions/waiting";
 import { Notice } from "@/components/ui/notice";
 import { isoFromDay } from "@/lib/engine/geometry";
 import type { Day, Instant } from "@/lib/engine/types";
@@ -71,6 +72,7 @@ export function CampPage({ initial, now: serverNow, selected }: CampPageProps) {
         onBout={() => setDialog({ kind: "bout" })}
         onAdd={() => addOn(today)}
       />
+      {view.may.includes("suggestions.decide") ? <Waiting desk={desk} /> : null}
       <HoldNotice book={shown.book} today={today} />
       <Ropes picture={shown} today={today} may={view.may} mark={mark} />
       <div className="mt-4 grid items-start gap-4 lg:grid-cols-[minmax(0,1fr)_356px]">

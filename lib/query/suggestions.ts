@@ -25,14 +25,17 @@ const waitingQuery = (campId: string) =>
     queryFn: () => sendJson<WaitingView>(suggestionsUrl(campId)),
   });
 
-/** What of a camp waits for a coach; asked for only by those who may decide. */
-export const useWaiting = (campId: string, decides: boolean) =>
-  useQuery({ ...waitingQuery(campId), enabled: decides });
+/** What of a camp waits for a coach; for those who may decide. */
+export const useWaiting = (campId: string) => useQuery(waitingQuery(campId));
 
-export const useAcceptSuggestion = (campId: string) =>
+/** `onAccepted` hears of it before the camp is read again. */
+export const useAcceptSuggestion = (campId: string, onAccepted: (answer: AcceptAnswer) => void) =>
   useChange(
-    ({ key, ...body }: AcceptSuggestion & { readonly key: string }) =>
-      sendJson<AcceptAnswer>(suggestionUrl(campId, key, "accept"), body),
+    async ({ key, ...body }: AcceptSuggestion & { readonly key: string }) => {
+      const answer = await sendJson<AcceptAnswer>(suggestionUrl(campId, key, "accept"), body);
+      onAccepted(answer);
+      return answer;
+    },
     campQuery(campId).queryKey,
     boardQuery.queryKey,
   );

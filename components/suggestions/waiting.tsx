@@ -1,0 +1,41 @@
+"use client";
+
+import dynamic from "next/dynamic";
+import { useEffect, useState } from "react";
+import type { Desk } from "@/components/camp/use-desk";
+import { Button } from "@/components/ui/button";
+import { useWaiting } from "@/lib/query/suggestions";
+import { waitingText } from "./waiting-text";
+
+// Fetched when it is opened: the page itself only counts.
+const WaitingPanel = dynamic(() => import("./waiting-panel").then((module) => module.WaitingPanel), {
+  ssr: false,
+});
+
+/** How much of a camp waits for a coach, and the panel where it is decided. Silent where nothing ever did. */
+export function Waiting({ desk }: { readonly desk: Desk }) {
+  const { view } = desk;
+  const { data, refetch } = useWaiting(view.id);
+  // The board leads here by the part of the address that the server never sees; nothing is drawn before the browser has asked.
+  const [open, setOpen] = useState(
+    () => typeof window !== "undefined" && window.location.hash === "#waiting",
+  );
+  const behind = data !== undefined && data.revision < view.revision;
+  useEffect(() => {
+    if (behind) void refetch();
+  }, [behind, refetch]);
+  if (!data) return null;
+  const text = waitingText(data);
+  if (text === "" && data.decisions.length === 0) return null;
+  return (
+    <div id="waiting">
+      <p className="mb-3 flex flex-wrap items-center gap-3 text-sm">
+        <b className="font-semibold">{text || "Nothing waits for you"}</b>
+        <Button size="small" aria-expanded={open} onClick={() => setOpen(!open)}>
+          {open ? "Close" : "Look at it"}
+        </Button>
+      </p>
+      {open ? <WaitingPanel desk={desk} waiting={data} /> : null}
+    </div>
+  );
+}
