@@ -6,7 +6,7 @@ import { dayText } from "@/lib/format/civil";
 import type { Attendance, ReportWeek } from "@/lib/schemas/report";
 
 const number = (value: number | null): string =>
-  value === null ? "nothing logged" : value.toLocaleString("en-GB");
+  value === null ? "nothing logged" : Math.round(value).toLocaleString("en-GB");
 
 interface AttendanceTableProps {
   readonly rows: readonly Attendance[];

@@ -3,6 +3,7 @@
 import { useState } from "react";
 import { PageHead } from "@/components/shell/page-head";
 import { Button } from "@/components/ui/button";
+import { buttonLook } from "@/components/ui/button-look";
 import { EmptyState } from "@/components/ui/empty-state";
 import { LinkButton } from "@/components/ui/link-button";
 import { Panel } from "@/components/ui/panel";
@@ -70,10 +71,7 @@ export function ReportPage({ initial }: { readonly initial: ReportView }) {
             <LinkButton href={`/camps/${report.campId}`}>To the camp</LinkButton>
             {report.attendance ? (
               // A file of the API, not a page: the browser saves it.
-              <a
-                href={`/api/camps/${report.campId}/report/csv`}
-                className="text-blue-text underline underline-offset-2"
-              >
+              <a href={`/api/camps/${report.campId}/report/csv`} className={buttonLook({})}>
                 CSV
               </a>
             ) : null}

@@ -17,13 +17,13 @@ export function WeightPath({ weight, unit }: WeightPathProps) {
   const [first, last] = [points[0], points.at(-1)];
   if (!first || !last) return <p className="text-ink-2">No weight was given in this camp.</p>;
   const change = last.kg - first.kg;
-  const sign = change > 0 ? "+" : "";
+  const sign = change > 0 ? "+" : change < 0 ? "−" : "";
   return (
     <>
       <p>
         {massText(first.kg, unit)} on {dayText(dayFromIso(first.date))} to {massText(last.kg, unit)} on{" "}
         {dayText(dayFromIso(last.date))} ({sign}
-        {massText(change, unit)}
+        {massText(Math.abs(change), unit)}
         {limitKg === null ? "" : `; the limit was ${massText(limitKg, unit)}`}).
       </p>
       <details className="mt-3">

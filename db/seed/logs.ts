@@ -18,12 +18,14 @@ import {
   requests,
   sessionLogs,
   sessions,
+  testTrials,
   weights,
 } from "../schema";
 import { bestRows, checkInRows, weightRows } from "./answers";
 import { between, chance } from "./chance";
 import { doneSets } from "./done-sets";
 import { STORIES, type AthleteStory } from "./log-scenario";
+import { trialRows } from "./trials";
 
 type CampRow = typeof camps.$inferSelect;
 type SessionRow = typeof sessions.$inferSelect;
@@ -141,6 +143,8 @@ async function seedCamp(
   await inPieces(sets, (piece) => tx.insert(loggedSets).values(piece));
   const found = weightRows(athlete.name, story, { teamId, athleteId: athlete.id }, camp, today);
   await inPieces(found, (piece) => tx.insert(weights).values(piece));
+  const trials = trialRows(athlete.name, story, { teamId, athleteId: athlete.id }, camp, today);
+  await inPieces(trials, (piece) => tx.insert(testTrials).values(piece));
   const asked = all.find((row) => row.title === story.cannot?.title && row.startsAt > now);
   if (asked && story.cannot)
     await tx.insert(requests).values({
