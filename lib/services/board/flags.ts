@@ -1,13 +1,4 @@
-import {
-  againstNormal,
-  dayFromIso,
-  minuteFromHhmm,
-  suggestions,
-  weightRemark,
-  type ResponseInput,
-  type Suggestion,
-  type WeightRemark,
-} from "@/lib/engine";
+import { dayFromIso, minuteFromHhmm, type Suggestion } from "@/lib/engine";
 import type { Day } from "@/lib/engine/types";
 import { dayText, momentText } from "@/lib/format/civil";
 import { massNumber, type MassUnit } from "@/lib/format/load";
@@ -60,34 +51,33 @@ function missedFlag(answers: CampAnswers): BoardFlag[] {
     : [{ kind: "missed", text: `${times(missed, "session", "sessions")} missed in ${days} days` }];
 }
 
+const valueOf = ({ numbers }: Suggestion, label: string): number | null =>
+  numbers.find((number) => number.label === label)?.value ?? null;
+const ofKind = (made: readonly Suggestion[], kind: Suggestion["kind"]): readonly Suggestion[] =>
+  made.filter((suggestion) => suggestion.kind === kind);
+
 /** The newest check-in, of today or yesterday, beyond the athlete's own normal. */
-function checkInFlag({ checkIns, today, rules }: CampAnswers): BoardFlag[] {
-  const newest = checkIns
-    .filter(({ day }) => day === today || day === today - 1)
-    .sort((a, b) => b.day - a.day)[0];
-  const held = newest && againstNormal(newest, checkIns, rules);
-  if (!held?.beyond) return [];
-  const own = `${held.mean.toFixed(1)} ± ${held.sd.toFixed(1)} (SD of ${held.days} days)`;
-  return [{ kind: "check-in", text: `Check-in ${held.sum} of 28, own normal ${own}` }];
-}
+const checkInFlag = (made: readonly Suggestion[]): BoardFlag[] =>
+  ofKind(made, "check-in").map(({ numbers }) => {
+    const [sum = 0, mean = 0, sd = 0, days = 0] = numbers.map(({ value }) => value);
+    const own = `${mean.toFixed(1)} ± ${sd.toFixed(1)} (SD of ${days} days)`;
+    return { kind: "check-in", text: `Check-in ${sum} of 28, own normal ${own}` };
+  });
 
 /** "64.2 kg, 1.3 kg above the line". */
-function weightWords({ kind, numbers, text }: WeightRemark, unit: MassUnit): string {
-  const valueOf = (label: string): number => numbers.find((number) => number.label === label)?.value ?? 0;
-  const mass = (label: string): string => `${massNumber(valueOf(label), unit)} ${unit}`;
-  if (kind === "behind") return `${mass("Weight")}, ${mass("Above the line by")} above the line`;
-  if (kind === "above-ceiling")
-    return `${mass("Weight")}, above ${mass("Ceiling")}, the ceiling at ${valueOf("Before the weigh-in")} h before the weigh-in`;
-  return text.replace(/\.$/, "");
+function weightWords(made: Suggestion, unit: MassUnit): string {
+  const mass = (kg: number): string => `${massNumber(kg, unit)} ${unit}`;
+  const kg = mass(valueOf(made, "Weight") ?? 0);
+  const [above, ceiling] = [valueOf(made, "Above the line by"), valueOf(made, "Ceiling")];
+  if (above !== null) return `${kg}, ${mass(above)} above the line`;
+  if (ceiling !== null)
+    return `${kg}, above ${mass(ceiling)}, the ceiling at ${valueOf(made, "Before the weigh-in") ?? 0} h before the weigh-in`;
+  const rate = (valueOf(made, "Rate a week") ?? 0).toFixed(1);
+  return `Weight down ${rate} % a week over ${valueOf(made, "Over") ?? 0} days`;
 }
 
-function weightFlags({ weight, today, rules }: ResponseInput, unit: MassUnit): BoardFlag[] {
-  const state = weight && weightRemark({ ...weight, today, rules });
-  if (!state || state.off !== null) return [];
-  return state.remarks
-    .filter(({ kind }) => kind !== "on-line")
-    .map((remark) => ({ kind: "weight", text: weightWords(remark, unit) }));
-}
+const weightFlags = (made: readonly Suggestion[], unit: MassUnit): BoardFlag[] =>
+  ofKind(made, "weight").map((one) => ({ kind: "weight", text: weightWords(one, unit) }));
 
 /** The camp week that is under way. Null before the camp begins. */
 export function loadOf({ camp, sessions, today }: CampAnswers): BoardRow["load"] {
@@ -105,10 +95,9 @@ export function loadOf({ camp, sessions, today }: CampAnswers): BoardRow["load"]
 }
 
 function loadFlags(load: BoardRow["load"], made: readonly Suggestion[]): BoardFlag[] {
-  const beyond = made.flatMap(({ kind, title, numbers }): BoardFlag[] => {
-    if (kind !== "week-load") return [];
+  const beyond = ofKind(made, "week-load").map(({ title, numbers }): BoardFlag => {
     const [total, cap] = numbers;
-    return [{ kind: "load", text: `${title}: ${au(total?.value ?? 0)} of ${au(cap?.value ?? 0)} AU` }];
+    return { kind: "load", text: `${title}: ${au(total?.value ?? 0)} of ${au(cap?.value ?? 0)} AU` };
   });
   if (!load || load.due === 0 || Math.abs(load.done / load.due - 1) < LOAD_OFF) return beyond;
   const off = Math.round((load.done / load.due - 1) * 100);
@@ -136,41 +125,50 @@ const requestFlags = (requests: readonly WaitingRequest[]): BoardFlag[] =>
     text: `Asks to be let off ${title}, ${momentText({ day: dayFromIso(date), start: minuteFromHhmm(start) })}`,
   }));
 
-/** What the engine suggests for a camp and nobody has decided on. */
-export function openSuggestions(
+/** What of the engine's suggestions nobody has decided on. */
+export function undecided(
+  made: readonly Suggestion[],
   { responses }: Pick<CampAnswers["camp"], "responses">,
-  input: ResponseInput,
   decided: ReadonlySet<string>,
 ): readonly Suggestion[] {
   // A response in force under the same key was accepted, also where it was saved without a decision.
   const inForce = new Set(responses.map(({ id }) => id));
-  return suggestions(input).filter(({ key }) => !decided.has(key) && !inForce.has(key));
+  return made.filter(({ key }) => !decided.has(key) && !inForce.has(key));
 }
 
-export interface FlagFacts {
+interface FlagFacts {
   readonly answers: CampAnswers;
-  readonly input: ResponseInput;
+  /** What the engine makes of the answers that the reader may see, decided on or not. */
+  readonly made: readonly Suggestion[];
   readonly hold: StandingHold | null;
   readonly requests: readonly WaitingRequest[];
   readonly load: BoardRow["load"];
-  /** What waits for a decision; null for those who may not decide. */
-  readonly open: readonly Suggestion[] | null;
+  /** How many of them wait for a decision; 0 for those who may not decide. */
+  readonly waiting: number;
   /** Whether the reader may read logs; pain, check-ins and weights are not in the answers where they may not be read. */
   readonly logs: boolean;
   readonly unit: MassUnit;
 }
 
 /** Flags of one row in the order of `FLAG_KINDS`. */
-export function flagsOf({ answers, input, hold, requests, load, open, logs, unit }: FlagFacts): BoardFlag[] {
-  const waiting = open?.length ?? 0;
+export function flagsOf({
+  answers,
+  made,
+  hold,
+  requests,
+  load,
+  waiting,
+  logs,
+  unit,
+}: FlagFacts): BoardFlag[] {
   return [
     ...holdFlag(hold),
     ...painFlags(answers),
     ...requestFlags(requests),
-    ...weightFlags(input, unit),
-    ...checkInFlag(answers),
+    ...weightFlags(made, unit),
+    ...checkInFlag(made),
     ...(logs ? missedFlag(answers) : []),
-    ...(logs ? loadFlags(load, open ?? []) : []),
+    ...(logs ? loadFlags(load, made) : []),
     ...planFlags(answers),
     ...(waiting > 0
       ? [{ kind: "suggestions" as const, text: times(waiting, "suggestion", "suggestions") }]
@@ -183,7 +181,7 @@ export const holdOn = (holds: readonly StandingHold[], date: string): StandingHo
   holds.find(({ from, to }) => from <= date && (to === null || to >= date)) ?? null;
 
 /** Three days back, today, ten days ahead. */
-export const BOARD_SPAN = { back: 3, ahead: 10 } as const;
+const BOARD_SPAN = { back: 3, ahead: 10 } as const;
 
 export const boardDaysOf = (today: Day): Day[] =>
   Array.from(

@@ -8,7 +8,7 @@ import {
   type BoardRequestRow,
 } from "@/db/queries/board";
 import { instantOf } from "@/lib/calendar/zones";
-import { DAY_MINUTES, dayFromIso, daysOutOf, isoFromDay } from "@/lib/engine";
+import { DAY_MINUTES, dayFromIso, daysOutOf, isoFromDay, suggestions } from "@/lib/engine";
 import type { Day, Instant } from "@/lib/engine/types";
 import { AppError, notFound } from "@/lib/errors";
 import { can } from "@/lib/policy";
@@ -21,7 +21,7 @@ import {
   type CampAnswers,
 } from "@/lib/services/suggestions/answers";
 import { isWork, responseInputOf } from "@/lib/services/suggestions/response-input";
-import { boardDaysOf, flagsOf, holdOn, loadOf, openSuggestions, type StandingHold } from "./flags";
+import { boardDaysOf, flagsOf, holdOn, loadOf, undecided, type StandingHold } from "./flags";
 import { waitingRequest } from "./waiting-request";
 
 const FIGHT_WEEK_DAYS = 7;
@@ -106,7 +106,7 @@ function rowOf(answers: CampAnswers, around: Around): BoardRow {
   const requests = asked.filter(({ state }) => state === "asked").map(waitingRequest);
   const decided = new Set((around.decided.get(camp.id) ?? []).map(({ key }) => key));
   const load = logs ? loadOf(answers) : null;
-  const input = responseInputOf(answers, around.now);
+  const made = suggestions(responseInputOf(answers, around.now));
   return {
     campId: camp.id,
     athlete: { id: camp.athleteId, name: camp.athleteName },
@@ -121,11 +121,11 @@ function rowOf(answers: CampAnswers, around: Around): BoardRow {
     load,
     flags: flagsOf({
       answers,
-      input,
+      made,
       hold,
       requests: around.answersRequests ? requests : [],
       load,
-      open: around.decides ? openSuggestions(camp, input, decided) : null,
+      waiting: around.decides ? undecided(made, camp, decided).length : 0,
       logs,
       unit: around.unit,
     }),

@@ -107,7 +107,7 @@ function sessionsIn(row: BoardSessionsRow | undefined, sees: Sees): AnsweredSess
 }
 
 /** Today where the athlete is: at the gym, or at the venue after the travel. */
-export function campToday(camp: BoardCampRow, now: Date): Day {
+function campToday(camp: BoardCampRow, now: Date): Day {
   if (camp.boutZone === camp.homeZone) return civilNow(camp.homeZone, now).day;
   const { homeZone, weeks, boutDate, boutZone, weighInDate, weighInTime, lastTravel } = camp;
   const zone = zoneOf(

@@ -55,7 +55,7 @@ const logsOf = (sessions: readonly AnsweredSession[]): LoggedSession[] =>
   );
 
 /** The way down in weight: the line starts at the first weight from a week before the camp on. Null where none is followed. */
-export function weightFactsOf({ camp, weights, minor, rules }: CampAnswers): ResponseInput["weight"] {
+function weightFactsOf({ camp, weights, minor, rules }: CampAnswers): ResponseInput["weight"] {
   const { limitKg, weighInDate } = camp;
   if (limitKg === null || weighInDate === null) return null;
   const weighIn = dayFromIso(weighInDate);

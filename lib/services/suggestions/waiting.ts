@@ -3,12 +3,12 @@ import { listDecisions } from "@/db/queries/suggestions";
 import type { Tx } from "@/db/client";
 import { changeOfSuggestion, isPreview, previewChange } from "@/lib/book";
 import { instantOf } from "@/lib/calendar/zones";
-import { isoFromDay } from "@/lib/engine";
+import { isoFromDay, suggestions } from "@/lib/engine";
 import type { KnockOn, Suggestion } from "@/lib/engine";
 import { AppError, notFound } from "@/lib/errors";
 import { can } from "@/lib/policy";
 import type { DecisionView, SuggestionEffect, SuggestionView, WaitingView } from "@/lib/schemas/suggestion";
-import { openSuggestions } from "@/lib/services/board/flags";
+import { undecided } from "@/lib/services/board/flags";
 import { waitingRequest } from "@/lib/services/board/waiting-request";
 import { loadCamp, type LoadedCamp } from "@/lib/services/camps/load";
 import type { TeamContext } from "@/lib/services/context";
@@ -40,7 +40,7 @@ export async function suggestionsFor(tx: Tx, ctx: TeamContext, campId: string) {
   const answersOf = await readAnswers(tx, ctx, frame, scope, seesOf(ctx));
   const keys = new Set(decided.map(({ key }) => key));
   const now = instantOf(ctx.now);
-  const open = camp ? openSuggestions(camp, responseInputOf(answersOf(camp), now), keys) : [];
+  const open = camp ? undecided(suggestions(responseInputOf(answersOf(camp), now)), camp, keys) : [];
   return { frame, open };
 }
 
