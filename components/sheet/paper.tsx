@@ -70,9 +70,9 @@ export function Paper({ view }: { readonly view: SheetView }) {
       >
         <header className="flex items-end justify-between gap-[2em] border-b-2 border-[#000] pb-[0.6em]">
           <div className="min-w-0">
-            <h1 className="text-[1.9em] leading-[1.1] font-semibold [overflow-wrap:anywhere]">
+            <h2 className="text-[1.9em] leading-[1.1] font-semibold [overflow-wrap:anywhere]">
               {athlete.name}
-            </h1>
+            </h2>
             <p>
               {dayText(dayFromIso(week.from))} to {dayText(dayFromIso(week.to))}, {phase}
               {week.deload ? ", light week" : ""}, {daysOutLine(view)}

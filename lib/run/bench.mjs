@@ -4,6 +4,7 @@ import { spawn } from "node:child_process";
 import { existsSync, mkdirSync, rmSync } from "node:fs";
 import { psql, startCluster, stopCluster } from "../../db/server.mjs";
 import { freePort } from "../../db/server-ports.mjs";
+import { CHROMIUM, CHROMIUM_PACKAGES } from "./chromium.mjs";
 import { endRunning, killGroup, runMain } from "./command.mjs";
 import { installPackages } from "./debian.mjs";
 import { ensurePackages } from "./packages.mjs";
@@ -70,8 +71,7 @@ await runMain(async () => {
     checkNode();
     makeDataFolder();
     await ensurePackages();
-    if (!existsSync("/usr/bin/chromium"))
-      await installPackages(["chromium", "fonts-liberation"], "Chromium", say);
+    if (!existsSync(CHROMIUM)) await installPackages(CHROMIUM_PACKAGES, "Chromium", say);
     const { ensureBuild } = await import("./build.mjs");
     const { migrateOrExplain, seedDemo } = await import("./database.mjs");
     const { endChild, startCatcher, startServer } = await import("./stack.mjs");

@@ -1,6 +1,7 @@
 // `npm test`: from nothing to one line `N passed, N failed`. A step that fails hides none of those after it.
 import { existsSync } from "node:fs";
 import { startCluster, stopCluster } from "../../db/server.mjs";
+import { CHROMIUM, CHROMIUM_PACKAGES } from "./chromium.mjs";
 import { endRunning, run, runMain, SetupError } from "./command.mjs";
 import { installPackages } from "./debian.mjs";
 import { ensurePackages } from "./packages.mjs";
@@ -14,8 +15,7 @@ const TEST_CLUSTER = inData("test-pg");
 
 /** Chromium for the browser tests, a PDF reader for what it prints, and Python's iCalendar reader as a second opinion on the feed. */
 async function ensureDebianPackages() {
-  if (!existsSync("/usr/bin/chromium"))
-    await installPackages(["chromium", "fonts-liberation"], "Chromium", say);
+  if (!existsSync(CHROMIUM)) await installPackages(CHROMIUM_PACKAGES, "Chromium", say);
   if (!existsSync("/usr/bin/pdfinfo")) await installPackages(["poppler-utils"], "poppler-utils", say);
   const reader = await run("/usr/bin/python3", ["-c", "import icalendar"]);
   if (reader.code !== 0) await installPackages(["python3-icalendar"], "python3-icalendar", say);

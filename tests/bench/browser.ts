@@ -1,18 +1,9 @@
 import { chromium, type Browser, type Page } from "@playwright/test";
+import { CHROMIUM, CHROMIUM_FLAGS } from "@/lib/run/chromium.mjs";
 import demo from "../../db/seed/accounts.json";
 
-const ARGS = [
-  ...(process.getuid?.() === 0 ? ["--no-sandbox"] : []),
-  "--disable-gpu",
-  "--no-first-run",
-  "--disable-background-networking",
-  "--disable-component-update",
-  "--disable-sync",
-  "--disable-dev-shm-usage",
-];
-
 export const openBrowser = (): Promise<Browser> =>
-  chromium.launch({ executablePath: "/usr/bin/chromium", args: ARGS });
+  chromium.launch({ executablePath: CHROMIUM, args: CHROMIUM_FLAGS });
 
 /** Signs a demo account in; the page then holds its session. */
 export async function signIn(page: Page, url: string, role: string): Promise<void> {

@@ -58,7 +58,7 @@ export function BestsSection({ athleteId, initial, today }: BestsSectionProps) {
       {data.bests.length === 0 ? (
         <p className="text-ink-2">None yet: sessions say repetitions in reserve until there is one.</p>
       ) : (
-        <Table caption="Bests">
+        <Table caption="Bests by lift">
           <thead>
             <tr>
               <HeadCell>Lift</HeadCell>

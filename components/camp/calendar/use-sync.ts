@@ -31,8 +31,8 @@ export function useSync({ root, calendar, entries, hand }: Sync): void {
       const next = entries.find((entry) => entry.movable)?.sessionId ?? null;
       const settle = (): void => {
         setTabStop(area, focused, next);
-        // Only a focus that was lost with its chip: one that has gone on to the rail stays there.
-        if (focused && document.activeElement === document.body) focusSession(area, focused);
+        // Lost with its chip, the focus is on something around the calendar; one that has gone on to the rail stays there.
+        if (focused && (document.activeElement?.contains(area) ?? true)) focusSession(area, focused);
       };
       settle();
       // Chips that were drawn again in quick succession appear a moment later.
