@@ -59,7 +59,13 @@ export function Paper({ view }: { readonly view: SheetView }) {
   );
   const phase = PHASE_LOOKS[week.phase].label;
   return (
-    <div className="overflow-x-auto bg-[#fff] p-[10mm] print:overflow-visible print:p-0">
+    // On a phone the page is wider than the window: it scrolls, also by keyboard.
+    <div
+      role="region"
+      aria-label="The page as it is printed"
+      tabIndex={0}
+      className="overflow-x-auto bg-[#fff] p-[10mm] print:overflow-visible print:p-0"
+    >
       <style>{PRINT}</style>
       {/* 5 mm less than the page: a rounded pixel must not open a second one. */}
       <article

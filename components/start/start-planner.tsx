@@ -10,7 +10,7 @@ import type { Instant } from "@/lib/engine/types";
 import { writeStartParams, type StartParams } from "@/lib/schemas/start-params";
 import { StartForm } from "./start-form";
 import { StartRemarks } from "./start-remarks";
-import { useAddress } from "./use-address";
+import { useAddress } from "@/components/ui/use-address";
 import { useStartPlan, type StartCamp, type StartProblems } from "./use-start-plan";
 import { useBrowserZone } from "./use-zone";
 

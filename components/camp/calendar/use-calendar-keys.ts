@@ -1,6 +1,6 @@
 "use client";
 
-import { useCallback, type KeyboardEvent, type RefObject } from "react";
+import { useCallback, useEffect, type KeyboardEvent, type RefObject } from "react";
 import type { Desk } from "../use-desk";
 import type { CalendarEntry } from "./entry";
 import type { EntryStore } from "./entry-store";
@@ -28,6 +28,10 @@ interface Keys {
   readonly onDropped: () => void;
 }
 
+type Pressed = Pick<KeyboardEvent, "key" | "ctrlKey" | "metaKey" | "altKey" | "preventDefault">;
+
+const hasModifier = ({ ctrlKey, metaKey, altKey }: Pressed): boolean => ctrlKey || metaKey || altKey;
+
 /** The session that an arrow leads to: the next in time, or the nearest one a week away. */
 function neighbour(store: EntryStore, id: string, key: string): CalendarEntry | undefined {
   const sessions = store.all().filter((entry) => !entry.state.ghost);
@@ -48,27 +52,43 @@ function neighbour(store: EntryStore, id: string, key: string): CalendarEntry | 
 
 /** Arrows lead from session to session; M or Space picks one up, arrows carry it, Enter drops it, Escape lets it go. */
 export function useCalendarKeys({ root, store, carry, dispatch, say, onDropped }: Keys) {
+  /** What a key does to the session that keys carry; false where they carry none. */
+  const carryBy = useCallback(
+    (event: Pressed): boolean => {
+      const held = carry.held();
+      if (held?.by !== "keys") return false;
+      const step = STEPS[event.key];
+      if (step) {
+        const to = shifted(held.at, ...step);
+        if (!carry.over(to)) say("It cannot stand there: that is past, or outside the camp.");
+      } else if (event.key === "Enter" || event.key === " " || event.key === "m") {
+        carry.drop();
+        onDropped();
+      } else if (event.key === "Escape") {
+        carry.letGo();
+        say("Back where it was.");
+      } else return true;
+      event.preventDefault();
+      return true;
+    },
+    [carry, say, onDropped],
+  );
+
+  useEffect(() => {
+    // A chip that is drawn again is without the focus for a moment: keys that are pressed then still move what is carried.
+    const meanwhile = (event: Pressed & Event): void => {
+      const around = event.target instanceof Node && root.current && event.target.contains(root.current);
+      if (around && !hasModifier(event)) carryBy(event);
+    };
+    document.addEventListener("keydown", meanwhile);
+    return () => document.removeEventListener("keydown", meanwhile);
+  }, [root, carryBy]);
+
   return useCallback(
     (event: KeyboardEvent): void => {
       const id = sessionOf(event.target);
-      if (!id || event.ctrlKey || event.metaKey || event.altKey) return;
-      const held = carry.held();
-      const step = STEPS[event.key];
-
-      if (held?.by === "keys") {
-        if (step) {
-          const to = shifted(held.at, ...step);
-          if (!carry.over(to)) say("It cannot stand there: that is past, or outside the camp.");
-        } else if (event.key === "Enter" || event.key === " " || event.key === "m") {
-          carry.drop();
-          onDropped();
-        } else if (event.key === "Escape") {
-          carry.letGo();
-          say("Back where it was.");
-        } else return;
-        event.preventDefault();
-        return;
-      }
+      if (!id || hasModifier(event)) return;
+      if (carryBy(event)) return;
 
       if (event.key === "m" || event.key === " ") {
         const entry = store.read(id);
@@ -92,6 +112,6 @@ export function useCalendarKeys({ root, store, carry, dispatch, say, onDropped }
         event.preventDefault();
       }
     },
-    [root, store, carry, dispatch, say, onDropped],
+    [root, store, carry, dispatch, say, carryBy],
   );
 }
