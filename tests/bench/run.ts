@@ -41,8 +41,11 @@ const steps = {
   board: () => benchBoard(databaseUrl),
 };
 
+/** `npm run bench -- saving board` runs these alone and writes nothing. */
+const wanted = process.argv.slice(2);
 const results: Record<string, unknown> = {};
 for (const [name, work] of Object.entries(steps)) {
+  if (wanted.length > 0 && !wanted.includes(name)) continue;
   process.stdout.write(`${name} …\n`);
   results[name] = await work();
   process.stdout.write(`${JSON.stringify(results[name], null, 2)}\n`);
@@ -53,4 +56,4 @@ const report = {
   processor: `${cpus().length} x ${cpus()[0]?.model ?? "unknown"}`,
   ...results,
 };
-writeFileSync("tests/bench/latest.json", `${JSON.stringify(report, null, 2)}\n`);
+if (wanted.length === 0) writeFileSync("tests/bench/latest.json", `${JSON.stringify(report, null, 2)}\n`);

@@ -51,14 +51,17 @@ export async function commitPreview(
   const revision = camp.row.revision + 1;
   const { lifts, ...summary } = preview.plan;
   const touched = new Set(preview.knockOn.lifts.map((effect) => effect.id));
-  await writeEdit(tx, ctx.teamId, camp.row.id, preview.edit);
-  await updateCamp(tx, camp.row, { book: preview.book, summary, revision, now: ctx.now });
   const planned = sessionsOf(preview.book, preview.input, { ...preview.plan, lifts });
-  await writeSessions(
-    tx,
-    sessionWrites({ teamId: ctx.teamId, campId: camp.row.id }, camp.sessions, planned, ctx.now),
-  );
-  await insertRevision(tx, {
+  const scope = { teamId: ctx.teamId, campId: camp.row.id };
+  // None waits for another's answer: the driver sends them down the transaction's one connection in this order.
+  const writes = [
+    writeEdit(tx, ctx.teamId, camp.row.id, preview.edit),
+    updateCamp(tx, camp.row, { book: preview.book, summary, revision, now: ctx.now }),
+    writeSessions(tx, sessionWrites(scope, camp.sessions, planned, ctx.now)),
+    writeAudit(tx, ctx, "camp.change", camp.row.id, { revision, summary: commit.summary }),
+    notifyCampChanged(tx, camp.row.id, revision),
+  ];
+  const revised = insertRevision(tx, {
     teamId: ctx.teamId,
     campId: camp.row.id,
     number: revision,
@@ -73,9 +76,7 @@ export async function commitPreview(
     putBackOf: commit.putBackOf,
     createdAt: ctx.now,
   });
-  await writeAudit(tx, ctx, "camp.change", camp.row.id, { revision, summary: commit.summary });
-  const told = await tell(tx, ctx, camp, preview, revision);
-  await notifyCampChanged(tx, camp.row.id, revision);
+  const [told] = await Promise.all([tell(tx, ctx, camp, preview, revision), revised, ...writes]);
   return { revision, told };
 }
 

@@ -68,8 +68,14 @@ export async function saveChangeIn(
     idempotencyKey: body.idempotencyKey,
     putBackOf,
   });
-  const view = await viewOf(tx, ctx, await loadCamp(tx, ctx, camp.row.id));
-  return { revision, view, knockOn: preview.knockOn, told };
+  // What was written is at hand: reading it back would cost as much as planning it.
+  const written = {
+    ...camp,
+    row: { ...camp.row, revision, changedAt: ctx.now },
+    book: preview.book,
+    plan: preview.plan,
+  };
+  return { revision, view: await viewOf(tx, ctx, written), knockOn: preview.knockOn, told };
 }
 
 async function previewOf(

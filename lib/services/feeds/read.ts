@@ -68,7 +68,21 @@ export interface FeedReading {
 export async function readFeed(db: Database, token: string, now: Date): Promise<FeedReading> {
   const feed = await openFeed(db, token, now);
   if (feed.unnoted) await markFeedRead(db, feed.teamId, feed.id, now);
-  return { etag: tagOf(feed, windowAt(now).day), build: () => build(db, token, now) };
+  const etag = tagOf(feed, windowAt(now).day);
+  const body = bodies.get(etag);
+  return { etag, build: async () => (body === undefined ? build(db, token, now) : { etag, body }) };
+}
+
+/** Bodies by their tag: the same tag is the same bytes, and one phone asks for what another of the team has just got. */
+const bodies = new Map<string, string>();
+/** A body is some tens of kB. */
+const MOST_BODIES = 200;
+
+function kept(etag: string, body: string): string {
+  const oldest = bodies.keys().next();
+  if (bodies.size >= MOST_BODIES && !oldest.done) bodies.delete(oldest.value);
+  bodies.set(etag, body);
+  return body;
 }
 
 /** How often a calendar is written anew because something was saved meanwhile. */
@@ -85,7 +99,8 @@ async function build(db: Database, token: string, now: Date): Promise<{ etag: st
     const rows = await listFeedSessions(db, feed.teamId, feed, window);
     const etag = tagOf(feed, window.day);
     const after = await openFeed(db, token, now);
-    if (tried === TRIES || tagOf(after, window.day) === etag) return { etag, body: bodyOf(feed, rows) };
+    if (tagOf(after, window.day) === etag) return { etag, body: kept(etag, bodyOf(feed, rows)) };
+    if (tried === TRIES) return { etag, body: bodyOf(feed, rows) };
     feed = after;
   }
 }

@@ -13,7 +13,7 @@ export class Layer {
   readonly #chosen: number[] = [];
   readonly #lists = [this.key, this.memory, this.cost, this.starts, this.way, this.#chosen];
   /** Position + 1 by state, 0 for none. Memories are numbered anew in each layer, which keeps it small. */
-  #table = new Int32Array(0);
+  #table: Int32Array;
   readonly #localOf: number[] = [];
   #locals: number[] = [];
 
@@ -21,7 +21,10 @@ export class Layer {
   constructor(
     private readonly size: number,
     private readonly ways: Ways,
-  ) {}
+  ) {
+    // Room for the few memories that most camps need at once.
+    this.#table = new Int32Array(8 * size);
+  }
 
   /** A way to a state: kept where it is the first or the best. */
   offer(key: number, memory: number, cost: number, starts: number, way: number, chosen: number): void {
@@ -73,6 +76,7 @@ export class Layer {
   /** Without states that cost no less than one of the same key that forbids no more: however it goes on, that is better. */
   #dropBeaten(memories: Memories): void {
     const { key, memory, cost, starts } = this;
+    if (new Set(key).size === key.length) return;
     const order = key.map((_, at) => at);
     order.sort(
       (a, b) =>

@@ -72,13 +72,18 @@ export function timelineOf({ candidates, weekly }: PlacementProblem): Timeline {
   for (const { freeDays } of weekly) for (const day of freeDays) see(day);
 
   const days = Math.max(0, last - first + 1);
-  const byDay: Map<number, number[]>[] = Array.from({ length: days }, () => new Map());
+  // A day has a handful of items: looking through them is quicker than a map.
+  const byDay: { readonly item: number; readonly members: number[] }[][] = Array.from(
+    { length: days },
+    () => [],
+  );
   candidates.forEach(({ day, item }, index) => {
-    const groups = byDay[day - first];
-    const members = groups?.get(item);
-    if (members) members.push(index);
-    else groups?.set(item, [index]);
+    const groups = byDay[day - first] ?? [];
+    let known = groups[0];
+    for (let n = 1; known && known.item !== item; n++) known = groups[n];
+    if (known) known.members.push(index);
+    else groups.push({ item, members: [index] });
   });
-  const groups = byDay.map((day) => [...day].map(([item, members]) => groupOf(item, members, starts, ends)));
+  const groups = byDay.map((day) => day.map(({ item, members }) => groupOf(item, members, starts, ends)));
   return { first: first as Day, days, groups, starts, ends, origin };
 }
