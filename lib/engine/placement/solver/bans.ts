@@ -23,6 +23,8 @@ export function joined(one: readonly Ban[], other: readonly Ban[]): readonly Ban
   return [...left, ...right];
 }
 
+const keyOf = ({ heavyOnly, until, from }: Ban): string => `${heavyOnly ? "h" : "a"}${until},${from}`;
+
 /** Two numbers of memories as one: there are far fewer than 2^26 of them. */
 const pairOf = (memory: number, other: number): number => memory * 2 ** 26 + other;
 
@@ -35,10 +37,9 @@ export class Memories {
 
   idOf(bans: readonly Ban[]): number {
     if (bans.length === 0) return 0;
-    const key = bans
-      .map(({ heavyOnly, until, from }) => `${heavyOnly ? "h" : "a"}${until},${from}`)
-      .sort()
-      .join(";");
+    const [first] = bans;
+    // Mostly there is one, and a list of one needs no sorting.
+    const key = first && bans.length === 1 ? keyOf(first) : bans.map(keyOf).sort().join(";");
     const known = this.#ids.get(key);
     if (known !== undefined) return known;
     this.#ids.set(key, this.#bans.length);
