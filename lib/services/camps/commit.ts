@@ -47,12 +47,13 @@ export async function commitPreview(
   camp: LoadedCamp,
   preview: Preview,
   commit: Commit,
-): Promise<{ revision: number; told: number }> {
+): Promise<{ revision: number; told: number; others: Others }> {
   const revision = camp.row.revision + 1;
   const { lifts, ...summary } = preview.plan;
   const touched = new Set(preview.knockOn.lifts.map((effect) => effect.id));
   const planned = sessionsOf(preview.book, preview.input, { ...preview.plan, lifts });
   const scope = { teamId: ctx.teamId, campId: camp.row.id };
+  const others = await othersOf(tx, ctx, camp.athlete.id);
   // None waits for another's answer: the driver sends them down the transaction's one connection in this order.
   const writes = [
     writeEdit(tx, ctx.teamId, camp.row.id, preview.edit),
@@ -76,9 +77,11 @@ export async function commitPreview(
     putBackOf: commit.putBackOf,
     createdAt: ctx.now,
   });
-  const [told] = await Promise.all([tell(tx, ctx, camp, preview, revision), revised, ...writes]);
-  return { revision, told };
+  const [told] = await Promise.all([tell(tx, ctx, camp, preview, revision, others), revised, ...writes]);
+  return { revision, told, others };
 }
+
+type Others = Awaited<ReturnType<typeof othersOf>>;
 
 async function tell(
   tx: Tx,
@@ -86,8 +89,8 @@ async function tell(
   camp: LoadedCamp,
   preview: Preview,
   revision: number,
+  others: Others,
 ): Promise<number> {
-  const others = await othersOf(tx, ctx, camp.athlete.id);
   const userIds = others.filter(({ role }) => concerns(role, preview)).map(({ userId }) => userId);
   if (userIds.length > 0) {
     const urgent = isUrgent(preview, instantOf(ctx.now));

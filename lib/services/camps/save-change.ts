@@ -62,7 +62,7 @@ export async function saveChangeIn(
   if (isDeepStrictEqual(preview.book, camp.book)) {
     return { revision: camp.row.revision, view: await viewOf(tx, ctx, camp), knockOn: NOTHING, told: 0 };
   }
-  const { revision, told } = await commitPreview(tx, ctx, camp, preview, {
+  const { revision, told, others } = await commitPreview(tx, ctx, camp, preview, {
     change: body.change,
     summary: changeWords(body.change, camp, preview.knockOn),
     idempotencyKey: body.idempotencyKey,
@@ -75,7 +75,7 @@ export async function saveChangeIn(
     book: preview.book,
     plan: preview.plan,
   };
-  return { revision, view: await viewOf(tx, ctx, written), knockOn: preview.knockOn, told };
+  return { revision, view: await viewOf(tx, ctx, written, others), knockOn: preview.knockOn, told };
 }
 
 async function previewOf(

@@ -77,10 +77,16 @@ function bookFor({ member }: TeamContext, { book, athlete }: LoadedCamp): CampBo
   return can(member, "checkins.read", athlete.id) ? book : withoutReasons(book);
 }
 
-export async function viewOf(tx: Tx, ctx: TeamContext, camp: LoadedCamp): Promise<CampView> {
+/** `known`: the others, where the caller has asked for them already. */
+export async function viewOf(
+  tx: Tx,
+  ctx: TeamContext,
+  camp: LoadedCamp,
+  known?: Awaited<ReturnType<typeof othersOf>>,
+): Promise<CampView> {
   const { athlete, row } = camp;
   const detail = can(ctx.member, "lifts.detail", athlete.id);
-  const others = await othersOf(tx, ctx, athlete.id);
+  const others = known ?? (await othersOf(tx, ctx, athlete.id));
   const now = instantOf(ctx.now);
   const input = planInputOf(camp.book, now);
   const sport = input.sport.filter(
