@@ -1,7 +1,8 @@
-import Link from "next/link";
 import { Bars, ChevronDown } from "@/components/ui/icons";
+import { PageLink } from "@/components/ui/page-link";
 import type { NavItem } from "./nav";
 import { NavLinks } from "./nav-links";
+import { NavPageLinks } from "./nav-page-links";
 import { SignOutButton } from "./sign-out-button";
 import { Wordmark } from "./wordmark";
 
@@ -11,12 +12,15 @@ export interface TopBarProps {
   readonly person: string;
   /** "head coach" */
   readonly role: string;
+  /** Links load their page whole: for the phone in a basement, where the router could not fetch parts of one. */
+  readonly whole?: boolean;
 }
 
 // Menus are the browser's own popovers: they close on Escape and outside presses and give focus back without script.
 const MENU = "bg-bar text-bar-text on-bar border-bar-line absolute inset-auto top-[52px] m-0 border";
 
-function AccountMenu({ team, person, role }: Omit<TopBarProps, "nav">) {
+function AccountMenu({ team, person, role, whole }: Omit<TopBarProps, "nav">) {
+  const Links = whole ? NavPageLinks : NavLinks;
   return (
     <div id="account-menu" popover="auto" className={`${MENU} right-4 w-64 rounded-b py-2 md:right-7`}>
       <p className="px-6 py-2 text-sm">
@@ -25,14 +29,15 @@ function AccountMenu({ team, person, role }: Omit<TopBarProps, "nav">) {
           {role}, {team}
         </span>
       </p>
-      <NavLinks place="menu" items={[{ href: "/settings", label: "Settings" }]} />
+      <Links place="menu" items={[{ href: "/settings", label: "Settings" }]} />
       <SignOutButton className="w-full justify-start! px-6! text-bar-quiet! hover:bg-bar-line! hover:text-bar-text!" />
     </div>
   );
 }
 
 /** The dark bar over every page of a team. */
-export function TopBar({ nav, team, person, role }: TopBarProps) {
+export function TopBar({ nav, team, person, role, whole = false }: TopBarProps) {
+  const Links = whole ? NavPageLinks : NavLinks;
   return (
     <header className="on-bar bg-bar text-bar-text print:hidden">
       <div className="mx-auto flex h-[52px] max-w-page items-center gap-4 px-4 md:gap-7 md:px-7">
@@ -44,15 +49,15 @@ export function TopBar({ nav, team, person, role }: TopBarProps) {
         >
           <Bars />
         </button>
-        <Link
+        <PageLink
           href={nav[0]?.href ?? "/settings"}
           aria-label="Bellward, first page"
           className="flex min-h-11 items-center rounded"
         >
           <Wordmark onBar />
-        </Link>
+        </PageLink>
         <nav aria-label="Main" className="hidden gap-5 text-sm lg:flex">
-          <NavLinks items={nav} place="bar" />
+          <Links items={nav} place="bar" />
         </nav>
         <button
           type="button"
@@ -72,9 +77,9 @@ export function TopBar({ nav, team, person, role }: TopBarProps) {
         aria-label="Main, menu"
         className={`${MENU} inset-x-0 w-full border-x-0 py-2`}
       >
-        <NavLinks items={nav} place="menu" />
+        <Links items={nav} place="menu" />
       </nav>
-      <AccountMenu team={team} person={person} role={role} />
+      <AccountMenu team={team} person={person} role={role} whole={whole} />
     </header>
   );
 }

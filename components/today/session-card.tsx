@@ -1,8 +1,8 @@
 "use client";
 
-import Link from "next/link";
 import { useState } from "react";
 import { Button } from "@/components/ui/button";
+import { PageLink } from "@/components/ui/page-link";
 import { contentOf, type Queue } from "@/lib/offline/queue";
 import { EMPTY_LOG } from "@/lib/offline/overlay";
 import type { MassUnit } from "@/lib/format/load";
@@ -38,13 +38,12 @@ function leadOf({ start, minutes, source, sets, effort, place, kind }: DaySessio
 const LiftPart = ({ session, unit }: Pick<SessionCardProps, "session" | "unit">) => (
   <>
     <LiftLines session={session} unit={unit} />
-    <Link
-      prefetch={false}
+    <PageLink
       href={`/camps/${session.campId}/sessions/${encodeURIComponent(session.id)}`}
       className="inline-flex min-h-11 items-center text-sm font-semibold underline underline-offset-4"
     >
       Why this, and swaps
-    </Link>
+    </PageLink>
   </>
 );
 

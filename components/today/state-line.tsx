@@ -1,4 +1,5 @@
-import { LinkButton } from "@/components/ui/link-button";
+import { buttonLook } from "@/components/ui/button-look";
+import { PageLink } from "@/components/ui/page-link";
 import { countOf, type Queue } from "@/lib/offline/queue";
 
 interface StateLineProps {
@@ -34,9 +35,9 @@ export function StateLine(props: StateLineProps) {
       {props.signedOut ? (
         <div className="mt-1.5 flex items-center justify-between gap-3 pb-1">
           <p>Your session has ended. Sign in again; nothing is lost.</p>
-          <LinkButton href="/sign-in?next=/today" prefetch={false} variant="primary">
+          <PageLink href="/sign-in?next=/today" className={buttonLook({ variant: "primary" })}>
             Sign in
-          </LinkButton>
+          </PageLink>
         </div>
       ) : null}
     </div>

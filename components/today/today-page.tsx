@@ -1,6 +1,6 @@
 "use client";
 
-import { useCallback, useEffect, useRef, useState, type TouchEvent } from "react";
+import { lazy, Suspense, type TouchEvent, useCallback, useEffect, useRef, useState } from "react";
 import { Notice } from "@/components/ui/notice";
 import { dayFromIso } from "@/lib/engine/geometry";
 import { dayText } from "@/lib/format/civil";
@@ -12,11 +12,13 @@ import { RestTimer } from "./rest-timer";
 import { SessionCard } from "./session-card";
 import { StateLine } from "./state-line";
 import { Strip } from "./strip";
-import { StuckPanel } from "./stuck-panel";
 import { swipeOf, type Point } from "./swipe";
 import { useActs } from "./use-acts";
 import { useToday } from "./use-today";
 import { WeightCard } from "./weight";
+
+// Fetched when the server has refused something, which takes a net: most days never need it.
+const StuckPanel = lazy(async () => ({ default: (await import("./stuck-panel")).StuckPanel }));
 
 interface TodayPageProps {
   /** What the server rendered. */
@@ -106,7 +108,11 @@ export function TodayPage({ initial, userId }: TodayPageProps) {
         opens={opens}
         durable={store.isDurable()}
       />
-      <StuckPanel queue={queue} unit={unit} acts={acts} />
+      {queue.some(({ stuck }) => stuck !== null) ? (
+        <Suspense>
+          <StuckPanel queue={queue} unit={unit} acts={acts} />
+        </Suspense>
+      ) : null}
       <div {...swipe} className="min-h-[40dvh]" key={day.date}>
         <h2 className="border-b border-line bg-paper px-4.5 pt-3 pb-2 text-sm font-semibold text-ink-2">
           {dayTitle(day.date, today)}

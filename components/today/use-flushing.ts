@@ -1,6 +1,5 @@
 "use client";
 
-import { useQueryClient } from "@tanstack/react-query";
 import { useCallback, useEffect, useState } from "react";
 import { keepView } from "@/lib/offline/device";
 import type { Entry } from "@/lib/offline/entry";
@@ -8,7 +7,8 @@ import { flush, type Round } from "@/lib/offline/flush";
 import { settled } from "@/lib/offline/overlay";
 import { contentOf, type Queue } from "@/lib/offline/queue";
 import type { QueueStore } from "@/lib/offline/queue-store";
-import { deliver, todayQuery } from "@/lib/query/today";
+import type { DayStore } from "@/lib/query/day-store";
+import { deliver } from "@/lib/query/today";
 
 /** How often is tried while something waits, milliseconds. */
 const RETRY_MS = 20_000;
@@ -22,22 +22,22 @@ async function alone(name: string, work: () => Promise<Round>): Promise<Round | 
 }
 
 /** Sends what waits whenever there is reason to hope; gives back how the last round ended. */
-export function useFlushing(store: QueueStore, queue: Queue): Round | null {
-  const client = useQueryClient();
+export function useFlushing(store: QueueStore, queue: Queue, day: DayStore): Round | null {
   const [round, setRound] = useState<Round | null>(null);
 
   const run = useCallback(async () => {
     // The browser is sure that there is no net: nothing is tried, so nothing is in doubt.
     if (!navigator.onLine) return;
     const { userId } = store;
-    const { queryKey } = todayQuery(userId);
     let any = false;
     const show = async (entry: Entry, version: number | null): Promise<void> => {
       any = true;
       // A read that began before this write must not undo it on the screen.
-      await client.cancelQueries({ queryKey });
-      const view = client.setQueryData(queryKey, (shown) => shown && settled(shown, entry, version));
-      if (view) await keepView(userId, view);
+      day.cancel();
+      await keepView(
+        userId,
+        day.set((shown) => settled(shown, entry, version)),
+      );
     };
     const result = await alone(`bellward-send:${userId}`, () =>
       flush(store, {
@@ -51,8 +51,8 @@ export function useFlushing(store: QueueStore, queue: Queue): Round | null {
       }),
     );
     if (result) setRound(result);
-    if (any) await client.invalidateQueries({ queryKey });
-  }, [client, store]);
+    if (any) await day.refresh();
+  }, [day, store]);
 
   // Each new write starts the gathering anew; marks on an entry do not.
   const waiting = queue.flatMap(({ key, stuck }) => (stuck === null ? [key] : [])).join();

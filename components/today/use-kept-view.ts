@@ -1,44 +1,55 @@
 "use client";
 
-import { useQuery, useQueryClient } from "@tanstack/react-query";
-import { useEffect, useState } from "react";
+import { useEffect, useState, useSyncExternalStore } from "react";
 import { claimDevice, keepView, keptView } from "@/lib/offline/device";
 import { openWithoutNet } from "@/lib/offline/register";
-import { ProblemError } from "@/lib/query/send";
-import { todayQuery } from "@/lib/query/today";
-import type { TodayView } from "@/lib/schemas/today";
+import type { DayStore } from "@/lib/query/day-store";
+
+/** A view that was made so long ago is asked for again when the page is looked at, milliseconds. */
+const STALE_MS = 5_000;
+
+/** Asks again when the page is looked at, or a net comes back. */
+function useRenewing(day: DayStore): void {
+  useEffect(() => {
+    const renew = (): void => {
+      const old = Date.now() - Date.parse(day.read().madeAt) > STALE_MS;
+      if (old && navigator.onLine && document.visibilityState === "visible") void day.refresh();
+    };
+    renew();
+    window.addEventListener("online", renew);
+    document.addEventListener("visibilitychange", renew);
+    return () => {
+      window.removeEventListener("online", renew);
+      document.removeEventListener("visibilitychange", renew);
+    };
+  }, [day]);
+}
 
 /**
  * What the server says, also without a net: the newer of the page's copy and this phone's, asked again when there is a net,
  * and kept. `opens`: the page itself opens without a net. `signedOut`: the session has ended.
  */
-export function useKeptView(initial: TodayView, userId: string) {
-  const client = useQueryClient();
-  const { data, error } = useQuery({
-    ...todayQuery(userId),
-    initialData: initial,
-    initialDataUpdatedAt: Date.parse(initial.madeAt),
-  });
+export function useKeptView(day: DayStore, userId: string) {
+  const data = useSyncExternalStore(day.subscribe, day.read, day.read);
+  const problem = useSyncExternalStore(day.subscribe, day.readProblem, day.readProblem);
   const [looked, setLooked] = useState(false);
   const [opens, setOpens] = useState(false);
+  useRenewing(day);
 
   useEffect(() => {
-    const { queryKey } = todayQuery(userId);
     void (async () => {
       await claimDevice(userId);
       const kept = await keptView(userId);
-      const shown = client.getQueryData(queryKey);
       // Of the same instant this phone's copy is the better one: what was sent since is in it.
-      if (kept && shown && kept.madeAt >= shown.madeAt)
-        client.setQueryData(queryKey, kept, { updatedAt: Date.parse(kept.madeAt) });
+      if (kept) day.set((shown) => (kept.madeAt >= shown.madeAt ? kept : shown));
       setLooked(true);
       setOpens(await openWithoutNet());
     })();
-  }, [client, userId]);
+  }, [day, userId]);
 
   useEffect(() => {
     if (looked) void keepView(userId, data);
   }, [looked, data, userId]);
 
-  return { data, opens, signedOut: error instanceof ProblemError && error.problem.status === 401 };
+  return { data, opens, signedOut: problem?.problem.status === 401 };
 }

@@ -2,6 +2,7 @@
 
 import { useEffect, useMemo, useState, useSyncExternalStore } from "react";
 import { overlay } from "@/lib/offline/overlay";
+import { createDayStore } from "@/lib/query/day-store";
 import { queueOf } from "@/lib/offline/queue-store";
 import type { TodayView } from "@/lib/schemas/today";
 import { presentDate } from "./days";
@@ -37,10 +38,11 @@ function usePresentDate(view: TodayView): string {
 
 /** The athlete's day: what the server said, what waits on this phone laid over it, and how the two stand. */
 export function useToday(initial: TodayView, userId: string) {
-  const { data, opens, signedOut } = useKeptView(initial, userId);
+  const [day] = useState(() => createDayStore(initial));
+  const { data, opens, signedOut } = useKeptView(day, userId);
   const store = useMemo(() => queueOf(userId), [userId]);
   const queue = useSyncExternalStore(store.subscribe, store.read, store.readEmpty);
-  const round = useFlushing(store, queue);
+  const round = useFlushing(store, queue, day);
   const net = useSyncExternalStore(
     subscribeNet,
     () => navigator.onLine,

@@ -1,9 +1,7 @@
-import { FROM_WORDS } from "@/lib/engine/prescription/wording";
 import { KG_PER_LB } from "@/lib/engine/prescription/plates";
 import type { Range } from "@/lib/engine/prescription/exercise";
-import type { Best, Line } from "@/lib/engine/prescription/types";
+import type { Line } from "@/lib/engine/prescription/types";
 import type { ShownLoad } from "@/lib/schemas/prescription";
-import { dayText } from "./civil";
 
 /** Loads, repetitions and rests as a reader sees them. Kilograms inside, the reader's unit outside. */
 
@@ -62,21 +60,6 @@ export function loadText(load: ShownLoad, unit: MassUnit): string {
     case "none":
       return load.kg === null ? "" : massText(load.kg, unit);
   }
-}
-
-/** What was lifted for a best. */
-export interface Lifted {
-  readonly kg: number;
-  readonly reps: number;
-}
-
-/** "125 kg, estimated by Epley from 110 kg × 4 on Tue 3 Nov", "125 kg, measured on Tue 3 Nov". */
-export function bestText(best: Best, lifted: Lifted | null, unit: MassUnit): string {
-  const mass = massText(best.kg, unit);
-  const on = `on ${dayText(best.day)}`;
-  if (best.from === "measured") return `${mass}, measured ${on}`;
-  const from = lifted ? ` from ${massText(lifted.kg, unit)} × ${lifted.reps}` : "";
-  return `${mass}, estimated by ${FROM_WORDS[best.from]}${from} ${on}`;
 }
 
 /** "45 s", "2 min", "1 min 30 s". */

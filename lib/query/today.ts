@@ -1,22 +1,9 @@
 "use client";
 
-import { queryOptions } from "@tanstack/react-query";
 import { wireOf, type Entry } from "@/lib/offline/entry";
 import type { Outcome } from "@/lib/offline/flush";
-import type { LogView, TodayView } from "@/lib/schemas/today";
+import type { LogView } from "@/lib/schemas/today";
 import { ProblemError, sendJson, type Problem } from "./send";
-
-/** The athlete's day. Without a net the service worker answers with what it kept, which may be older than what is shown. */
-export const todayQuery = (userId: string) =>
-  queryOptions({
-    queryKey: ["today", userId],
-    queryFn: async ({ client, queryKey }) => {
-      const given = await sendJson<TodayView>("/api/today");
-      const shown = client.getQueryData<TodayView>(queryKey);
-      // The same instant is the same answer, to which this page has added what it sent since.
-      return shown && shown.madeAt >= given.madeAt ? shown : given;
-    },
-  });
 
 /** A refusal that says nothing about the write itself: it is tried again later. */
 const passing = (status: number): boolean =>

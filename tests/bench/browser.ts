@@ -36,7 +36,8 @@ export async function firstLoadScript(browser: Browser, address: string, storage
     scripts.add(requestId);
     newest = Date.now();
   });
-  session.on("Network.loadingFinished", ({ requestId, encodedDataLength }) => {
+  // Of the body: what a finished request counts has its headers in it.
+  session.on("Network.dataReceived", ({ requestId, encodedDataLength }) => {
     if (!scripts.has(requestId)) return;
     bytes += encodedDataLength;
     newest = Date.now();

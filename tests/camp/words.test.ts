@@ -1,6 +1,7 @@
 import { describe, expect, it } from "vitest";
 import { boutLine, daysOutText } from "@/components/camp/bout-line";
-import { changeHeading, effectMove, respondText, saveText, toldText } from "@/components/camp/words";
+import { changeHeading, effectMove, saveText } from "@/components/camp/rail/words";
+import { respondText, toldText } from "@/components/camp/words";
 import { dayFromIso, minuteFromHhmm } from "@/lib/engine";
 import type { Day, LiftEffect } from "@/lib/engine/types";
 import { campBook } from "../factories/camp-book";

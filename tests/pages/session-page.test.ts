@@ -5,7 +5,6 @@ import { SMALLEST, fittingSize } from "@/components/sheet/fit";
 import { dayFromIso } from "@/lib/engine";
 import type { Kg } from "@/lib/engine/types";
 import {
-  bestText,
   fromKg,
   loadText,
   massText,
@@ -15,6 +14,7 @@ import {
   toKg,
   workText,
 } from "@/lib/format/load";
+import { bestText } from "@/lib/format/best";
 import type { LineView } from "@/lib/schemas/prescription";
 
 const LINE: LineView = {

@@ -2,7 +2,7 @@ import type { ReactNode } from "react";
 import { KindMark } from "@/components/session/kind-mark";
 import { ITEM_LOOKS, SPORT_LOOKS, weekTitle, type WorkLook } from "@/components/session/kinds";
 import type { KnockOn, LiftEffect, Reason, SportEffect } from "@/lib/engine/types";
-import { effectMove } from "../words";
+import { effectMove } from "./words";
 
 /** More sport sessions than these are folded: a change of a whole series moves the same session again and again. */
 const SPORT_SHOWN = 3;
