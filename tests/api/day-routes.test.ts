@@ -13,7 +13,7 @@ import type { Role } from "@/lib/policy";
 import type { LogView, RequestView, TodayView } from "@/lib/schemas/today";
 import { testDatabase } from "../setup/database";
 import { call, problemOf } from "./client";
-import { LOG } from "./routes";
+import { LOG } from "./bodies";
 import { sceneOf } from "./scene";
 
 const NOW = "2026-12-01T08:00:00Z";

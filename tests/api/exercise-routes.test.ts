@@ -15,7 +15,7 @@ import {
 } from "@/lib/schemas/exercise";
 import { testDatabase } from "../setup/database";
 import { call, problemOf } from "./client";
-import { EXERCISE_FORM } from "./routes";
+import { EXERCISE_FORM } from "./bodies";
 import { sceneOf } from "./scene";
 
 const NOW = "2026-12-01T08:00:00Z";

@@ -9,7 +9,7 @@ import { DELETE as dropSwap, POST as addSwap } from "@/app/api/camps/[id]/swaps/
 import type { BestView, BestsView, SessionPageView } from "@/lib/schemas/prescription";
 import { testDatabase } from "../setup/database";
 import { call, problemOf } from "./client";
-import { BEST } from "./routes";
+import { BEST } from "./bodies";
 import { sceneOf } from "./scene";
 
 const NOW = "2026-12-01T08:00:00Z";

@@ -18,7 +18,8 @@ import { addBest } from "@/lib/services/prescription/bests";
 import { campForm } from "../factories/camp-book";
 import { teamWithEveryRole } from "../factories/team";
 import { cookieOf } from "./client";
-import { BEST, EXERCISE_FORM, SESSION, TRIAL, type Scene } from "./routes";
+import { BEST, EXERCISE_FORM, SESSION, TRIAL } from "./bodies";
+import type { Scene } from "./routes";
 
 const only = <T>([row]: readonly T[]): T => {
   if (row === undefined) throw new Error("no row");

@@ -20,7 +20,7 @@ import type { PeopleView } from "@/lib/schemas/account";
 import type { AthleteView } from "@/lib/schemas/athlete";
 import { testDatabase } from "../setup/database";
 import { call, problemOf } from "./client";
-import { PROFILE, SESSION } from "./routes";
+import { PROFILE, SESSION } from "./bodies";
 import { sceneOf } from "./scene";
 
 const NOW = "2026-12-01T08:00:00Z";

@@ -11,7 +11,7 @@ import { DELETE as remove } from "@/app/api/tests/[id]/route";
 import { MOST_ROWS, type TestsView } from "@/lib/schemas/test-trial";
 import { testDatabase } from "../setup/database";
 import { call, problemOf } from "./client";
-import { TRIAL } from "./routes";
+import { TRIAL } from "./bodies";
 import { sceneOf } from "./scene";
 
 const NOW = "2026-12-01T08:00:00Z";
