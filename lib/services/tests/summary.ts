@@ -2,6 +2,7 @@ import {
   POWER_METHODS,
   REACTIVE_METHODS,
   TEST_KINDS,
+  TEST_SIDES,
   asymmetry,
   beyondOwnSpread,
   changeVerdict,
@@ -222,7 +223,10 @@ export function summarise(
       ),
     )
     .sort(
-      (a, b) => TEST_KINDS.indexOf(a.kind) - TEST_KINDS.indexOf(b.kind) || (a.at ?? 0) - (b.at ?? 0) || 0,
+      (a, b) =>
+        TEST_KINDS.indexOf(a.kind) - TEST_KINDS.indexOf(b.kind) ||
+        (a.at ?? 0) - (b.at ?? 0) ||
+        TEST_SIDES.indexOf(a.side) - TEST_SIDES.indexOf(b.side),
     );
   const differences = series.flatMap((left) => {
     if (left.side !== "left") return [];
