@@ -41,7 +41,9 @@ function useFit(view: SheetView) {
     fit();
     let gone = false;
     void document.fonts.ready.then(() => {
-      if (!gone) fit();
+      if (gone) return;
+      fit();
+      if (paper.current) paper.current.dataset.fitted = "";
     });
     return () => {
       gone = true;

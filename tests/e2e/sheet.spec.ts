@@ -13,7 +13,8 @@ const LONG_NOTE = "Stop the set when the bar slows, rack it, and walk a round of
 
 /** Prints as a person would and asks poppler, a PDF reader that is none of Chromium's, what came out. */
 async function printed(page: Page, info: TestInfo, name: string) {
-  await page.evaluate(() => document.fonts.ready);
+  // The page sets its type size once script and fonts are there.
+  await expect(page.locator("article[data-fitted]")).toBeVisible();
   const file = info.outputPath(`${name}.pdf`);
   writeFileSync(file, await page.pdf({ preferCSSPageSize: true, printBackground: true }));
   const facts = execFileSync("/usr/bin/pdfinfo", [file], { encoding: "utf8" });
