@@ -40,8 +40,9 @@ export function useKeptView(day: DayStore, userId: string) {
     void (async () => {
       await claimDevice(userId);
       const kept = await keptView(userId);
-      // Of the same instant this phone's copy is the better one: what was sent since is in it.
-      if (kept) day.set((shown) => (kept.madeAt >= shown.madeAt ? kept : shown));
+      // Of the same instant this phone's copy is the better one: what was sent since is in it. Without a net it always is: the worker
+      // may have fetched the page by itself a moment after, and before what was sent.
+      if (kept) day.set((shown) => (kept.madeAt >= shown.madeAt || !navigator.onLine ? kept : shown));
       setLooked(true);
       setOpens(await openWithoutNet());
     })();
