@@ -55,15 +55,17 @@ function close(name, tally, { code, timedOut }) {
 /**
  * @param {string} name as it is shown
  * @param {readonly string[]} paths
- * @param {{ zone?: string; timeoutMs: number }} options `zone`: TZ of the run
+ * @param {{ zone?: string; isolate?: boolean; timeoutMs: number }} options `zone`: TZ of the run; without `isolate` files share
+ * their modules, which pure code may
  * @returns {Promise<Tally>}
  */
-export async function runVitest(name, paths, { zone = "UTC", timeoutMs }) {
+export async function runVitest(name, paths, { zone = "UTC", isolate = true, timeoutMs }) {
   const { file, read } = report(`vitest-${name.replace(/\W+/g, "-")}`);
   const args = [
     "node_modules/vitest/vitest.mjs",
     "run",
     ...paths,
+    ...(isolate ? [] : ["--no-isolate"]),
     "--reporter=default",
     "--reporter=json",
     `--outputFile.json=${file}`,
