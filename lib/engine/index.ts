@@ -2,8 +2,7 @@
 export * from "./types";
 export * from "./geometry";
 export * from "./phases";
-export { ITEM_TITLES, itemSpec, type ItemSpec } from "./menu";
-export { sessionMinutes } from "./dose";
+export { ITEM_TITLES } from "./menu";
 export * from "./load";
 export * from "./measures";
 export * from "./weight";
@@ -11,6 +10,6 @@ export * from "./response";
 export { inputProblems, PlanInputError } from "./input";
 export { plan } from "./plan";
 export { knockOn } from "./changes/knock-on";
-export { DEFAULT_RULES, HOUSE_RULES, RULE_KEYS, withOverrides, type RuleGroup } from "./rules/house-rules";
+export { DEFAULT_RULES, HOUSE_RULES, RULE_KEYS, withOverrides } from "./rules/house-rules";
 export { PLACEMENT_RULES } from "./rules/placement-rules";
 export * from "./prescription";

@@ -5,7 +5,6 @@ import {
   flightOfHeight,
   heightOfFlight,
   leastRealChange,
-  pushOff,
   reactiveStrength,
   regressionPower,
   reliability,
@@ -52,31 +51,6 @@ describe("jump power by the published regressions (values worked out from the st
 
   it("a jump too low for the regression has no power, not a negative one", () => {
     expect(regressionPower("sayers-squat-jump", 5, 30)).toBeNull();
-  });
-});
-
-describe("push-off (Samozino et al. 2008, J Biomech 41:2940-2945, equations from memory)", () => {
-  it.each([
-    { massKg: 80, height: 0.4, distance: 0.4, force: 1569.6, speed: 1.40071, power: 2198.56, each: 27.482 },
-    {
-      massKg: 75,
-      height: 0.35,
-      distance: 0.38,
-      force: 1413.414,
-      speed: 1.310248,
-      power: 1851.924,
-      each: 24.692,
-    },
-  ])("$massKg kg, $height m over $distance m", ({ massKg, height, distance, force, speed, power, each }) => {
-    const made = pushOff({ massKg, height, distance });
-    expect(made?.force).toBeCloseTo(force, 3);
-    expect(made?.speed).toBeCloseTo(speed, 5);
-    expect(made?.power).toBeCloseTo(power, 2);
-    expect(made?.relativePower).toBeCloseTo(each, 3);
-  });
-
-  it("has no value without a push-off distance", () => {
-    expect(pushOff({ massKg: 80, height: 0.4, distance: 0 })).toBeNull();
   });
 });
 

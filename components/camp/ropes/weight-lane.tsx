@@ -3,7 +3,7 @@ import { Lane, Rope } from "./lane";
 
 const HEIGHT = 30;
 
-/** The weight limit of the bout; where no weight is known it stands alone. */
+/** The weight limit of the bout. Weights and the line to it stand on the athlete’s page, not here. */
 export function WeightLane({ book }: { readonly book: CampBook }) {
   const limit = book.bout.limitKg;
   return (
@@ -13,7 +13,7 @@ export function WeightLane({ book }: { readonly book: CampBook }) {
       height={HEIGHT}
       over={
         <span className="absolute top-1.5 left-2 text-2xs text-ink-2">
-          {limit === null ? "The bout has no limit." : "No weights yet."}
+          {limit === null ? "The bout has no limit." : "Weights against the line stand on the athlete’s page."}
         </span>
       }
     >

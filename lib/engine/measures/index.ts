@@ -2,6 +2,5 @@ export * from "./asymmetry";
 export * from "./change-verdict";
 export * from "./flight";
 export * from "./jump-power";
-export * from "./push-off";
 export * from "./reliability";
 export * from "./test-kinds";
