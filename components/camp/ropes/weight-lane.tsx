@@ -13,7 +13,9 @@ export function WeightLane({ book }: { readonly book: CampBook }) {
       height={HEIGHT}
       over={
         <span className="absolute top-1.5 left-2 text-2xs text-ink-2">
-          {limit === null ? "The bout has no limit." : "Weights against the line stand on the athlete’s page."}
+          {limit === null
+            ? "The bout has no limit."
+            : "Weights against the line stand on the athlete’s page."}
         </span>
       }
     >
