@@ -74,7 +74,7 @@ export function CampPage({ initial, now: serverNow, selected }: CampPageProps) {
       />
       {view.may.includes("suggestions.decide") ? <Waiting desk={desk} /> : null}
       <HoldNotice book={shown.book} today={today} />
-      <Ropes picture={shown} today={today} may={view.may} mark={mark} />
+      <Ropes picture={shown} today={today} weights={view.weights} may={view.may} mark={mark} />
       <div className="mt-4 grid items-start gap-4 lg:grid-cols-[minmax(0,1fr)_356px]">
         <CalendarArea
           desk={desk}

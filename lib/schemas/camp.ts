@@ -46,6 +46,8 @@ export interface CampView {
   readonly plan: Plan;
   /** The sport sessions of the camp, expanded. */
   readonly sport: readonly SportSession[];
+  /** Weights of the camp's days, oldest first; empty for a minor and for who may not see them. */
+  readonly weights: readonly { readonly date: string; readonly kg: number }[];
   readonly may: readonly Action[];
   /** Roles of the others whom a save may concern; `toldBy` picks those that it does. */
   readonly others: readonly Role[];

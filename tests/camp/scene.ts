@@ -22,6 +22,7 @@ export function campView(book: CampBook = campBook()): CampView {
     book,
     plan,
     sport: input.sport,
+    weights: [],
     may: ALL,
     others: ["athlete", "strength", "skills", "medic"],
   };

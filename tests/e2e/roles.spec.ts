@@ -150,10 +150,7 @@ const CONTROLS = {
   bout: (page: Page) => page.getByRole("button", { name: "Change the bout" }),
   add: (page: Page) => page.getByRole("button", { name: "Add a session", exact: true }),
   changes: (page: Page) => page.getByRole("link", { name: "Changes", exact: true }),
-  weight: (page: Page) =>
-    page
-      .getByRole("region", { name: "Ropes" })
-      .getByText("Weights against the line stand on the athlete’s page."),
+  weight: (page: Page) => page.getByRole("region", { name: "Ropes" }).getByText(/kg to 60\.0/),
   weeks: (page: Page) => page.getByText("The weeks in numbers"),
 } as const;
 type Control = keyof typeof CONTROLS;

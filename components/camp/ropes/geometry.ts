@@ -59,3 +59,16 @@ export function formPath({ form }: Plan, days: RopeDays, top: number, foot: numb
     ]),
   );
 }
+
+/** Weights between the heaviest at `top` and the limit at `foot`; below the limit stays at the foot. Null without two. */
+export function weightPath(
+  points: readonly (readonly [x: number, kg: number])[],
+  limitKg: number,
+  top: number,
+  foot: number,
+): string | null {
+  if (points.length < 2) return null;
+  const range = Math.max(...points.map(([, kg]) => kg)) - limitKg;
+  const share = (kg: number): number => (range <= 0 ? 0 : Math.max(0, kg - limitKg) / range);
+  return path(points.map(([x, kg]) => [x, foot - share(kg) * (foot - top)]));
+}

@@ -3,6 +3,7 @@
 import { memo } from "react";
 import type { Action } from "@/lib/policy";
 import type { Day } from "@/lib/engine/types";
+import type { CampView } from "@/lib/schemas/camp";
 import { campSpan } from "@/lib/book/camp-span";
 import type { DayMark } from "../day-mark";
 import type { Picture } from "../picture";
@@ -15,12 +16,13 @@ import { WeightLane } from "./weight-lane";
 interface RopesProps {
   readonly picture: Picture;
   readonly today: Day;
+  readonly weights: CampView["weights"];
   readonly may: readonly Action[];
   readonly mark: DayMark;
 }
 
 /** The camp side on, like ring ropes: sport load, lifting, weight; phases underneath, today across. */
-export const Ropes = memo(function Ropes({ picture, today, may, mark }: RopesProps) {
+export const Ropes = memo(function Ropes({ picture, today, weights, may, mark }: RopesProps) {
   const { from, to } = campSpan(picture.book);
   const days = { from, count: to - from + 1 };
   const detail = may.includes("lifts.detail");
@@ -30,7 +32,9 @@ export const Ropes = memo(function Ropes({ picture, today, may, mark }: RopesPro
         <div className="grid gap-2.5">
           <SportLane picture={picture} days={days} detail={detail} />
           <LiftingLane picture={picture} days={days} detail={detail} />
-          {may.includes("weight.read") ? <WeightLane book={picture.book} /> : null}
+          {may.includes("weight.read") ? (
+            <WeightLane book={picture.book} weights={weights} days={days} />
+          ) : null}
           {detail && picture.plan.form.values.length > 1 ? (
             <FormLane plan={picture.plan} days={days} />
           ) : null}

@@ -1,12 +1,15 @@
 import { listMembersToTell } from "@/db/queries/members-to-tell";
 import type { Tx } from "@/db/client";
-import { planInputOf } from "@/lib/book";
+import { findAthlete } from "@/db/queries/athletes";
+import { listWeights } from "@/db/queries/weights";
+import { campSpan, planInputOf } from "@/lib/book";
 import { instantOf } from "@/lib/calendar/zones";
-import { instantAt } from "@/lib/engine";
+import { instantAt, isoFromDay } from "@/lib/engine";
 import type { Au, Plan } from "@/lib/engine/types";
 import { POLICY, can, type Action, type Role } from "@/lib/policy";
 import type { CampBook } from "@/lib/schemas/camp-book";
 import type { CampView } from "@/lib/schemas/camp";
+import { isMinor } from "@/lib/services/athletes/age";
 import type { TeamContext } from "@/lib/services/context";
 import type { LoadedCamp } from "./load";
 
@@ -77,6 +80,19 @@ function bookFor({ member }: TeamContext, { book, athlete }: LoadedCamp): CampBo
   return can(member, "checkins.read", athlete.id) ? book : withoutReasons(book);
 }
 
+/** Weights on the camp's days, for who may see them; none of a minor. */
+async function weightsOf(tx: Tx, ctx: TeamContext, { athlete, book }: LoadedCamp) {
+  if (!can(ctx.member, "weight.read", athlete.id)) return [];
+  const span = campSpan(book);
+  const days = { from: isoFromDay(span.from), to: isoFromDay(span.to) };
+  const [person, rows] = await Promise.all([
+    findAthlete(tx, ctx.teamId, athlete.id),
+    listWeights(tx, ctx.teamId, athlete.id, days),
+  ]);
+  if (isMinor(person?.dateOfBirth ?? null, ctx.now.toISOString().slice(0, 10))) return [];
+  return rows.map(({ day, kg }) => ({ date: day, kg }));
+}
+
 /** `known`: the others, where the caller has asked for them already. */
 export async function viewOf(
   tx: Tx,
@@ -100,6 +116,7 @@ export async function viewOf(
     book: bookFor(ctx, camp),
     plan: detail ? camp.plan : withoutLiftingDetail(camp.plan),
     sport: detail ? sport : sport.map((session) => ({ ...session, effort: 0 })),
+    weights: await weightsOf(tx, ctx, camp),
     may: ACTIONS.filter((action) => can(ctx.member, action, athlete.id)),
     others: others.map(({ role }) => role),
   };
